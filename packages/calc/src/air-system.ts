@@ -1,0 +1,177 @@
+/**
+ * The air system: what `solve` and `takeOff` read. Plain JSON, versioned, published as a schema in the contracts; the
+ * export and import format. Field names carry the SI unit after an underscore, because types end here.
+ */
+import type { CubicMetersPerSecond, Kelvins, Meters, MetersPerSecond, Pascals, PascalsPerMeter } from "./quantity.ts";
+
+export const AIR_SYSTEM_SCHEMA = "cleatwork.air-system/1";
+
+export const SERVICES = ["supply", "return", "exhaust", "outside-air"] as const;
+export type Service = (typeof SERVICES)[number];
+
+export const DUCT_CLASSES = ["main", "branch", "runout"] as const;
+/** Where a segment stands in the tree; velocity and friction limits go by it. */
+export type DuctClass = (typeof DUCT_CLASSES)[number];
+
+export const SHAPES = ["round", "rectangular", "flat-oval", "annular"] as const;
+export type Shape = (typeof SHAPES)[number];
+
+/** A cross-section. Width is the plan dimension and is said first. */
+export type Section =
+  | { readonly shape: "round"; readonly diameter_m: Meters }
+  | { readonly shape: "rectangular"; readonly width_m: Meters; readonly height_m: Meters }
+  /** `width` is the overall major axis, `height` the minor axis. */
+  | { readonly shape: "flat-oval"; readonly width_m: Meters; readonly height_m: Meters }
+  /** Air flows between two concentric round ducts. */
+  | { readonly shape: "annular"; readonly outerDiameter_m: Meters; readonly innerDiameter_m: Meters };
+
+export const MATERIALS = ["galvanized", "stainless", "aluminum", "black-steel"] as const;
+export type Material = (typeof MATERIALS)[number];
+
+export const SEAL_CLASSES = ["A", "B", "C", "none"] as const;
+export type SealClass = (typeof SEAL_CLASSES)[number];
+
+export type Insulation =
+  | { readonly kind: "none" }
+  | { readonly kind: "wrap"; readonly thickness_m: Meters }
+  | { readonly kind: "liner"; readonly thickness_m: Meters };
+
+/** What a company writes once and reuses: how duct of a system is built. */
+export interface ConstructionSpec {
+  readonly material: Material;
+  /** Static pressure the duct is built for; positive for supply, negative where the duct is under suction. */
+  readonly pressureClass_pa: Pascals;
+  readonly sealClass: SealClass;
+  /** Length of a straight piece as made, by shape; the last piece of a run is shorter. */
+  readonly sectionLength_m: { readonly rectangular: Meters; readonly round: Meters; readonly flatOval: Meters };
+  readonly rectangularJoint: "slip-and-drive" | "flange" | "standing-s";
+  readonly roundJoint: "slip-coupling" | "flange";
+  readonly rectangularSeam: "corner-lock" | "button-lock";
+  readonly roundConstruction: "spiral" | "longitudinal-seam";
+  readonly insulation: Insulation;
+  readonly hangerSpacing_m: { readonly rectangular: Meters; readonly round: Meters };
+  /** Drawing sizes are the clear inside or the sheet metal. Differs only where there is liner. */
+  readonly sizesAre: "clear-inside" | "sheet-metal";
+  readonly elbow: {
+    readonly rectangular: "radius" | "square-throat-vanes" | "square-throat";
+    readonly round: "smooth" | "gored";
+    /** Center-line radius over width (rectangular) or diameter (round). */
+    readonly radiusRatio: number;
+  };
+  readonly branch: {
+    readonly rectangular: "straight-tap" | "shoe-tap";
+    readonly round: "straight-tap" | "conical-tap";
+  };
+  /** Total angle of a transition. */
+  readonly transitionAngle_rad: number;
+  /** How far flexible duct is left slack: 0 is pulled tight, 0.3 is 30 % too long. Adds loss. */
+  readonly flexibleSlack: number;
+}
+
+export interface DesignConditions {
+  readonly altitude_m: Meters;
+  readonly temperature_k: Kelvins;
+  /** 0 to 1. */
+  readonly relativeHumidity: number;
+  /** What the unit gives this duct system, outside the casing. */
+  readonly availablePressure_pa: Pascals;
+}
+
+export interface Limits {
+  readonly velocity_m_s: Readonly<Record<DuctClass, MetersPerSecond>>;
+  readonly frictionRate_pa_m: Readonly<Record<DuctClass, PascalsPerMeter>>;
+  readonly flexibleLength_m: Meters;
+}
+
+export interface SizingRule {
+  readonly method: "equal-friction" | "velocity";
+  readonly frictionRate_pa_m: PascalsPerMeter;
+  readonly shape: "round" | "rectangular" | "flat-oval";
+  /** Rectangular and flat oval stay under this height; null where there is room. */
+  readonly maximumHeight_m: Meters | null;
+}
+
+export interface Level {
+  readonly id: string;
+  readonly name: string;
+  readonly elevation_m: Meters;
+}
+
+export const NODE_ROLES = ["equipment", "junction", "outlet"] as const;
+export type NodeRole = (typeof NODE_ROLES)[number];
+
+export interface AirNode {
+  readonly id: string;
+  readonly role: NodeRole;
+  /** "AH-1", "D-12"; may be empty for a junction. */
+  readonly tag: string;
+  readonly levelId: string;
+  readonly x_m: Meters;
+  readonly y_m: Meters;
+  /** Above the level. */
+  readonly elevation_m: Meters;
+  /** Outlets only: the air it must give or take. */
+  readonly airflow_m3s: CubicMetersPerSecond | null;
+  /** Outlets only: the total pressure it needs at its own connection. */
+  readonly requiredPressure_pa: Pascals | null;
+  /** Outlets only: key of the bought device in the price book, such as "diffuser-24x24"; null when none is priced. */
+  readonly deviceKey: string | null;
+  readonly spaceName: string;
+}
+
+export const FITTING_TYPES = [
+  "elbow-radius",
+  "elbow-square-throat",
+  "elbow-square-throat-vanes",
+  "elbow-smooth",
+  "elbow-gored",
+  "tap-straight",
+  "tap-shoe",
+  "tap-conical",
+  "tee",
+  "wye",
+  "cross",
+  "transition",
+  "shape-transition",
+  "end-cap",
+  "none",
+] as const;
+export type FittingType = (typeof FITTING_TYPES)[number];
+
+export const ACCESSORY_KINDS = ["volume-damper", "fire-damper", "flexible-connector", "access-door"] as const;
+export type AccessoryKind = (typeof ACCESSORY_KINDS)[number];
+
+export interface AirSegment {
+  readonly id: string;
+  readonly name: string;
+  /** The end nearer the equipment, whichever way the air goes. */
+  readonly fromNodeId: string;
+  readonly toNodeId: string;
+  readonly ductClass: DuctClass;
+  /** Null: left to the sizing rule. */
+  readonly section: Section | null;
+  /** Null: taken from the positions of the nodes. */
+  readonly length_m: Meters | null;
+  readonly flexible: boolean;
+  /** Null: inferred from geometry. The fitting at the end nearer the equipment. */
+  readonly fitting: FittingType | null;
+  readonly accessories: readonly AccessoryKind[];
+  /** Null: the spec's. */
+  readonly insulation: Insulation | null;
+}
+
+export interface AirSystem {
+  readonly schema: typeof AIR_SYSTEM_SCHEMA;
+  readonly id: string;
+  /** "S1". */
+  readonly tag: string;
+  readonly name: string;
+  readonly service: Service;
+  readonly design: DesignConditions;
+  readonly limits: Limits;
+  readonly sizing: SizingRule;
+  readonly spec: ConstructionSpec;
+  readonly levels: readonly Level[];
+  readonly nodes: readonly AirNode[];
+  readonly segments: readonly AirSegment[];
+}

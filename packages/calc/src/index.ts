@@ -1,0 +1,6 @@
+export * from "./quantity.ts";
+export * from "./result.ts";
+export * from "./air-system.ts";
+export * from "./network/solution.ts";
+export * from "./takeoff/takeoff.ts";
+export * from "./pricing/estimate.ts";

@@ -1,0 +1,146 @@
+/** What `solve` answers: plain JSON, one entry for each segment and node, in the order of the air system. */
+import type { FittingType, Section } from "../air-system.ts";
+import type {
+  CubicMetersPerSecond,
+  KilogramsPerCubicMeter,
+  Meters,
+  MetersPerSecond,
+  Pascals,
+  PascalSeconds,
+  PascalsPerMeter,
+  SquareMeters,
+} from "../quantity.ts";
+
+export type FlowRegime = "laminar" | "transitional" | "turbulent";
+
+/** A fitting, as inferred or chosen, at the end of a segment nearer the equipment (or at its outlet end for caps). */
+export interface SolvedFitting {
+  readonly type: FittingType;
+  /** Chosen by the estimator, or inferred from geometry. */
+  readonly basis: "inferred" | "chosen";
+  readonly nodeId: string;
+  /** Turn of an elbow or branch. */
+  readonly angle_rad: number;
+  /** The section on the equipment's side of the fitting; null for a fitting at the equipment itself. */
+  readonly upstreamSection: Section | null;
+  readonly lossCoefficient: number;
+  /** The velocity pressure that the coefficient goes with. */
+  readonly velocityPressure_pa: Pascals;
+  readonly loss_pa: Pascals;
+  /** Where the coefficient comes from, in a few words. */
+  readonly source: string;
+}
+
+export interface SolvedSegment {
+  readonly segmentId: string;
+  /** As typed, or as the sizing rule chose. Clear inside, what the air sees. */
+  readonly section: Section;
+  readonly sized: "typed" | "by-rule";
+  readonly volumetricFlowRate_m3s: CubicMetersPerSecond;
+  readonly length_m: Meters;
+  readonly area_m2: SquareMeters;
+  readonly hydraulicDiameter_m: Meters;
+  readonly equivalentDiameter_m: Meters;
+  readonly meanVelocity_m_s: MetersPerSecond;
+  readonly velocityPressure_pa: Pascals;
+  readonly reynoldsNumber: number;
+  readonly regime: FlowRegime;
+  readonly darcyFrictionFactor: number;
+  readonly frictionRate_pa_m: PascalsPerMeter;
+  readonly frictionLoss_pa: Pascals;
+  readonly fittings: readonly SolvedFitting[];
+  readonly dynamicLoss_pa: Pascals;
+  /** Friction plus dynamic loss. */
+  readonly totalPressureLoss_pa: Pascals;
+  readonly leakage_m3s: CubicMetersPerSecond;
+  /** Number of outlets that this segment serves. */
+  readonly outletCount: number;
+  /** Total pressure left of the available, at the end nearer the equipment and at the far end. */
+  readonly pressureLeftEntering_pa: Pascals;
+  readonly pressureLeftLeaving_pa: Pascals;
+}
+
+export interface SolvedPath {
+  readonly outletNodeId: string;
+  /** From the equipment to the outlet. */
+  readonly segmentIds: readonly string[];
+  readonly length_m: Meters;
+  readonly frictionLoss_pa: Pascals;
+  readonly dynamicLoss_pa: Pascals;
+  readonly outletPressure_pa: Pascals;
+  /** Losses plus what the outlet itself needs. */
+  readonly requiredPressure_pa: Pascals;
+  /** Available less required; negative means the outlet is short of air. */
+  readonly spare_pa: Pascals;
+  /** What a damper must take up so that this outlet gets its design flow when the governing path does. */
+  readonly throttle_pa: Pascals;
+}
+
+export type FindingSeverity = "stop" | "warn" | "note";
+
+export const FINDING_CODES = [
+  "velocity-over-limit",
+  "friction-over-limit",
+  "pressure-short",
+  "flexible-too-long",
+  "flow-transitional",
+  "aspect-ratio-high",
+  "table-range-exceeded",
+  "pressure-class-exceeded",
+  "size-not-found",
+] as const;
+export type FindingCode = (typeof FINDING_CODES)[number];
+
+/** Something an engineer would want to know: what, by how much, against which limit and whose. */
+export interface Finding {
+  readonly id: string;
+  readonly code: FindingCode;
+  readonly severity: FindingSeverity;
+  readonly subject: { readonly kind: "segment" | "node" | "system"; readonly id: string };
+  readonly value: number;
+  readonly limit: number;
+  /** SI unit of value and limit, as in "m/s", "Pa", "Pa/m", "m", "1". */
+  readonly unit: string;
+  readonly limitSource: string;
+}
+
+export interface Solution {
+  readonly systemId: string;
+  readonly air: { readonly density_kg_m3: KilogramsPerCubicMeter; readonly viscosity_pa_s: PascalSeconds };
+  readonly segments: readonly SolvedSegment[];
+  readonly paths: readonly SolvedPath[];
+  readonly governingOutletNodeId: string;
+  readonly requiredPressure_pa: Pascals;
+  readonly availablePressure_pa: Pascals;
+  readonly outletAirflow_m3s: CubicMetersPerSecond;
+  readonly leakage_m3s: CubicMetersPerSecond;
+  readonly findings: readonly Finding[];
+}
+
+/** Why a system cannot be solved. Every problem is reported, not the first. */
+export type SystemProblem = {
+  readonly code:
+    | "no-equipment"
+    | "several-equipment"
+    | "no-outlet"
+    | "node-unknown"
+    | "node-orphaned"
+    | "segment-loops"
+    | "node-has-two-parents"
+    | "duplicate-id"
+    | "outlet-without-airflow"
+    | "outlet-with-children"
+    | "dead-end-without-outlet"
+    | "size-not-positive"
+    | "length-not-positive"
+    | "inner-not-smaller-than-outer"
+    | "flat-oval-taller-than-wide"
+    | "flexible-not-round"
+    | "value-out-of-range";
+  /** The segment, node or system. */
+  readonly subject: { readonly kind: "segment" | "node" | "system"; readonly id: string; readonly name: string };
+  readonly field: string;
+  readonly value: number | string | null;
+  /** What would be accepted, in words. */
+  readonly limit: string;
+};

@@ -1,0 +1,140 @@
+/** What `takeOff` answers: pieces with their arithmetic, and the quantities that are not pieces. Plain JSON. */
+import type { AccessoryKind, AirSystem, FittingType, Material, Section } from "../air-system.ts";
+import type { Hours, Kilograms, Meters, SquareMeters } from "../quantity.ts";
+
+export const PIECE_KINDS = ["straight", "flexible", "elbow", "transition", "branch", "end-cap"] as const;
+export type PieceKind = (typeof PIECE_KINDS)[number];
+
+/** One line of arithmetic a person can follow: "2 × (32 + 18) in. × 60 in. = 41.7 ft²" is built by the screen from this. */
+export interface Arithmetic {
+  readonly quantity:
+    "net-area" | "blank-area" | "weight" | "shop-hours" | "field-hours" | "insulation-area" | "liner-area";
+  /** Named factors in the order they multiply or add, in SI; `label` is a short phrase in plain words. */
+  readonly terms: readonly { readonly label: string; readonly value: number; readonly unit: string }[];
+  readonly result: number;
+  readonly unit: string;
+  /** Schedule, table or practice it rests on. */
+  readonly basis: string;
+}
+
+export interface Piece {
+  /** Stable while the layout does not change: segment number and letter, such as "4C". Unique in the system. */
+  readonly mark: string;
+  readonly systemId: string;
+  readonly systemTag: string;
+  readonly levelId: string;
+  readonly segmentId: string;
+  readonly segmentName: string;
+  readonly kind: PieceKind;
+  readonly fitting: FittingType | null;
+  /** Sheet-metal size. */
+  readonly section: Section;
+  /** The other end of a transition or shape change, or the branch of a tap. */
+  readonly otherSection: Section | null;
+  readonly angle_rad: number;
+  readonly length_m: Meters;
+  readonly material: Material | "flexible";
+  /** "24 ga" as the schedule says; null for flexible duct. */
+  readonly gauge: string | null;
+  readonly sheetThickness_m: Meters | null;
+  readonly gaugeSource: string;
+  readonly joint: string;
+  readonly seam: string;
+  readonly jointCount: number;
+  readonly netArea_m2: SquareMeters;
+  readonly blankArea_m2: SquareMeters;
+  readonly weight_kg: Kilograms;
+  readonly insulationArea_m2: SquareMeters;
+  readonly linerArea_m2: SquareMeters;
+  readonly shopHours_h: Hours;
+  readonly fieldHours_h: Hours;
+  readonly arithmetic: readonly Arithmetic[];
+}
+
+/** Counted things that are not metal pieces: hangers, sealant, dampers, devices… */
+export interface CountedItem {
+  /** Price book key, such as "hanger-strap", "sealant", "volume-damper", or a device key. */
+  readonly key: string;
+  readonly kind: "hanger" | "sealant" | "accessory" | "device";
+  readonly description: string;
+  readonly systemId: string;
+  readonly levelId: string;
+  readonly segmentId: string | null;
+  readonly nodeId: string | null;
+  readonly section: Section | null;
+  readonly quantity: number;
+  readonly unit: "ea" | "L";
+  readonly fieldHours_h: Hours;
+  readonly basis: string;
+}
+
+export interface TakeoffFinding {
+  readonly id: string;
+  readonly code: "gauge-not-in-schedule" | "accessory-needs-review" | "piece-too-heavy";
+  readonly severity: "stop" | "warn" | "note";
+  readonly segmentId: string;
+  readonly message: string;
+}
+
+export interface TakeoffTotals {
+  readonly pieceCount: number;
+  readonly netWeight_kg: Kilograms;
+  readonly netArea_m2: SquareMeters;
+  readonly blankArea_m2: SquareMeters;
+  readonly jointCount: number;
+  readonly insulationArea_m2: SquareMeters;
+  readonly linerArea_m2: SquareMeters;
+  readonly shopHours_h: Hours;
+  readonly fieldHours_h: Hours;
+}
+
+export interface Takeoff {
+  readonly systemId: string;
+  readonly pieces: readonly Piece[];
+  readonly items: readonly CountedItem[];
+  readonly totals: TakeoffTotals;
+  readonly findings: readonly TakeoffFinding[];
+}
+
+/** A row of a gauge schedule: sizes up to and including `upTo_m` (longest side or diameter). */
+export interface GaugeRow {
+  readonly upTo_m: Meters;
+  readonly gauge: string;
+}
+
+/** Company-owned; shipped with sourced defaults. */
+export interface GaugeSchedule {
+  readonly name: string;
+  readonly source: string;
+  readonly rows: readonly {
+    readonly material: Material;
+    readonly shape: "round" | "rectangular" | "flat-oval";
+    /** Largest absolute pressure class these rows hold for. */
+    readonly pressureClass_pa: number;
+    readonly sizes: readonly GaugeRow[];
+  }[];
+}
+
+export interface ProductivityTable {
+  readonly name: string;
+  readonly source: string;
+  /** Hours per kilogram of net metal, by kind. */
+  readonly shop_h_per_kg: { readonly straight: number; readonly fitting: number };
+  readonly field_h_per_kg: { readonly straight: number; readonly fitting: number };
+  readonly flexible_h_per_m: number;
+  readonly hanger_h_each: number;
+  readonly device_h_each: number;
+  readonly accessory_h_each: Readonly<Record<AccessoryKind, number>>;
+  /** Multiplies field hours: height, congestion, occupied building, overtime. */
+  readonly conditionFactor: number;
+}
+
+export interface ShopStandards {
+  readonly gauges: GaugeSchedule;
+  readonly productivity: ProductivityTable;
+  /** Share of the net area added for seams, joints and laps, as bought sheet. */
+  readonly blankAllowance: { readonly straight: number; readonly fitting: number };
+  readonly allowanceSource: string;
+}
+
+export type TakeoffInput = { readonly system: AirSystem; readonly standards: ShopStandards };
