@@ -1,0 +1,152 @@
+/** The published schema of an air system: the export and import format, and what every stage of the calculation reads. */
+import {
+  ACCESSORY_KINDS,
+  AIR_SYSTEM_SCHEMA,
+  DUCT_CLASSES,
+  FITTING_TYPES,
+  MATERIALS,
+  NODE_ROLES,
+  SEAL_CLASSES,
+  SERVICES,
+  type AirNode,
+  type AirSegment,
+  type AirSystem,
+  type ConstructionSpec,
+  type DesignConditions,
+  type Insulation,
+  type Level,
+  type Limits,
+  type Section,
+  type SizingRule,
+} from "@cleatwork/calc";
+import { z } from "zod";
+import {
+  airflowSchema,
+  frictionRateSchema,
+  kelvinsSchema,
+  metersSchema,
+  notNegativePascalsSchema,
+  pascalsSchema,
+  positiveMetersSchema,
+  velocitySchema,
+} from "./quantity.ts";
+
+export const sectionSchema: z.ZodType<Section, Section> = z.discriminatedUnion("shape", [
+  z.strictObject({ shape: z.literal("round"), diameter_m: positiveMetersSchema }),
+  z.strictObject({ shape: z.literal("rectangular"), width_m: positiveMetersSchema, height_m: positiveMetersSchema }),
+  z.strictObject({ shape: z.literal("flat-oval"), width_m: positiveMetersSchema, height_m: positiveMetersSchema }),
+  z.strictObject({
+    shape: z.literal("annular"),
+    outerDiameter_m: positiveMetersSchema,
+    innerDiameter_m: positiveMetersSchema,
+  }),
+]);
+
+export const insulationSchema: z.ZodType<Insulation, Insulation> = z.discriminatedUnion("kind", [
+  z.strictObject({ kind: z.literal("none") }),
+  z.strictObject({ kind: z.literal("wrap"), thickness_m: positiveMetersSchema }),
+  z.strictObject({ kind: z.literal("liner"), thickness_m: positiveMetersSchema }),
+]);
+
+export const constructionSpecSchema: z.ZodType<ConstructionSpec, ConstructionSpec> = z.strictObject({
+  material: z.enum(MATERIALS),
+  pressureClass_pa: pascalsSchema,
+  sealClass: z.enum(SEAL_CLASSES),
+  sectionLength_m: z.strictObject({
+    rectangular: positiveMetersSchema,
+    round: positiveMetersSchema,
+    flatOval: positiveMetersSchema,
+  }),
+  rectangularJoint: z.enum(["slip-and-drive", "flange", "standing-s"]),
+  roundJoint: z.enum(["slip-coupling", "flange"]),
+  rectangularSeam: z.enum(["corner-lock", "button-lock"]),
+  roundConstruction: z.enum(["spiral", "longitudinal-seam"]),
+  insulation: insulationSchema,
+  hangerSpacing_m: z.strictObject({ rectangular: positiveMetersSchema, round: positiveMetersSchema }),
+  sizesAre: z.enum(["clear-inside", "sheet-metal"]),
+  elbow: z.strictObject({
+    rectangular: z.enum(["radius", "square-throat-vanes", "square-throat"]),
+    round: z.enum(["smooth", "gored"]),
+    radiusRatio: z.number().min(0.5).max(5),
+  }),
+  branch: z.strictObject({
+    rectangular: z.enum(["straight-tap", "shoe-tap"]),
+    round: z.enum(["straight-tap", "conical-tap"]),
+  }),
+  transitionAngle_rad: z.number().positive().max(Math.PI),
+  flexibleSlack: z.number().min(0).max(0.5),
+});
+
+export const designSchema: z.ZodType<DesignConditions, DesignConditions> = z.strictObject({
+  altitude_m: metersSchema,
+  temperature_k: kelvinsSchema,
+  relativeHumidity: z.number().min(0).max(1),
+  availablePressure_pa: notNegativePascalsSchema,
+});
+
+const perClass = <S extends z.ZodType>(value: S) =>
+  z.strictObject({ main: value, branch: value, runout: value } satisfies Record<(typeof DUCT_CLASSES)[number], S>);
+
+export const limitsSchema = z.strictObject({
+  velocity_m_s: perClass(velocitySchema),
+  frictionRate_pa_m: perClass(frictionRateSchema),
+  flexibleLength_m: positiveMetersSchema,
+}) satisfies z.ZodType<Limits>;
+
+export const sizingSchema: z.ZodType<SizingRule, SizingRule> = z.strictObject({
+  method: z.enum(["equal-friction", "velocity"]),
+  frictionRate_pa_m: frictionRateSchema,
+  shape: z.enum(["round", "rectangular", "flat-oval"]),
+  maximumHeight_m: positiveMetersSchema.nullable(),
+});
+
+const text = (max: number) => z.string().max(max);
+
+const levelSchema: z.ZodType<Level, Level> = z.strictObject({
+  id: text(64),
+  name: text(80),
+  elevation_m: metersSchema,
+});
+
+const airNodeSchema: z.ZodType<AirNode, AirNode> = z.strictObject({
+  id: text(64),
+  role: z.enum(NODE_ROLES),
+  tag: text(40),
+  levelId: text(64),
+  x_m: metersSchema,
+  y_m: metersSchema,
+  elevation_m: metersSchema,
+  airflow_m3s: airflowSchema.nullable(),
+  requiredPressure_pa: notNegativePascalsSchema.nullable(),
+  deviceKey: text(80).nullable(),
+  spaceName: text(80),
+});
+
+const airSegmentSchema: z.ZodType<AirSegment, AirSegment> = z.strictObject({
+  id: text(64),
+  name: text(80),
+  fromNodeId: text(64),
+  toNodeId: text(64),
+  ductClass: z.enum(DUCT_CLASSES),
+  section: sectionSchema.nullable(),
+  length_m: positiveMetersSchema.nullable(),
+  flexible: z.boolean(),
+  fitting: z.enum(FITTING_TYPES).nullable(),
+  accessories: z.array(z.enum(ACCESSORY_KINDS)).max(20),
+  insulation: insulationSchema.nullable(),
+});
+
+export const airSystemSchema: z.ZodType<AirSystem, AirSystem> = z.strictObject({
+  schema: z.literal(AIR_SYSTEM_SCHEMA),
+  id: text(64),
+  tag: text(20),
+  name: text(120),
+  service: z.enum(SERVICES),
+  design: designSchema,
+  limits: limitsSchema,
+  sizing: sizingSchema,
+  spec: constructionSpecSchema,
+  levels: z.array(levelSchema).max(500),
+  nodes: z.array(airNodeSchema).max(20_000),
+  segments: z.array(airSegmentSchema).max(20_000),
+});
