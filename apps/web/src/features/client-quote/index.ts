@@ -1,0 +1,1 @@
+export { ClientQuotePage } from "./client-quote-page.tsx";
