@@ -1,0 +1,63 @@
+import type { Project, ProjectId, ProjectItem } from "@cleatwork/contracts";
+import type { TenantDb } from "../../platform/db/tenant-db.ts";
+import {
+  projectFromRow,
+  projectItemFromRow,
+  rowFromProject,
+  type ProjectItemRow,
+  type ProjectRequest,
+  type ProjectRow,
+} from "./projects.rows.ts";
+
+export const projectsRepository = (db: TenantDb) => ({
+  /** By bid date, undated last; with the price and state of the latest issued revision. */
+  async list(): Promise<ProjectItem[]> {
+    const rows = (await db
+      .from("projects", "p")
+      .join("organizations as o", "o.id", "p.organization_id")
+      .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
+      .leftJoin("layouts as l", { "l.organization_id": "p.organization_id", "l.project_id": "p.id" })
+      .select("p.id", "p.name", "p.number", "p.state", "p.due_at", "p.due_zone", "o.currency")
+      .select({ client_name: "c.name", segment_count: "l.segment_count" })
+      .orderByRaw("p.due_at IS NULL, p.due_at, p.name, p.id")) as ProjectItemRow[];
+    return rows.map((row) => projectItemFromRow({ ...row, price_minor: null, quote_state: null }));
+  },
+
+  async find(id: ProjectId): Promise<Project | null> {
+    const row = (await db
+      .from("projects", "p")
+      .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
+      .where("p.id", id)
+      .first("p.*", { client_name: "c.name" })) as ProjectRow | undefined;
+    return row ? projectFromRow(row) : null;
+  },
+
+  /** The version and state now, with the row locked; null when there is no such project here. */
+  async lock(id: ProjectId): Promise<Pick<Project, "version" | "state"> | null> {
+    const row = (await db.from("projects").where({ id }).forUpdate().first("version", "state")) as
+      Pick<Project, "version" | "state"> | undefined;
+    return row ?? null;
+  },
+
+  async insert(id: ProjectId, project: ProjectRequest, now: Date): Promise<void> {
+    await db.insert("projects", {
+      id,
+      ...rowFromProject(project),
+      state: "bidding" satisfies Project["state"],
+      version: 1,
+      created_at: now,
+    });
+  },
+
+  async update(id: ProjectId, project: ProjectRequest, expected: number): Promise<void> {
+    await db
+      .from("projects")
+      .where({ id, version: expected })
+      .update({ ...rowFromProject(project), version: expected + 1 });
+  },
+
+  async setState(id: ProjectId, state: Project["state"]): Promise<boolean> {
+    const changed = await db.from("projects").where({ id }).update({ state });
+    return changed === 1;
+  },
+});
