@@ -50,6 +50,7 @@ export interface Endpoint<
   Body extends z.ZodType = z.ZodType,
   Response extends z.ZodType = z.ZodType,
   Kind extends Access = Access,
+  Answers extends "json" | "file" = "json" | "file",
 > {
   readonly method: "get" | "post" | "put" | "patch" | "delete";
   /** Below `/api`. */
@@ -65,22 +66,26 @@ export interface Endpoint<
   /** "file": multipart/form-data with one part named `file`. */
   readonly takes: "json" | "file";
   /** "file": bytes with a content type; the response schema is then unused. */
-  readonly answers: "json" | "file";
+  readonly answers: Answers;
 }
 
 const nothing = z.undefined();
 
-type Row<Path extends string, Q extends z.ZodType, B extends z.ZodType, R extends z.ZodType, K extends Access> = Pick<
-  Endpoint<Path, Q, B, R, K>,
-  "method" | "path" | "access" | "summary"
-> & {
+type Row<
+  Path extends string,
+  Q extends z.ZodType,
+  B extends z.ZodType,
+  R extends z.ZodType,
+  K extends Access,
+  A extends "json" | "file",
+> = Pick<Endpoint<Path, Q, B, R, K>, "method" | "path" | "access" | "summary"> & {
   query?: Q;
   body?: B;
   response?: R;
   status?: Endpoint["status"];
   guards?: readonly Guard[];
   takes?: Endpoint["takes"];
-  answers?: Endpoint["answers"];
+  answers?: A;
 };
 
 export function endpoint<
@@ -89,7 +94,8 @@ export function endpoint<
   B extends z.ZodType = z.ZodUndefined,
   R extends z.ZodType = z.ZodUndefined,
   const K extends Access = Access,
->(row: Row<Path, Q, B, R, K>): Endpoint<Path, Q, B, R, K> {
+  const A extends "json" | "file" = "json",
+>(row: Row<Path, Q, B, R, K, A>): Endpoint<Path, Q, B, R, K, A> {
   return {
     query: nothing as unknown as Q,
     body: nothing as unknown as B,
@@ -97,7 +103,7 @@ export function endpoint<
     status: row.response ? 200 : 204,
     guards: [],
     takes: "json",
-    answers: "json",
+    answers: "json" as A,
     ...row,
   };
 }
