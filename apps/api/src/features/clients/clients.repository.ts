@@ -35,8 +35,7 @@ export const clientsRepository = (db: TenantDb) => {
 
     /** The version now, with the row locked; null when there is no such client here. */
     async lock(id: ClientId): Promise<{ version: number } | null> {
-      const row = (await db.from("clients").where({ id }).forUpdate().first("version")) as
-        { version: number } | undefined;
+      const row: { version: number } | undefined = await db.from("clients").where({ id }).forUpdate().first("version");
       return row ?? null;
     },
 
@@ -56,10 +55,11 @@ export const clientsRepository = (db: TenantDb) => {
     /** Contacts of this company with these ids, whichever client they belong to. */
     async contactOwners(ids: readonly ContactId[]): Promise<{ id: ContactId; clientId: ClientId }[]> {
       if (ids.length === 0) return [];
-      return (await db
+      const rows: { id: ContactId; clientId: ClientId }[] = await db
         .from("client_contacts")
         .whereIn("id", [...ids])
-        .select({ id: "id", clientId: "client_id" })) as { id: ContactId; clientId: ClientId }[];
+        .select({ id: "id", clientId: "client_id" });
+      return rows;
     },
 
     /** Contacts of this client, other than the kept ones, that a project names. */
@@ -67,16 +67,17 @@ export const clientsRepository = (db: TenantDb) => {
       clientId: ClientId,
       kept: readonly ContactId[],
     ): Promise<{ id: ContactId; name: string; projectName: string }[]> {
-      return (await db
+      const rows: {
+        id: ContactId;
+        name: string;
+        projectName: string;
+      }[] = await db
         .from("client_contacts", "k")
         .join("projects as p", { "p.organization_id": "k.organization_id", "p.contact_id": "k.id" })
         .where("k.client_id", clientId)
         .whereNotIn("k.id", [...kept])
-        .select({ id: "k.id", name: "k.name", projectName: "p.name" })) as {
-        id: ContactId;
-        name: string;
-        projectName: string;
-      }[];
+        .select({ id: "k.id", name: "k.name", projectName: "p.name" });
+      return rows;
     },
 
     async saveContacts(clientId: ClientId, contacts: readonly Contact[]): Promise<void> {

@@ -37,8 +37,11 @@ export const layoutsRepository = (db: TenantDb) => ({
 
   /** Locks the head, so that saves of one layout go one after the other. */
   async lockHead(projectId: ProjectId): Promise<{ sequence: number } | null> {
-    const row = (await db.from("layouts").where({ project_id: projectId }).forUpdate().first("sequence")) as
-      { sequence: number } | undefined;
+    const row: { sequence: number } | undefined = await db
+      .from("layouts")
+      .where({ project_id: projectId })
+      .forUpdate()
+      .first("sequence");
     return row ?? null;
   },
 
@@ -111,20 +114,20 @@ export const layoutsRepository = (db: TenantDb) => ({
 
   async knownSpecs(ids: readonly SpecId[]): Promise<Set<SpecId>> {
     if (ids.length === 0) return new Set();
-    const rows = (await db
+    const rows: { id: SpecId }[] = await db
       .from("specs")
       .whereIn("id", [...ids])
-      .select("id")) as { id: SpecId }[];
+      .select("id");
     return new Set(rows.map((row) => row.id));
   },
 
   async knownDrawings(projectId: ProjectId, ids: readonly DrawingId[]): Promise<Set<DrawingId>> {
     if (ids.length === 0) return new Set();
-    const rows = (await db
+    const rows: { id: DrawingId }[] = await db
       .from("drawings")
       .where({ project_id: projectId })
       .whereIn("id", [...ids])
-      .select("id")) as { id: DrawingId }[];
+      .select("id");
     return new Set(rows.map((row) => row.id));
   },
 });

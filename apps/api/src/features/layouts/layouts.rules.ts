@@ -1,5 +1,5 @@
 /** Pure: what a batch of edits does to the records as they stand now, or what stands against it. */
-import type { ChangeSet, LayoutRecord, RecordId } from "@cleatwork/contracts";
+import type { ChangeSet, DrawingId, LayoutRecord, RecordId, SpecId } from "@cleatwork/contracts";
 import { isDeepStrictEqual } from "node:util";
 
 export interface LayoutError {
@@ -84,4 +84,42 @@ export function nameOf(record: LayoutRecord | null): string {
     case "segment":
       return record.name || "the segment";
   }
+}
+
+/** Where in the batch each record was last written, as a JSON pointer. */
+export function pointersInto(sets: readonly ChangeSet[]): (recordId: string, field: string) => string {
+  const pointers = new Map<string, string>();
+  for (const [setIndex, set] of sets.entries())
+    for (const [changeIndex, change] of set.changes.entries())
+      pointers.set(change.id, `/sets/${setIndex}/changes/${changeIndex}`);
+  return (recordId, field) => {
+    const pointer = pointers.get(recordId);
+    return pointer === undefined ? "" : `${pointer}/after${field === "" ? "" : `/${field}`}`;
+  };
+}
+
+/** Records that name a spec of no one here, or a drawing of another project. */
+export function referenceErrors(
+  written: readonly LayoutRecord[],
+  known: { specs: ReadonlySet<SpecId>; drawings: ReadonlySet<DrawingId> },
+  pointer: (recordId: string, field: string) => string,
+): LayoutError[] {
+  const errors: LayoutError[] = [];
+  for (const record of written) {
+    if (record.kind === "system" && !known.specs.has(record.specId))
+      errors.push({
+        pointer: pointer(record.id, "specId"),
+        code: "spec-unknown",
+        message: `${nameOf(record)} needs a construction spec of this company`,
+        value: record.specId,
+      });
+    if (record.kind === "level" && record.underlay && !known.drawings.has(record.underlay.drawingId))
+      errors.push({
+        pointer: pointer(record.id, "underlay/drawingId"),
+        code: "drawing-unknown",
+        message: `${nameOf(record)} needs a drawing of this project`,
+        value: record.underlay.drawingId,
+      });
+  }
+  return errors;
 }

@@ -53,12 +53,11 @@ export const pricingRepository = (db: TenantDb) => ({
 
   /** Null when there is no such project here. */
   async findProjectPricing(projectId: ProjectId): Promise<ProjectPricing | null> {
-    const row = (await db
+    const row: { document: unknown; version: number | null } | undefined = await db
       .from("projects", "p")
       .leftJoin("project_pricing as x", { "x.organization_id": "p.organization_id", "x.project_id": "p.id" })
       .where("p.id", projectId)
-      .first({ document: "x.document", version: "x.version" })) as
-      { document: unknown; version: number | null } | undefined;
+      .first({ document: "x.document", version: "x.version" });
     return row ? projectPricingFromRow(row) : null;
   },
 

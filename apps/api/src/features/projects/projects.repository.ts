@@ -12,30 +12,33 @@ import {
 export const projectsRepository = (db: TenantDb) => ({
   /** By bid date, undated last; with the price and state of the latest issued revision. */
   async list(): Promise<ProjectItem[]> {
-    const rows = (await db
+    const rows: ProjectItemRow[] = await db
       .from("projects", "p")
       .join("organizations as o", "o.id", "p.organization_id")
       .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
       .leftJoin("layouts as l", { "l.organization_id": "p.organization_id", "l.project_id": "p.id" })
       .select("p.id", "p.name", "p.number", "p.state", "p.due_at", "p.due_zone", "o.currency")
       .select({ client_name: "c.name", segment_count: "l.segment_count" })
-      .orderByRaw("p.due_at IS NULL, p.due_at, p.name, p.id")) as ProjectItemRow[];
+      .orderByRaw("p.due_at IS NULL, p.due_at, p.name, p.id");
     return rows.map((row) => projectItemFromRow({ ...row, price_minor: null, quote_state: null }));
   },
 
   async find(id: ProjectId): Promise<Project | null> {
-    const row = (await db
+    const row: ProjectRow | undefined = await db
       .from("projects", "p")
       .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
       .where("p.id", id)
-      .first("p.*", { client_name: "c.name" })) as ProjectRow | undefined;
+      .first("p.*", { client_name: "c.name" });
     return row ? projectFromRow(row) : null;
   },
 
   /** The version and state now, with the row locked; null when there is no such project here. */
   async lock(id: ProjectId): Promise<Pick<Project, "version" | "state"> | null> {
-    const row = (await db.from("projects").where({ id }).forUpdate().first("version", "state")) as
-      Pick<Project, "version" | "state"> | undefined;
+    const row: Pick<Project, "version" | "state"> | undefined = await db
+      .from("projects")
+      .where({ id })
+      .forUpdate()
+      .first("version", "state");
     return row ?? null;
   },
 

@@ -17,7 +17,7 @@ export const specsRepository = (db: TenantDb) => ({
 
   /** The version now, with the row locked; null when there is no such spec here. */
   async lock(id: SpecId): Promise<number | null> {
-    const row = (await db.from("specs").where({ id }).forUpdate().first("version")) as { version: number } | undefined;
+    const row: { version: number } | undefined = await db.from("specs").where({ id }).forUpdate().first("version");
     return row?.version ?? null;
   },
 
