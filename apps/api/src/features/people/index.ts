@@ -1,0 +1,2 @@
+/** The door of people. */
+export { peopleHandlers } from "./people.routes.ts";
