@@ -1,4 +1,4 @@
-import { knex, type Knex } from "knex";
+import knex, { type Knex } from "knex";
 import type { OrganizationId } from "@cleatwork/contracts";
 import type { Clock } from "../clock.ts";
 import type { Ids } from "../ids.ts";
