@@ -1,0 +1,67 @@
+/** From the drawn document to what the calculation reads: one air system for each system, its segments in tree order. */
+import {
+  AIR_SYSTEM_SCHEMA,
+  meters,
+  type AirNode,
+  type AirSegment,
+  type AirSystem,
+  type ConstructionSpec,
+  type Level,
+  type Meters,
+} from "@cleatwork/calc";
+import type { NodeRecord, SegmentRecord, SpecId, SystemRecord } from "@cleatwork/contracts";
+import { listOf, type Layout } from "./layout.ts";
+import { indexOf, treeOf, type LayoutIndex } from "./layout-index.ts";
+
+export interface AirSystemContext {
+  readonly specs: readonly { readonly id: SpecId; readonly construction: ConstructionSpec }[];
+  /** Of the site; a system's own design conditions keep the rest. */
+  readonly altitude_m: Meters;
+}
+
+/** Systems whose spec is not among the given are left out; the server never stores such a system. */
+export function airSystemsFrom(
+  layout: Layout,
+  context: AirSystemContext,
+  index: LayoutIndex = indexOf(layout),
+): AirSystem[] {
+  const specs = new Map(context.specs.map(({ id, construction }) => [id, construction]));
+  const levels = levelsOf(layout);
+  return listOf(layout, "system")
+    .sort((a, b) => (a.tag < b.tag ? -1 : a.tag > b.tag ? 1 : 0))
+    .flatMap((system) => {
+      const spec = specs.get(system.specId);
+      return spec ? [airSystem(system, spec, levels, index, context.altitude_m)] : [];
+    });
+}
+
+const levelsOf = (layout: Layout): Level[] =>
+  listOf(layout, "level").map(({ id, name, elevation_m }) => ({ id, name, elevation_m }));
+
+function airSystem(
+  system: SystemRecord,
+  spec: ConstructionSpec,
+  levels: readonly Level[],
+  index: LayoutIndex,
+  altitude: Meters,
+): AirSystem {
+  return {
+    schema: AIR_SYSTEM_SCHEMA,
+    id: system.id,
+    tag: system.tag,
+    name: system.name,
+    service: system.service,
+    design: { ...system.design, altitude_m: meters(altitude) },
+    limits: system.limits,
+    sizing: system.sizing,
+    spec,
+    levels,
+    nodes: (index.nodesOf.get(system.id) ?? []).map(airNode),
+    segments: treeOf(index, system.id).map(({ segment }) => airSegment(segment)),
+  };
+}
+
+const airNode = ({ kind: _kind, systemId: _systemId, ...node }: NodeRecord): AirNode => node;
+
+const airSegment = ({ kind: _kind, systemId: _systemId, ordinal: _ordinal, ...segment }: SegmentRecord): AirSegment =>
+  segment;

@@ -1,0 +1,10 @@
+export type { Section } from "@cleatwork/calc";
+export type {
+  LayoutRecord,
+  NodeId,
+  NodeRecord,
+  RecordId,
+  SegmentId,
+  SegmentRecord,
+  SystemId,
+} from "@cleatwork/contracts";
