@@ -4,3 +4,5 @@ export * from "./air-system.ts";
 export * from "./network/solution.ts";
 export * from "./takeoff/takeoff.ts";
 export * from "./pricing/estimate.ts";
+export { solve } from "./network/solve.ts";
+export { SHIPPED_PRACTICE, type PracticeCoefficients } from "./fittings/practice.table.ts";

@@ -1,5 +1,5 @@
 /** What `solve` answers: plain JSON, one entry for each segment and node, in the order of the air system. */
-import type { FittingType, Section } from "../air-system.ts";
+import type { AccessoryKind, FittingType, Section } from "../air-system.ts";
 import type {
   CubicMetersPerSecond,
   KilogramsPerCubicMeter,
@@ -29,6 +29,19 @@ export interface SolvedFitting {
   readonly loss_pa: Pascals;
   /** Where the coefficient comes from, in a few words. */
   readonly source: string;
+  /**
+   * The piece is made for this segment. False where a segment only feels the loss of a piece that is counted elsewhere: the
+   * main running past a tap, the second leg of a tee.
+   */
+  readonly madeHere: boolean;
+}
+
+/** A damper or the like in the segment, open. */
+export interface SolvedAccessory {
+  readonly kind: AccessoryKind;
+  readonly lossCoefficient: number;
+  readonly loss_pa: Pascals;
+  readonly source: string;
 }
 
 export interface SolvedSegment {
@@ -49,6 +62,8 @@ export interface SolvedSegment {
   readonly frictionRate_pa_m: PascalsPerMeter;
   readonly frictionLoss_pa: Pascals;
   readonly fittings: readonly SolvedFitting[];
+  readonly accessories: readonly SolvedAccessory[];
+  /** Fittings and accessories. */
   readonly dynamicLoss_pa: Pascals;
   /** Friction plus dynamic loss. */
   readonly totalPressureLoss_pa: Pascals;

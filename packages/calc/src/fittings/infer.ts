@@ -1,0 +1,47 @@
+/** Which fitting the geometry calls for. The estimator's own choice comes before, see network/solve-fittings.ts. */
+import type { ConstructionSpec, FittingType, Section } from "../air-system.ts";
+
+/** Under this a bend is how it was drawn, not an elbow. */
+export const SMALLEST_TURN_RAD = (10 * Math.PI) / 180;
+/** A leg that leaves at less than this leans along the main: a wye rather than a tap or tee. */
+const WYE_UNDER_RAD = (67.5 * Math.PI) / 180;
+
+export const elbowType = (section: Section, { elbow }: ConstructionSpec): FittingType => {
+  if (section.shape !== "rectangular") return elbow.round === "gored" ? "elbow-gored" : "elbow-smooth";
+  switch (elbow.rectangular) {
+    case "radius":
+      return "elbow-radius";
+    case "square-throat":
+      return "elbow-square-throat";
+    case "square-throat-vanes":
+      return "elbow-square-throat-vanes";
+  }
+};
+
+export const tapType = (section: Section, { branch }: ConstructionSpec): FittingType =>
+  section.shape === "rectangular"
+    ? branch.rectangular === "shoe-tap"
+      ? "tap-shoe"
+      : "tap-straight"
+    : branch.round === "conical-tap"
+      ? "tap-conical"
+      : "tap-straight";
+
+/** A branch off a duct that runs on. */
+export const branchType = (
+  section: Section,
+  spec: ConstructionSpec,
+  { angle, facesAnother }: { angle: number; facesAnother: boolean },
+): FittingType => (facesAnother ? "cross" : angle < WYE_UNDER_RAD ? "wye" : tapType(section, spec));
+
+/** The end of a duct that splits. */
+export const splitType = (legCount: number, smallestAngle: number): FittingType =>
+  legCount > 2 ? "cross" : smallestAngle < WYE_UNDER_RAD ? "wye" : "tee";
+
+export const transitionType = (upstream: Section, downstream: Section): FittingType =>
+  upstream.shape === downstream.shape ? "transition" : "shape-transition";
+
+export const isElbow = (type: FittingType): boolean => type.startsWith("elbow-");
+export const isTransition = (type: FittingType): boolean => type === "transition" || type === "shape-transition";
+export const isJunction = (type: FittingType): boolean =>
+  type.startsWith("tap-") || type === "tee" || type === "wye" || type === "cross";

@@ -1,0 +1,91 @@
+/** The air stage: a layout with its conditions in, flows, sizes, losses, paths and findings out. */
+import type { AirSystem } from "../air-system.ts";
+import { airDensity } from "../air/density.ts";
+import { dynamicViscosity } from "../air/viscosity.ts";
+import { describeJoints } from "../fittings/joints.ts";
+import { sumJunctions } from "../fittings/junction-sums.ts";
+import { SHIPPED_PRACTICE, type PracticeCoefficients } from "../fittings/practice.table.ts";
+import { transitionForm } from "../fittings/transition.ts";
+import { cubicMetersPerSecond, pascals, radians } from "../quantity.ts";
+import { fail, ok, type Result } from "../result.ts";
+import { sizingTables } from "../sizing/size-rule.ts";
+import { checkConditions } from "./check-conditions.ts";
+import { layCourse } from "./course.ts";
+import { inOrder, type FindingList } from "./findings.ts";
+import { addUpFlows } from "./flows.ts";
+import { tracePaths } from "./paths.ts";
+import { chooseSections } from "./sections.ts";
+import { solveSegments, velocityPressures } from "./solve-segments.ts";
+import type { Solution, SystemProblem } from "./solution.ts";
+import { buildTree } from "./tree.ts";
+
+/**
+ * Flows, sizes, pressure losses, paths and findings of a system, or every reason why it has none.
+ *
+ * Segments carry the air of the outlets beyond them. Leakage is told beside it and added to what the equipment moves; it
+ * does not change the flow in a segment. Total pressure is accounted throughout, friction on the hydraulic diameter.
+ *
+ * Range    one pass each way over the segments: cost is linear in them
+ * Problem  every code of `SystemProblem`, all at once
+ * Source   Darcy and Weisbach, Colebrook; fittings each with their own source in the answer
+ */
+export function solve(
+  system: AirSystem,
+  practice: PracticeCoefficients = SHIPPED_PRACTICE,
+): Result<Solution, SystemProblem> {
+  const problems: SystemProblem[] = [];
+  checkConditions(system, problems);
+  const tree = buildTree(system, problems);
+  const course = layCourse(system, tree, problems);
+  if (problems.length > 0) return fail(...problems);
+
+  const { design, spec } = system;
+  const density = airDensity({
+    altitude: design.altitude_m,
+    temperature: design.temperature_k,
+    relativeHumidity: design.relativeHumidity,
+  });
+  const viscosity = dynamicViscosity(design.temperature_k);
+
+  const findings: FindingList = { findings: [] };
+  const { airflow, outletCount } = addUpFlows(system, tree);
+  const sections = chooseSections(system, airflow, sizingTables(system, { density, viscosity }), findings);
+  const joints = describeJoints(tree, course, airflow);
+  const solved = solveSegments({
+    system,
+    tree,
+    course,
+    airflow,
+    outletCount,
+    sections,
+    velocityPressure: velocityPressures(airflow, sections.area, density),
+    joints,
+    sums: sumJunctions(tree, joints, airflow, sections.area),
+    practice,
+    transitionForm: transitionForm(radians(spec.transitionAngle_rad)),
+    diverges: system.service === "supply",
+    findings,
+    density,
+    viscosity,
+  });
+  const { paths, governingOutletNodeId, requiredPressure } = tracePaths(system, tree, solved, findings);
+
+  return ok({
+    systemId: system.id,
+    air: { density_kg_m3: density, viscosity_pa_s: viscosity },
+    segments: solved.segments,
+    paths,
+    governingOutletNodeId,
+    requiredPressure_pa: pascals(requiredPressure),
+    availablePressure_pa: design.availablePressure_pa,
+    outletAirflow_m3s: cubicMetersPerSecond(totalAirflow(system, tree.outlets)),
+    leakage_m3s: cubicMetersPerSecond(solved.leakage),
+    findings: inOrder(findings),
+  });
+}
+
+function totalAirflow({ nodes }: AirSystem, outlets: readonly number[]): number {
+  let total = 0;
+  for (const n of outlets) total += nodes[n]!.airflow_m3s!;
+  return total;
+}

@@ -1,0 +1,23 @@
+import type { KilogramsPerCubicMeter, Meters, MetersPerSecond, PascalSeconds, PascalsPerMeter } from "../quantity.ts";
+import { metersPerSecond } from "../quantity.ts";
+
+/**
+ * Velocity at which a duct loses exactly a friction rate in turbulent flow. No iteration: Re √f is known beforehand.
+ *
+ *     Re √f = Dh √(2 S ρ Dh) / μ,   V = √(2 S Dh / ρ) / √f,   1/√f = −2 log10( ε/(3.7 Dh) + 2.51/(Re √f) )
+ *
+ * Range    turbulent; the caller checks the answer with the full friction law
+ * Source   Colebrook (1939) with Darcy and Weisbach, solved for the velocity
+ */
+export function velocityAtFrictionRate(duct: {
+  frictionRate: PascalsPerMeter;
+  hydraulicDiameter: Meters;
+  roughness: Meters;
+  density: KilogramsPerCubicMeter;
+  viscosity: PascalSeconds;
+}): MetersPerSecond {
+  const { frictionRate, hydraulicDiameter, roughness, density, viscosity } = duct;
+  const shear = Math.sqrt((2 * frictionRate * hydraulicDiameter) / density);
+  const reynoldsRoot = (density * shear * hydraulicDiameter) / viscosity;
+  return metersPerSecond(shear * -2 * Math.log10(roughness / (3.7 * hydraulicDiameter) + 2.51 / reynoldsRoot));
+}
