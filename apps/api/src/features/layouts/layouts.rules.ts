@@ -1,6 +1,6 @@
 /** Pure: what a batch of edits does to the records as they stand now, or what stands against it. */
 import type { ChangeSet, DrawingId, LayoutRecord, RecordId, SpecId } from "@cleatwork/contracts";
-import { isDeepStrictEqual } from "node:util";
+import { checkLayout, nameOf, sameRecord } from "@cleatwork/layout";
 
 export interface LayoutError {
   readonly pointer: string;
@@ -39,11 +39,11 @@ export function applySets(current: readonly LayoutRecord[], sets: readonly Chang
         continue;
       }
       const now = records.get(change.id) ?? null;
-      if (!isDeepStrictEqual(now, change.before) && !conflicts.has(change.id))
+      if (!sameRecord(now, change.before) && !conflicts.has(change.id))
         conflicts.set(change.id, {
           pointer,
           code: now === null ? "record-gone" : change.before === null ? "record-exists" : "record-changed",
-          message: `${nameOf(now ?? change.before ?? change.after)} as it stands now`,
+          message: `${calledBy(now ?? change.before ?? change.after)} as it stands now`,
           value: now,
         });
       if (change.after) records.set(change.id, change.after);
@@ -55,6 +55,8 @@ export function applySets(current: readonly LayoutRecord[], sets: readonly Chang
   if (conflicts.size > 0) return { kind: "conflict", errors: [...conflicts.values()] };
   return { kind: "applied", records, touched };
 }
+
+const calledBy = (record: LayoutRecord | null) => (record ? nameOf(record) : "the record");
 
 function malformedChange(change: ChangeSet["changes"][number]): Omit<LayoutError, "pointer"> | null {
   const { id, before, after } = change;
@@ -71,19 +73,17 @@ function malformedChange(change: ChangeSet["changes"][number]): Omit<LayoutError
   return null;
 }
 
-/** What a person would call it. */
-export function nameOf(record: LayoutRecord | null): string {
-  if (!record) return "the record";
-  switch (record.kind) {
-    case "level":
-      return record.name;
-    case "system":
-      return record.tag;
-    case "node":
-      return record.tag || record.spaceName || `the ${record.role}`;
-    case "segment":
-      return record.name || "the segment";
-  }
+/** What makes the layout unsound after the batch, each told where the batch wrote it. */
+export function soundnessErrors(
+  records: ReadonlyMap<RecordId, LayoutRecord>,
+  pointer: (recordId: string, field: string) => string,
+): LayoutError[] {
+  return checkLayout({ records }).map((found) => ({
+    pointer: pointer(found.recordId, found.field),
+    code: found.code,
+    message: `${found.name} (${found.recordId}) needs ${found.message}`,
+    value: found.value,
+  }));
 }
 
 /** Where in the batch each record was last written, as a JSON pointer. */

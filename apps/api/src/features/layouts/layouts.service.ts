@@ -12,7 +12,7 @@ import { createHash, randomUUID } from "node:crypto";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { problem } from "../../platform/http/problem.ts";
 import { layoutsRepository, type LoggedSet } from "./layouts.repository.ts";
-import { applySets, pointersInto, referenceErrors } from "./layouts.rules.ts";
+import { applySets, pointersInto, referenceErrors, soundnessErrors } from "./layouts.rules.ts";
 
 interface Edit {
   readonly by: PersonId;
@@ -82,7 +82,11 @@ export async function saveLayout(
 
     const after = [...applied.records.values()];
     const written = after.filter((record) => applied.touched.has(record.id));
-    const refused = [...(await unknownReferences(tx, projectId, written, pointersInto(request.sets)))];
+    const pointer = pointersInto(request.sets);
+    const refused = [
+      ...soundnessErrors(applied.records, pointer),
+      ...(await unknownReferences(tx, projectId, written, pointer)),
+    ];
     if (refused.length > 0) throw problem("layout-refused", sentence(refused), refused);
 
     const gone = [...applied.touched].filter((id) => !applied.records.has(id));
