@@ -30,9 +30,9 @@ import { newId } from "./new-id.ts";
 const limits: Limits = {
   velocity_m_s: { main: feetPerMinute(1475), branch: feetPerMinute(1180), runout: feetPerMinute(740) },
   frictionRate_pa_m: {
-    main: inchesOfWaterPer100Feet(0.1),
-    branch: inchesOfWaterPer100Feet(0.1),
-    runout: inchesOfWaterPer100Feet(0.1),
+    main: inchesOfWaterPer100Feet(0.12),
+    branch: inchesOfWaterPer100Feet(0.12),
+    runout: inchesOfWaterPer100Feet(0.3),
   },
   flexibleLength_m: feet(5),
 };

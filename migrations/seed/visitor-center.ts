@@ -14,16 +14,9 @@ export const visitorCenter: SystemRows = {
   temperature_f: 57,
   height_ft: 14,
   outletPrefix: "D",
+  // prettier-ignore
   rows: [
-    {
-      no: 1,
-      after: null,
-      name: "Spiral main",
-      duct: "main",
-      size: "20",
-      to: [10, 10],
-      accessories: ["flexible-connector"],
-    },
+    { no: 1, after: null, name: "Spiral main", duct: "main", size: "20", to: [10, 10], accessories: ["flexible-connector"] },
     { no: 2, after: 1, name: "Spiral main", duct: "main", size: "18", to: [20, 10] },
     { no: 3, after: 2, name: "Spiral main", duct: "main", size: "16", to: [30, 10] },
     { no: 4, after: 3, name: "Spiral main", duct: "main", size: "14", to: [40, 10] },

@@ -16,6 +16,7 @@ export const grid = {
     { label: "6", at: 92 },
     { label: "7", at: 112 },
   ],
+  // prettier-ignore
   rows: [
     { label: "A", at: 0 },
     { label: "B", at: 18 },
@@ -25,78 +26,29 @@ export const grid = {
 } as const;
 
 /** Inside walls, each from end to end. */
+// prettier-ignore
 export const walls: readonly (readonly [Point, Point])[] = [
-  [
-    [20, 18],
-    [112, 18],
-  ],
-  [
-    [20, 27],
-    [92, 27],
-  ],
-  [
-    [0, 27],
-    [20, 27],
-  ],
-  [
-    [20, 0],
-    [20, 27],
-  ],
-  [
-    [30, 0],
-    [30, 18],
-  ],
-  [
-    [50, 0],
-    [50, 18],
-  ],
-  [
-    [60, 0],
-    [60, 18],
-  ],
-  [
-    [78, 0],
-    [78, 18],
-  ],
-  [
-    [86, 0],
-    [86, 18],
-  ],
-  [
-    [94, 0],
-    [94, 18],
-  ],
-  [
-    [102, 0],
-    [102, 18],
-  ],
-  [
-    [34, 27],
-    [34, 58],
-  ],
-  [
-    [44, 27],
-    [44, 37],
-  ],
-  [
-    [34, 37],
-    [44, 37],
-  ],
-  [
-    [39, 30],
-    [39, 37],
-  ],
-  [
-    [56, 27],
-    [56, 58],
-  ],
-  [
-    [92, 27],
-    [92, 58],
-  ],
+  [[20, 18], [112, 18]],
+  [[20, 27], [92, 27]],
+  [[0, 27], [20, 27]],
+  [[20, 0], [20, 27]],
+  [[30, 0], [30, 18]],
+  [[50, 0], [50, 18]],
+  [[60, 0], [60, 18]],
+  [[78, 0], [78, 18]],
+  [[86, 0], [86, 18]],
+  [[94, 0], [94, 18]],
+  [[102, 0], [102, 18]],
+  [[34, 27], [34, 58]],
+  [[44, 27], [44, 37]],
+  [[34, 37], [44, 37]],
+  [[39, 30], [39, 37]],
+  [[56, 27], [56, 58]],
+  [[92, 27], [92, 58]],
 ];
 
 /** A door in a wall: where, how wide, and along which way the wall runs. */
+// prettier-ignore
 export const doors: readonly { at: Point; width_ft: number; along: "x" | "y" }[] = [
   { at: [27, 18], width_ft: 3, along: "x" },
   { at: [46, 18], width_ft: 3, along: "x" },
@@ -116,6 +68,7 @@ export const doors: readonly { at: Point; width_ft: number; along: "x" | "y" }[]
   { at: [44, 58], width_ft: 8, along: "x" },
 ];
 
+// prettier-ignore
 export const rooms: readonly { name: string; number: string; at: Point }[] = [
   { name: "MECHANICAL", number: "101", at: [8, 20] },
   { name: "STORAGE", number: "102", at: [25, 7] },
