@@ -1,5 +1,6 @@
 /** What makes a layout unsound. The server refuses to store such a layout; the browser says so before it is sent. */
-import type { NodeId, NodeRecord, RecordId, Section, SegmentRecord } from "./records.ts";
+import type { Section } from "@cleatwork/calc";
+import type { NodeId, NodeRecord, RecordId, SegmentRecord } from "@cleatwork/contracts";
 import { nameOf, type Layout } from "./layout.ts";
 
 export interface LayoutProblem {
