@@ -229,7 +229,7 @@ describe("copy", () => {
     expect(copy).toMatchObject({ name: "Branch", section: branch.section, fromNodeId: first.toNodeId });
     expect(lengthFrom(after, copy.id)).toBeCloseTo(lengthFrom(layout, branch.id), 6);
     const end = find(after, "node", copy.toNodeId) as NodeRecord;
-    expect(end.y_m).toBeCloseTo(-feet(20), 6);
+    expect(end.y_m).toBeCloseTo(-1 * feet(20), 6);
     expect(end.airflow_m3s).toBe((find(layout, "node", branch.toNodeId) as NodeRecord).airflow_m3s);
   });
 });
