@@ -1,0 +1,1 @@
+export { projectQueries } from "./projects.queries.ts";

@@ -1,0 +1,2 @@
+export const classNames = (...names: readonly (string | false | null | undefined)[]): string =>
+  names.filter(Boolean).join(" ");

@@ -1,0 +1,1 @@
+export { NothingHere as Component } from "../app/route-error.tsx";

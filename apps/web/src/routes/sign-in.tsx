@@ -1,0 +1,3 @@
+import { SignInPage } from "../features/people/sign-in/sign-in-page.tsx";
+
+export const SignIn = SignInPage;
