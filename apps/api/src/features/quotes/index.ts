@@ -1,0 +1,2 @@
+/** The door of quotes. */
+export { quoteHandlers } from "./quotes.routes.ts";
