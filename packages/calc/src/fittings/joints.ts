@@ -1,6 +1,6 @@
 /** What happens where segments meet: the turn of each, and which legs run on, branch off or split. Geometry only. */
 import type { Course } from "../network/course.ts";
-import type { Tree } from "../network/tree.ts";
+import { NONE, type Tree } from "../network/tree.ts";
 
 /** How a segment leaves the one that feeds it. */
 export const leg = {
@@ -27,24 +27,19 @@ export interface Joints {
 const STRAIGHT_ON_COSINE = Math.cos((20 * Math.PI) / 180);
 
 export function describeJoints(tree: Tree, { direction }: Course, airflow: Float64Array): Joints {
-  const { segmentCount, order, from, into, childStart, childList } = tree;
+  const { segmentCount, before, into, childStart, childList } = tree;
   const legs = new Uint8Array(segmentCount);
   const turnCosine = new Float64Array(segmentCount);
 
-  for (let at = 0; at < segmentCount; at++) {
-    const s = order[at]!;
-    const node = from[s]!;
-    const parent = into[node]!;
-    if (parent < 0) {
-      turnCosine[s] = NaN;
-      continue;
-    }
-    turnCosine[s] = cosineBetween(direction, parent, s);
-    const first = childStart[node]!;
-    const count = childStart[node + 1]! - first;
-    if (count === 1) legs[s] = leg.only;
-    // Children of one node come together in the order, so the last of them sees the turns of all.
-    else if (childList[first + count - 1] === s) markLegs(legs, turnCosine, airflow, childList, first, first + count);
+  for (let s = 0; s < segmentCount; s++) {
+    turnCosine[s] = before[s] === NONE ? NaN : cosineBetween(direction, before[s]!, s);
+  }
+  for (let n = 0; n < into.length; n++) {
+    if (into[n] === NONE) continue;
+    const first = childStart[n]!;
+    const end = childStart[n + 1]!;
+    if (end - first === 1) legs[childList[first]!] = leg.only;
+    else if (end > first) markLegs(legs, turnCosine, airflow, childList, first, end);
   }
   return { leg: legs, turnCosine };
 }

@@ -17,7 +17,7 @@ export interface JunctionSums {
 }
 
 export function sumJunctions(tree: Tree, joints: Joints, airflow: Float64Array, area: Float64Array): JunctionSums {
-  const { segmentCount, from, into } = tree;
+  const { segmentCount, before } = tree;
   const sums: JunctionSums = {
     legCount: new Int32Array(segmentCount),
     branchCount: new Int32Array(segmentCount),
@@ -28,7 +28,7 @@ export function sumJunctions(tree: Tree, joints: Joints, airflow: Float64Array, 
     leastTurnCosine: new Float64Array(segmentCount).fill(-1),
   };
   for (let s = 0; s < segmentCount; s++) {
-    const common = into[from[s]!]!;
+    const common = before[s]!;
     if (common === NONE) continue;
     sums.legCount[common]!++;
     const kind = joints.leg[s];

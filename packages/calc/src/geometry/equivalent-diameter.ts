@@ -44,7 +44,9 @@ export const equivalentDiameterOfAnnulus = (duct: { area: SquareMeters; hydrauli
 /** Equivalent diameter of any section, from measures that the caller already has. */
 export function equivalentDiameter(
   section: Section,
-  measured: { area: SquareMeters; perimeter: Meters; hydraulicDiameter: Meters },
+  area: SquareMeters,
+  perimeter: Meters,
+  hydraulicDiameter: Meters,
 ): Meters {
   switch (section.shape) {
     case "round":
@@ -52,9 +54,9 @@ export function equivalentDiameter(
     case "rectangular":
       return equivalentDiameterOfRectangle({ width: section.width_m, height: section.height_m });
     case "flat-oval":
-      return equivalentDiameterOfFlatOval(measured);
+      return equivalentDiameterOfFlatOval({ area, perimeter });
     case "annular":
-      return equivalentDiameterOfAnnulus(measured);
+      return equivalentDiameterOfAnnulus({ area, hydraulicDiameter });
   }
 }
 

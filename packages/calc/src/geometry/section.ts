@@ -49,7 +49,7 @@ export function wettedPerimeter(section: Section): Meters {
  */
 export const hydraulicDiameter = (area: SquareMeters, perimeter: Meters): Meters => meters((4 * area) / perimeter);
 
-/** Perimeter of the wall between the duct and the room, where leakage goes out: the outer one only. */
+/** Perimeter of the wall between the duct and the room, where leakage goes out: of an annulus the outer one only. */
 export const outerPerimeter = (section: Section): Meters =>
   section.shape === "annular" ? meters(Math.PI * section.outerDiameter_m) : wettedPerimeter(section);
 
@@ -62,7 +62,6 @@ export const aspectRatio = (section: Section): number =>
 /** Same shape and size to a hundredth of a millimeter: typed inches and typed millimeters meet. */
 export function isSameSection(a: Section, b: Section): boolean {
   if (a === b) return true;
-  const near = (left: number, right: number) => Math.abs(left - right) < 1e-5;
   switch (a.shape) {
     case "round":
       return b.shape === "round" && near(a.diameter_m, b.diameter_m);
@@ -77,3 +76,5 @@ export function isSameSection(a: Section, b: Section): boolean {
       );
   }
 }
+
+const near = (left: number, right: number): boolean => Math.abs(left - right) < 1e-5;

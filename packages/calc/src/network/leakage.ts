@@ -33,11 +33,11 @@ export function leakageClass(sealClass: SealClass, shape: Shape, flexible: AirSe
  *
  * @example 2,500 ft² of class 12 at 2 in. of water: 470.8 cfm
  */
-export const leakage = (duct: {
-  leakageClass: number;
-  surface: SquareMeters;
-  staticPressure: Pascals;
-}): CubicMetersPerSecond =>
+export const leakage = (
+  leakageClassOfDuct: number,
+  surface: SquareMeters,
+  staticPressure: Pascals,
+): CubicMetersPerSecond =>
   cubicMetersPerSecond(
-    PER_CLASS * duct.leakageClass * duct.surface * Math.abs(duct.staticPressure) ** leakageClassTable.exponent,
+    PER_CLASS * leakageClassOfDuct * surface * Math.abs(staticPressure) ** leakageClassTable.exponent,
   );

@@ -1,8 +1,9 @@
 /** From the equipment to every outlet: what it needs, what is spare, what a damper must take up. */
 import type { AirSystem } from "../air-system.ts";
 import { OPEN_ENTRY_COEFFICIENT, OPEN_EXIT_COEFFICIENT } from "../fittings/ends.ts";
-import { meters, pascals } from "../quantity.ts";
+import { meters, pascals, type Pascals } from "../quantity.ts";
 import { addFinding, limitSources, type FindingList } from "./findings.ts";
+import { plainRecord, type Draft } from "./plain-record.ts";
 import type { SolvedPath } from "./solution.ts";
 import type { SolvedTree } from "./solve-segments.ts";
 import { NONE, type Tree } from "./tree.ts";
@@ -13,66 +14,105 @@ export interface Paths {
   readonly requiredPressure: number;
 }
 
-/**
- * Paths in the order of the outlets. The governing path needs the most pressure; of equals, the first.
- *
- * An outlet that says no pressure of its own is an open end: it takes one velocity pressure of its duct.
- */
+/** Paths in the order of the outlets. The governing path needs the most pressure; of equals, the first. */
 export function tracePaths(system: AirSystem, tree: Tree, solved: SolvedTree, findings: FindingList): Paths {
-  const { outlets, into, from } = tree;
-  const { segments, lengthTo, frictionTo, dynamicTo } = solved;
-  const openEnd = system.service === "supply" ? OPEN_EXIT_COEFFICIENT : OPEN_ENTRY_COEFFICIENT;
-  const available = system.design.availablePressure_pa;
+  const { outlets } = tree;
+  const needs = outletNeeds(system, tree, solved);
+  const governing = indexOfMost(needs.required);
+  const most = needs.required[governing]!;
+  const paths = new Array<SolvedPath>(outlets.length);
+  fillPaths(system, tree, solved, needs, most, paths);
+  reportShort(system, tree, needs.required, findings);
+  return { paths, governingOutletNodeId: system.nodes[outlets[governing]!]!.id, requiredPressure: most };
+}
 
-  let governing = 0;
+interface OutletNeeds {
+  readonly outletPressure: Float64Array;
+  readonly required: Float64Array;
+}
+
+/** An outlet that says no pressure of its own is an open end: it takes one velocity pressure of its duct. */
+function outletNeeds(system: AirSystem, { outlets, into }: Tree, solved: SolvedTree): OutletNeeds {
+  const openEnd = system.service === "supply" ? OPEN_EXIT_COEFFICIENT : OPEN_ENTRY_COEFFICIENT;
   const outletPressure = new Float64Array(outlets.length);
   const required = new Float64Array(outlets.length);
   for (let o = 0; o < outlets.length; o++) {
     const last = into[outlets[o]!]!;
-    outletPressure[o] = system.nodes[outlets[o]!]!.requiredPressure_pa ?? openEnd * segments[last]!.velocityPressure_pa;
-    required[o] = frictionTo[last]! + dynamicTo[last]! + outletPressure[o]!;
-    if (required[o]! > required[governing]!) governing = o;
+    const typed = system.nodes[outlets[o]!]!.requiredPressure_pa;
+    outletPressure[o] = typed ?? openEnd * solved.segments[last]!.velocityPressure_pa;
+    required[o] = solved.frictionTo[last]! + solved.dynamicTo[last]! + outletPressure[o]!;
   }
-
-  const most = required[governing]!;
-  const paths = new Array<SolvedPath>(outlets.length);
-  for (let o = 0; o < outlets.length; o++) {
-    const node = outlets[o]!;
-    const last = into[node]!;
-    const spare = available - required[o]!;
-    paths[o] = {
-      outletNodeId: system.nodes[node]!.id,
-      segmentIds: segmentsTo(last, system, into, from),
-      length_m: meters(lengthTo[last]!),
-      frictionLoss_pa: pascals(frictionTo[last]!),
-      dynamicLoss_pa: pascals(dynamicTo[last]!),
-      outletPressure_pa: pascals(outletPressure[o]!),
-      requiredPressure_pa: pascals(required[o]!),
-      spare_pa: pascals(spare),
-      throttle_pa: pascals(most - required[o]!),
-    };
-    if (spare < 0) {
-      addFinding(
-        findings,
-        last,
-        "pressure-short",
-        { kind: "node", id: system.nodes[node]!.id },
-        {
-          value: required[o]!,
-          limit: available,
-          unit: "Pa",
-          limitSource: limitSources.available,
-        },
-      );
-    }
-  }
-  return { paths, governingOutletNodeId: system.nodes[outlets[governing]!]!.id, requiredPressure: most };
+  return { outletPressure, required };
 }
 
-function segmentsTo(last: number, { segments }: AirSystem, into: Int32Array, from: Int32Array): string[] {
-  let count = 0;
-  for (let s = last; s !== NONE; s = into[from[s]!]!) count++;
-  const ids = new Array<string>(count);
-  for (let s = last; s !== NONE; s = into[from[s]!]!) ids[--count] = segments[s]!.id;
-  return ids;
+function indexOfMost(values: Float64Array): number {
+  let most = 0;
+  for (let i = 1; i < values.length; i++) if (values[i]! > values[most]!) most = i;
+  return most;
+}
+
+/** Walks the tree once with the way so far at hand, and copies it at each outlet. */
+function fillPaths(
+  { nodes, segments, design }: AirSystem,
+  { outlets, into, order, depth }: Tree,
+  solved: SolvedTree,
+  needs: OutletNeeds,
+  most: number,
+  paths: SolvedPath[],
+): void {
+  const outletAfter = new Int32Array(order.length).fill(NONE);
+  for (let o = 0; o < outlets.length; o++) outletAfter[into[outlets[o]!]!] = o;
+
+  const way: string[] = [];
+  for (let at = 0; at < order.length; at++) {
+    const s = order[at]!;
+    way[depth[s]!] = segments[s]!.id;
+    const o = outletAfter[s]!;
+    if (o === NONE) continue;
+    const segmentIds = way.slice(0, depth[s]! + 1);
+    paths[o] = new PathRecord(
+      nodes[outlets[o]!]!.id,
+      segmentIds,
+      solved,
+      s,
+      needs,
+      o,
+      design.availablePressure_pa,
+      most,
+    );
+  }
+}
+
+const PathRecord = plainRecord(function (
+  this: Draft<SolvedPath>,
+  outletNodeId: string,
+  segmentIds: readonly string[],
+  { lengthTo, frictionTo, dynamicTo }: SolvedTree,
+  last: number,
+  { outletPressure, required }: OutletNeeds,
+  outlet: number,
+  available: Pascals,
+  most: number,
+) {
+  this.outletNodeId = outletNodeId;
+  this.segmentIds = segmentIds;
+  this.length_m = meters(lengthTo[last]!);
+  this.frictionLoss_pa = pascals(frictionTo[last]!);
+  this.dynamicLoss_pa = pascals(dynamicTo[last]!);
+  this.outletPressure_pa = pascals(outletPressure[outlet]!);
+  this.requiredPressure_pa = pascals(required[outlet]!);
+  this.spare_pa = pascals(available - required[outlet]!);
+  this.throttle_pa = pascals(most - required[outlet]!);
+});
+
+function reportShort({ nodes, design }: AirSystem, tree: Tree, required: Float64Array, findings: FindingList): void {
+  const { outlets, into } = tree;
+  const limit = design.availablePressure_pa;
+  for (let o = 0; o < outlets.length; o++) {
+    const value = required[o]!;
+    if (value <= limit) continue;
+    const subject = { kind: "node", id: nodes[outlets[o]!]!.id } as const;
+    const limitSource = limitSources.available;
+    addFinding(findings, into[outlets[o]!]!, "pressure-short", subject, { value, limit, unit: "Pa", limitSource });
+  }
 }

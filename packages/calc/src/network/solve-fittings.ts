@@ -45,6 +45,8 @@ import { isSameSection } from "../geometry/section.ts";
 import { pascals, radians, squareMeters, type Radians } from "../quantity.ts";
 import type { Course } from "./course.ts";
 import { addFinding, type FindingList } from "./findings.ts";
+import type { Friction } from "./friction.ts";
+import { plainRecord, type Draft } from "./plain-record.ts";
 import type { Sections } from "./sections.ts";
 import type { SolvedFitting } from "./solution.ts";
 import { NONE, type Tree } from "./tree.ts";
@@ -55,7 +57,7 @@ export interface FittingContext {
   readonly course: Course;
   readonly airflow: Float64Array;
   readonly sections: Sections;
-  readonly velocityPressure: Float64Array;
+  readonly friction: Friction;
   readonly joints: Joints;
   readonly sums: JunctionSums;
   readonly practice: PracticeCoefficients;
@@ -70,46 +72,61 @@ const RIGHT_ANGLE = radians(Math.PI / 2);
 const STRAIGHT = radians(0);
 
 /** Fittings where a segment leaves the one before, nearest the equipment first. */
-export function fittingsOf(context: FittingContext, s: number, darcyFrictionFactor: number): readonly SolvedFitting[] {
-  const { system, tree, sections, joints } = context;
-  const chosen = system.segments[s]!.fitting;
+export function fittingsOf(context: FittingContext, s: number): readonly SolvedFitting[] {
+  const chosen = context.system.segments[s]!.fitting;
+  const before = context.tree.before[s]!;
+  if (chosen !== null) return chosenFittings(context, s, before, chosen);
+  if (before === NONE) return NO_FITTINGS;
+
+  const kind = context.joints.leg[s];
+  if (kind === leg.branch || kind === leg.split) return [junction(context, s, before, null)];
+  const passes = kind === leg.run ? passage(context, s, before) : null;
+  const changes = isSizeKept(context, s, before) ? null : transition(context, s, before, null);
+  const turns = kind === leg.only && context.joints.turnCosine[s]! < SMALLEST_TURN_COSINE;
+  return listed(passes, changes, turns ? elbow(context, s, before, null) : null);
+}
+
+/** The estimator's choice in place of what was inferred; the loss of passing another's branch stays. */
+function chosenFittings(
+  context: FittingContext,
+  s: number,
+  before: number,
+  chosen: FittingType,
+): readonly SolvedFitting[] {
   if (chosen === "none") return NO_FITTINGS;
-
-  const before = tree.into[tree.from[s]!]!;
-  if (before === NONE) return chosen === null ? NO_FITTINGS : [atEquipment(context, s, chosen, darcyFrictionFactor)];
-
-  const kind = joints.leg[s];
-  if (chosen === null) {
-    if (kind === leg.branch || kind === leg.split) return [junction(context, s, before, null)];
-    const turns = kind === leg.only && joints.turnCosine[s]! < SMALLEST_TURN_COSINE;
-    const changes = !isSameSection(sections.section[before]!, sections.section[s]!);
-    if (kind === leg.only && !turns && !changes) return NO_FITTINGS;
-
-    const fittings: SolvedFitting[] = [];
-    if (kind === leg.run) fittings.push(passage(context, s, before));
-    if (changes) fittings.push(transition(context, s, before, null));
-    if (turns) fittings.push(elbow(context, s, before, null, darcyFrictionFactor));
-    return fittings;
-  }
-
+  if (before === NONE) return [atEquipment(context, s, chosen)];
   if (isJunction(chosen)) return [junction(context, s, before, chosen)];
-  const fittings: SolvedFitting[] = [];
-  if (kind === leg.run) fittings.push(passage(context, s, before));
-  if (isTransition(chosen)) fittings.push(transition(context, s, before, chosen));
-  else if (chosen === "end-cap") fittings.push(endCap(context, s, sections.section[before]!));
-  else {
-    const joinsDirectly = kind === leg.only || kind === leg.run;
-    if (joinsDirectly && !isSameSection(sections.section[before]!, sections.section[s]!)) {
-      fittings.push(transition(context, s, before, null));
-    }
-    fittings.push(elbow(context, s, before, chosen, darcyFrictionFactor));
+
+  const kind = context.joints.leg[s];
+  const passes = kind === leg.run ? passage(context, s, before) : null;
+  if (isTransition(chosen)) return listed(passes, transition(context, s, before, chosen), null);
+  if (chosen === "end-cap") return listed(passes, endCap(context, s, context.sections.section[before]!), null);
+  const joinsDirectly = kind === leg.only || kind === leg.run;
+  const changes = joinsDirectly && !isSizeKept(context, s, before) ? transition(context, s, before, null) : null;
+  return listed(passes, changes, elbow(context, s, before, chosen));
+}
+
+const isSizeKept = ({ sections }: FittingContext, s: number, before: number): boolean =>
+  isSameSection(sections.section[before]!, sections.section[s]!);
+
+/** Those that are there, in their order. */
+function listed(
+  first: SolvedFitting | null,
+  second: SolvedFitting | null,
+  third: SolvedFitting | null,
+): readonly SolvedFitting[] {
+  if (first === null) {
+    if (second === null) return third === null ? NO_FITTINGS : [third];
+    return third === null ? [second] : [second, third];
   }
-  return fittings;
+  if (second === null) return third === null ? [first] : [first, third];
+  return third === null ? [first, second] : [first, second, third];
 }
 
 const SMALLEST_TURN_COSINE = Math.cos(SMALLEST_TURN_RAD);
 
-function solved(
+const FittingRecord = plainRecord(function (
+  this: Draft<SolvedFitting>,
   type: FittingType,
   chosen: FittingType | null,
   nodeId: string,
@@ -119,20 +136,18 @@ function solved(
   velocityPressure: number,
   source: string,
   madeHere: boolean,
-): SolvedFitting {
-  return {
-    type,
-    basis: chosen === null ? "inferred" : "chosen",
-    nodeId,
-    angle_rad: angle,
-    upstreamSection,
-    lossCoefficient,
-    velocityPressure_pa: pascals(velocityPressure),
-    loss_pa: pascals(lossCoefficient * velocityPressure),
-    source,
-    madeHere,
-  };
-}
+) {
+  this.type = type;
+  this.basis = chosen === null ? "inferred" : "chosen";
+  this.nodeId = nodeId;
+  this.angle_rad = angle;
+  this.upstreamSection = upstreamSection;
+  this.lossCoefficient = lossCoefficient;
+  this.velocityPressure_pa = pascals(velocityPressure);
+  this.loss_pa = pascals(lossCoefficient * velocityPressure);
+  this.source = source;
+  this.madeHere = madeHere;
+});
 
 /** The turn as drawn; a right angle where an elbow or tap was chosen and nothing was drawn. */
 function drawnTurn({ joints }: FittingContext, s: number): Radians {
@@ -140,13 +155,7 @@ function drawnTurn({ joints }: FittingContext, s: number): Radians {
   return cosine < SMALLEST_TURN_COSINE ? radians(Math.acos(cosine)) : RIGHT_ANGLE;
 }
 
-function elbow(
-  context: FittingContext,
-  s: number,
-  before: number,
-  chosen: FittingType | null,
-  darcyFrictionFactor: number,
-): SolvedFitting {
+function elbow(context: FittingContext, s: number, before: number, chosen: FittingType | null): SolvedFitting {
   const { system, sections } = context;
   const segment = system.segments[s]!;
   const section = sections.section[s]!;
@@ -155,34 +164,44 @@ function elbow(
   const upstream = before === NONE ? null : section;
   // Flexible duct bends by itself: its loss is that of a smooth elbow, and no piece is made.
   const madeHere = !segment.flexible;
-  const pressure = context.velocityPressure[s]!;
+  const pressure = context.friction.velocityPressure[s]!;
   const at = segment.fromNodeId;
 
   switch (type) {
     case "elbow-radius": {
       const sideRatio = sideRatioOf(context, s, before, section);
       const coefficient = radiusElbowCoefficient({ angle, radiusRatio: system.spec.elbow.radiusRatio, sideRatio });
-      return solved(type, chosen, at, angle, upstream, coefficient, pressure, RADIUS_ELBOW_SOURCE, madeHere);
+      return new FittingRecord(type, chosen, at, angle, upstream, coefficient, pressure, RADIUS_ELBOW_SOURCE, madeHere);
     }
     case "elbow-square-throat": {
       const sideRatio = sideRatioOf(context, s, before, section);
       const coefficient = squareThroatElbowCoefficient({ angle, sideRatio });
-      return solved(type, chosen, at, angle, upstream, coefficient, pressure, SQUARE_THROAT_SOURCE, madeHere);
+      return new FittingRecord(
+        type,
+        chosen,
+        at,
+        angle,
+        upstream,
+        coefficient,
+        pressure,
+        SQUARE_THROAT_SOURCE,
+        madeHere,
+      );
     }
     case "elbow-square-throat-vanes": {
       const coefficient = context.practice.vanedElbow * bendAngleFactor(angle);
-      return solved(type, chosen, at, angle, upstream, coefficient, pressure, PRACTICE_SOURCE, madeHere);
+      return new FittingRecord(type, chosen, at, angle, upstream, coefficient, pressure, PRACTICE_SOURCE, madeHere);
     }
     default: {
       const smooth = smoothElbowCoefficient({
         angle,
         radiusRatio: system.spec.elbow.radiusRatio,
-        darcyFrictionFactor,
+        darcyFrictionFactor: context.friction.darcyFrictionFactor[s]!,
       });
       const isGored = type === "elbow-gored";
       const coefficient = isGored ? smooth * context.practice.goredOverSmooth : smooth;
       const source = isGored ? GORED_SOURCE : SMOOTH_ELBOW_SOURCE;
-      return solved(type, chosen, at, angle, upstream, coefficient, pressure, source, madeHere);
+      return new FittingRecord(type, chosen, at, angle, upstream, coefficient, pressure, source, madeHere);
     }
   }
 }
@@ -193,8 +212,7 @@ const GORED_SOURCE = `Smooth elbow times a factor: ${PRACTICE_SOURCE}`;
 function sideRatioOf(context: FittingContext, s: number, before: number, section: Section): number {
   if (section.shape !== "rectangular" && section.shape !== "flat-oval") return 1;
   const { direction } = context.course;
-  const isSteep = (segment: number) => Math.abs(direction[3 * segment + 2]!) > 0.5;
-  const isVertical = isSteep(s) || (before !== NONE && isSteep(before));
+  const isVertical = isSteep(direction, s) || (before !== NONE && isSteep(direction, before));
   const ratio = isVertical ? section.width_m / section.height_m : section.height_m / section.width_m;
   if (!isSideRatioInTable(ratio)) {
     const { sideRatio } = rectangularElbowTable.range;
@@ -209,6 +227,8 @@ function sideRatioOf(context: FittingContext, s: number, before: number, section
   return ratio;
 }
 
+const isSteep = (direction: Float64Array, s: number): boolean => Math.abs(direction[3 * s + 2]!) > 0.5;
+
 function addRangeFinding(context: FittingContext, s: number, value: number, limit: number, limitSource: string): void {
   const id = context.system.segments[s]!.id;
   addFinding(
@@ -222,7 +242,7 @@ function addRangeFinding(context: FittingContext, s: number, value: number, limi
 
 /** The change of size comes after a junction, so it carries this segment's air in both areas. */
 function transition(context: FittingContext, s: number, before: number, chosen: FittingType | null): SolvedFitting {
-  const { system, sections, velocityPressure, transitionForm, practice, diverges } = context;
+  const { system, sections, friction, transitionForm, practice, diverges } = context;
   const upstream = sections.section[before]!;
   const type = chosen ?? transitionType(upstream, sections.section[s]!);
   const areaBefore = squareMeters(sections.area[before]!);
@@ -236,13 +256,23 @@ function transition(context: FittingContext, s: number, before: number, chosen: 
   const coefficient = isPractice ? practice.shapeChange : bySize;
   const source = isPractice ? PRACTICE_SOURCE : contracts ? CONTRACTION_SOURCE : EXPANSION_SOURCE;
 
-  const pressure = velocityPressure[s]! * (areaHere / step.smaller) ** 2;
-  return solved(type, chosen, system.segments[s]!.fromNodeId, STRAIGHT, upstream, coefficient, pressure, source, true);
+  const pressure = friction.velocityPressure[s]! * (areaHere / step.smaller) ** 2;
+  return new FittingRecord(
+    type,
+    chosen,
+    system.segments[s]!.fromNodeId,
+    STRAIGHT,
+    upstream,
+    coefficient,
+    pressure,
+    source,
+    true,
+  );
 }
 
 /** The loss of the main past a tap, a wye or a cross. The piece belongs to the branch. */
 function passage(context: FittingContext, s: number, before: number): SolvedFitting {
-  const { system, sections, sums, airflow, velocityPressure, joints, diverges } = context;
+  const { system, sections, sums, airflow, friction, joints, diverges } = context;
   const branch = sums.fullest[before]!;
   const type = junctionType(context, branch, before, system.segments[branch]!.fitting);
   const share = {
@@ -253,14 +283,14 @@ function passage(context: FittingContext, s: number, before: number): SolvedFitt
   const coefficient = diverges
     ? divergingMainCoefficient(share)
     : convergingLegCoefficient(run, sums.momentum[before]!);
-  return solved(
+  return new FittingRecord(
     type,
     null,
     system.segments[s]!.fromNodeId,
     radians(Math.acos(legCosine(joints, branch))),
     sections.section[before]!,
     coefficient,
-    velocityPressure[before]!,
+    friction.velocityPressure[before]!,
     diverges ? DIVERGING_SOURCE : CONVERGING_SOURCE,
     false,
   );
@@ -299,7 +329,7 @@ function facesAnother({ tree, course, joints, sums }: FittingContext, s: number,
 
 /** The loss of air into a branch, or into one leg of a split; and back out of them in a return. */
 function junction(context: FittingContext, s: number, before: number, chosen: FittingType | null): SolvedFitting {
-  const { system, sections, sums, airflow, velocityPressure, joints, practice, diverges } = context;
+  const { system, sections, sums, airflow, friction, joints, practice, diverges } = context;
   const type = junctionType(context, s, before, chosen);
   const isSplit = joints.leg[s] === leg.split;
   const angle = radians(Math.acos(legCosine(joints, s)));
@@ -324,14 +354,14 @@ function junction(context: FittingContext, s: number, before: number, chosen: Fi
 
   // One piece serves both sides of a cross and both legs of a tee: the fuller leg makes it.
   const isShared = isSplit || type === "cross";
-  return solved(
+  return new FittingRecord(
     type,
     chosen,
     system.segments[s]!.fromNodeId,
     of.angle,
     sections.section[before]!,
     coefficient,
-    velocityPressure[before]!,
+    friction.velocityPressure[before]!,
     source,
     !isShared || sums.fullest[before] === s,
   );
@@ -340,21 +370,36 @@ function junction(context: FittingContext, s: number, before: number, chosen: Fi
 const EASED_TAP_SOURCE = `Idelchik's straight tap times a factor: ${PRACTICE_SOURCE}`;
 
 function endCap({ system }: FittingContext, s: number, upstream: Section | null): SolvedFitting {
-  return solved("end-cap", "end-cap", system.segments[s]!.fromNodeId, STRAIGHT, upstream, 0, 0, END_CAP_SOURCE, true);
+  return new FittingRecord(
+    "end-cap",
+    "end-cap",
+    system.segments[s]!.fromNodeId,
+    STRAIGHT,
+    upstream,
+    0,
+    0,
+    END_CAP_SOURCE,
+    true,
+  );
 }
 
 const END_CAP_SOURCE = "No air passes an end cap";
 
 /** A fitting chosen for a segment that starts at the equipment: an elbow, or an opening in the plenum. */
-function atEquipment(
-  context: FittingContext,
-  s: number,
-  chosen: FittingType,
-  darcyFrictionFactor: number,
-): SolvedFitting {
-  if (isElbow(chosen)) return elbow(context, s, NONE, chosen, darcyFrictionFactor);
+function atEquipment(context: FittingContext, s: number, chosen: FittingType): SolvedFitting {
+  if (isElbow(chosen)) return elbow(context, s, NONE, chosen);
   if (chosen === "end-cap") return endCap(context, s, null);
   const coefficient = context.diverges ? FLUSH_ENTRY_COEFFICIENT : OPEN_EXIT_COEFFICIENT;
   const at = context.system.segments[s]!.fromNodeId;
-  return solved(chosen, chosen, at, STRAIGHT, null, coefficient, context.velocityPressure[s]!, ENDS_SOURCE, true);
+  return new FittingRecord(
+    chosen,
+    chosen,
+    at,
+    STRAIGHT,
+    null,
+    coefficient,
+    context.friction.velocityPressure[s]!,
+    ENDS_SOURCE,
+    true,
+  );
 }

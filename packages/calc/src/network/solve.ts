@@ -13,10 +13,11 @@ import { checkConditions } from "./check-conditions.ts";
 import { layCourse } from "./course.ts";
 import { inOrder, type FindingList } from "./findings.ts";
 import { addUpFlows } from "./flows.ts";
+import { findFriction } from "./friction.ts";
 import { tracePaths } from "./paths.ts";
 import { chooseSections } from "./sections.ts";
-import { solveSegments, velocityPressures } from "./solve-segments.ts";
-import type { Solution, SystemProblem } from "./solution.ts";
+import { solveSegments } from "./solve-segments.ts";
+import type { Solution, SolvedSegment, SystemProblem } from "./solution.ts";
 import { buildTree } from "./tree.ts";
 
 /**
@@ -58,15 +59,13 @@ export function solve(
     airflow,
     outletCount,
     sections,
-    velocityPressure: velocityPressures(airflow, sections.area, density),
+    friction: findFriction(system, airflow, sections, { density, viscosity }),
     joints,
     sums: sumJunctions(tree, joints, airflow, sections.area),
     practice,
     transitionForm: transitionForm(radians(spec.transitionAngle_rad)),
     diverges: system.service === "supply",
     findings,
-    density,
-    viscosity,
   });
   const { paths, governingOutletNodeId, requiredPressure } = tracePaths(system, tree, solved, findings);
 
@@ -79,7 +78,7 @@ export function solve(
     requiredPressure_pa: pascals(requiredPressure),
     availablePressure_pa: design.availablePressure_pa,
     outletAirflow_m3s: cubicMetersPerSecond(totalAirflow(system, tree.outlets)),
-    leakage_m3s: cubicMetersPerSecond(solved.leakage),
+    leakage_m3s: cubicMetersPerSecond(totalLeakage(solved.segments)),
     findings: inOrder(findings),
   });
 }
@@ -87,5 +86,11 @@ export function solve(
 function totalAirflow({ nodes }: AirSystem, outlets: readonly number[]): number {
   let total = 0;
   for (const n of outlets) total += nodes[n]!.airflow_m3s!;
+  return total;
+}
+
+function totalLeakage(segments: readonly SolvedSegment[]): number {
+  let total = 0;
+  for (let s = 0; s < segments.length; s++) total += segments[s]!.leakage_m3s;
   return total;
 }
