@@ -7,3 +7,7 @@ export * from "./pricing/estimate.ts";
 export { solve } from "./network/solve.ts";
 export { SHIPPED_PRACTICE, type PracticeCoefficients } from "./fittings/practice.table.ts";
 export * from "./display/index.ts";
+export { takeOff } from "./takeoff/take-off.ts";
+export { sumTotals } from "./takeoff/totals.ts";
+export { NO_GAUGE, PIECE_GROUPINGS, groupPieces, type PieceGroup, type PieceGrouping } from "./takeoff/group-pieces.ts";
+export { shippedStandards } from "./takeoff/shipped-standards.ts";

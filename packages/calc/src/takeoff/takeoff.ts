@@ -70,7 +70,7 @@ export interface CountedItem {
 
 export interface TakeoffFinding {
   readonly id: string;
-  readonly code: "gauge-not-in-schedule" | "accessory-needs-review" | "piece-too-heavy";
+  readonly code: "gauge-not-in-schedule" | "accessory-needs-review" | "piece-too-heavy" | "fittings-fill-segment";
   readonly severity: "stop" | "warn" | "note";
   readonly segmentId: string;
   readonly message: string;
@@ -111,6 +111,10 @@ export interface GaugeSchedule {
     readonly shape: "round" | "rectangular" | "flat-oval";
     /** Largest absolute pressure class these rows hold for. */
     readonly pressureClass_pa: number;
+    /** Absent: for duct under pressure and under suction alike. Suction needs heavier round duct. */
+    readonly pressureSign?: "positive" | "negative";
+    /** Absent: however it is made. */
+    readonly construction?: "spiral" | "longitudinal-seam" | "fitting";
     readonly sizes: readonly GaugeRow[];
   }[];
 }

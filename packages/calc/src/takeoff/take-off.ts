@@ -1,0 +1,145 @@
+/** The metal stage: a solved system in, pieces to make and things to count out. */
+import { isElbow } from "../fittings/infer.ts";
+import type { Solution } from "../network/solution.ts";
+import { KILOGRAMS_PER_POUND, meters, type Meters } from "../quantity.ts";
+import { countAccessories, countDevices, countHangers, countSealant, levelOf } from "./count-items.ts";
+import { cutStraight } from "./cut-straight.ts";
+import { frameOf, type Frame } from "./frame.ts";
+import { heavyPiece } from "./making.table.ts";
+import { fittingPiece, flexiblePiece, straightPiece, type PieceOrigin } from "./make-piece.ts";
+import { fittingMark, straightMark } from "./marks.ts";
+import { planFittings, type FittingPlans } from "./plan-fittings.ts";
+import { totalsOf } from "./totals.ts";
+import type { CountedItem, Piece, Takeoff, TakeoffFinding, TakeoffInput } from "./takeoff.ts";
+
+/**
+ * Every piece of a system with gauge, joints, areas, weight and hours, and what is counted beside them.
+ *
+ * Segments are measured along the center line; fittings come out of the straight where their length is known (see
+ * plan-fittings.ts). Straight duct is cut in sections of the spec's length and a short piece. Every piece brings the joint
+ * at its end nearer the equipment. A size or pressure that the schedule does not hold gives a piece without gauge or
+ * weight and a finding that stops.
+ *
+ * Throws when the solution is of another system: that is ours to prevent, not a person's to mend.
+ *
+ * Range    cost is linear in pieces
+ */
+export function takeOff({ system, standards }: TakeoffInput, solution: Solution): Takeoff {
+  const frame = frameOf(system, solution, standards);
+  const plans = planFittings(frame);
+  const pieces: Piece[] = [];
+  const items: CountedItem[] = [];
+  const findings: TakeoffFinding[] = [];
+
+  for (let s = 0; s < system.segments.length; s++) {
+    const own = piecesOf(frame, plans, s, findings);
+    for (const piece of own) pieces.push(piece);
+    const sealant = countSealant(frame, s, own);
+    if (sealant) items.push(sealant);
+    for (const item of countAccessories(frame, s)) items.push(item);
+    checkSegment(frame, s, own, findings);
+  }
+
+  const madeElbows = plans.of.map((list) => list.filter(({ type }) => isElbow(type)).length);
+  items.push(...countHangers(frame, madeElbows), ...countDevices(frame));
+  return { systemId: system.id, pieces, items, totals: totalsOf(pieces, items), findings };
+}
+
+function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: TakeoffFinding[]): Piece[] {
+  const { system, standards, metal } = frame;
+  const { spec } = system;
+  const segment = system.segments[s]!;
+  const section = metal[s]!;
+  const number = s + 1;
+  const insulation = segment.flexible ? ({ kind: "none" } as const) : frame.insulation[s]!;
+  const origin: PieceOrigin = {
+    systemId: system.id,
+    systemTag: system.tag,
+    levelId: levelOf(frame, s),
+    segmentId: segment.id,
+    segmentName: segment.name,
+  };
+
+  const pieces: Piece[] = [];
+  const made = { elbow: 0, transition: 0, branch: 0, "end-cap": 0 };
+  for (const plan of plans.of[s]!) {
+    const mark = fittingMark(number, plan.kind, made[plan.kind]++);
+    pieces.push({ mark, ...fittingPiece(origin, spec, standards, insulation, plan) });
+  }
+
+  const straight = straightLength(frame, plans, s, findings);
+  if (segment.flexible) {
+    if (straight > 0)
+      pieces.push({ mark: straightMark(number, 0), ...flexiblePiece(origin, spec, standards, section, straight) });
+    return pieces;
+  }
+  const sectionLength =
+    spec.sectionLength_m[
+      section.shape === "rectangular" ? "rectangular" : section.shape === "flat-oval" ? "flatOval" : "round"
+    ];
+  const { whole, rest } = cutStraight(straight, sectionLength);
+  if (whole > 0) {
+    const template = straightPiece(origin, spec, standards, insulation, section, sectionLength);
+    for (let place = 0; place < whole; place++) pieces.push({ mark: straightMark(number, place), ...template });
+  }
+  if (rest > 0) {
+    const short = straightPiece(origin, spec, standards, insulation, section, rest);
+    pieces.push({ mark: straightMark(number, whole), ...short });
+  }
+  return pieces;
+}
+
+/** What fittings leave of a segment. Where they need more than there is, no straight is left and the estimator is told. */
+function straightLength(frame: Frame, plans: FittingPlans, s: number, findings: TakeoffFinding[]): Meters {
+  const { length_m, segmentId } = frame.solution.segments[s]!;
+  const taken = plans.near[s]! + plans.far[s]!;
+  if (taken > length_m + 1e-9) {
+    findings.push({
+      id: `${segmentId}:fittings-fill-segment`,
+      code: "fittings-fill-segment",
+      severity: "note",
+      segmentId,
+      message: `${nameOf(frame, s)}: its fittings take ${taken.toFixed(2)} m, the segment is ${length_m.toFixed(2)} m long`,
+    });
+    return meters(0);
+  }
+  return meters(length_m - taken);
+}
+
+const nameOf = ({ system }: Frame, s: number): string => {
+  const { name } = system.segments[s]!;
+  return name === "" ? `Segment ${s + 1}` : `Segment ${s + 1}, ${name}`;
+};
+
+function checkSegment(frame: Frame, s: number, pieces: readonly Piece[], findings: TakeoffFinding[]): void {
+  const { system, standards } = frame;
+  const segmentId = system.segments[s]!.id;
+  const add = (code: TakeoffFinding["code"], severity: TakeoffFinding["severity"], message: string) =>
+    findings.push({
+      id: `${segmentId}:${code}`,
+      code,
+      severity,
+      segmentId,
+      message: `${nameOf(frame, s)}: ${message}`,
+    });
+
+  const ungauged = pieces.filter(({ kind, gauge }) => kind !== "flexible" && gauge === null);
+  if (ungauged.length > 0) {
+    add(
+      "gauge-not-in-schedule",
+      "stop",
+      `${ungauged.map(({ mark }) => mark).join(", ")} beyond "${standards.gauges.name}" for this size, pressure class and metal; counted without weight or hours`,
+    );
+  }
+  const heavy = pieces.filter(({ weight_kg }) => weight_kg > heavyPiece.weight_lb * KILOGRAMS_PER_POUND);
+  if (heavy.length > 0) {
+    add(
+      "piece-too-heavy",
+      "note",
+      `${heavy.map(({ mark }) => mark).join(", ")} over ${heavyPiece.weight_lb} lb: lift with gear`,
+    );
+  }
+  if (system.segments[s]!.accessories.includes("fire-damper")) {
+    add("accessory-needs-review", "warn", "fire damper: rating, sleeve and access by the design's engineer");
+  }
+}
