@@ -8,6 +8,7 @@ import {
   type ParamsOf,
   type PersonId,
   type ProblemDetail,
+  type QueryOf,
   type ResponseOf,
 } from "@cleatwork/contracts";
 import { randomUUID } from "node:crypto";
@@ -17,12 +18,11 @@ type Endpoints = typeof endpoints;
 export interface TestCall<N extends EndpointName> {
   /** The company is filled in unless it is named. */
   readonly params?: Partial<ParamsOf<Endpoints[N]>>;
-  /** As it stands in the address: text. */
-  readonly query?: Readonly<Record<string, string>>;
+  readonly query?: Partial<QueryOf<Endpoints[N]>>;
   readonly body?: BodyOf<Endpoints[N]>;
   readonly version?: number;
-  /** Idempotency-Key; each call has its own unless one is given. */
-  readonly key?: string;
+  /** Each call has its own unless one is given. */
+  readonly idempotencyKey?: string;
   readonly file?: { readonly bytes: Uint8Array<ArrayBuffer>; readonly name: string; readonly mediaType?: string };
   /** Sends a form even without a file. */
   readonly form?: boolean;
@@ -47,7 +47,7 @@ export class TestPerson {
 
   /** The answer, parsed by its contract; a refusal fails the test. */
   async ok<N extends EndpointName>(name: N, call: TestCall<N> = {}): Promise<ResponseOf<Endpoints[N]>> {
-    const { status, bytes } = await this.call(name, call);
+    const { status, bytes } = await this.send(name, call);
     if (status >= 400) throw new Error(`${name} was refused: ${bytes.toString("utf8")}`);
     if (status === 204) return undefined as ResponseOf<Endpoints[N]>;
     return endpoints[name].response.parse(JSON.parse(bytes.toString("utf8"))) as ResponseOf<Endpoints[N]>;
@@ -55,7 +55,7 @@ export class TestPerson {
 
   /** The problem; an answer fails the test. */
   async refused<N extends EndpointName>(name: N, call: TestCall<N> = {}): Promise<ProblemDetail> {
-    const { status, headers, bytes } = await this.call(name, call);
+    const { status, headers, bytes } = await this.send(name, call);
     if (status < 400) throw new Error(`${name} was not refused: ${status}`);
     if (!headers.get("content-type")?.startsWith("application/problem+json"))
       throw new Error(`${name} answered ${status} without a problem detail`);
@@ -63,11 +63,11 @@ export class TestPerson {
   }
 
   download<N extends EndpointName>(name: N, call: TestCall<N> = {}): Promise<Answered> {
-    return this.call(name, call);
+    return this.send(name, call);
   }
 
   /** Whatever is answered, a refusal too. */
-  async call<N extends EndpointName>(name: N, call: TestCall<N> = {}): Promise<Answered> {
+  async send<N extends EndpointName>(name: N, call: TestCall<N> = {}): Promise<Answered> {
     const endpoint = endpoints[name];
     const response = await fetch(`${this.server.url}/api${this.pathOf(name, call)}`, {
       method: endpoint.method.toUpperCase(),
@@ -84,7 +84,9 @@ export class TestPerson {
       ...(call.params as Record<string, string> | undefined),
     };
     const path = endpoints[name].path.replace(/:(\w+)/g, (_, key: string) => encodeURIComponent(params[key] ?? ""));
-    const search = new URLSearchParams(call.query);
+    const search = new URLSearchParams(
+      Object.entries(call.query ?? {}).map(([key, value]): [string, string] => [key, String(value)]),
+    );
     return `${path}${search.size > 0 ? `?${search}` : ""}`;
   }
 
@@ -93,7 +95,7 @@ export class TestPerson {
     if (this.cookie) headers["cookie"] = this.cookie;
     if (call.version !== undefined) headers["if-match"] = `"${call.version}"`;
     if (endpoints[name].guards.some((guard) => guard === "idempotency-key"))
-      headers["idempotency-key"] = call.key ?? randomUUID();
+      headers["idempotency-key"] = call.idempotencyKey ?? randomUUID();
     if (call.body !== undefined && !call.file && !call.form) headers["content-type"] = "application/json";
     return headers;
   }
