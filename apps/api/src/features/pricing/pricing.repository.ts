@@ -11,6 +11,11 @@ import {
 } from "./pricing.rows.ts";
 
 export const pricingRepository = (db: TenantDb) => ({
+  async currency(): Promise<string> {
+    const row: { currency: string } = await db.organization().first("currency");
+    return row.currency;
+  },
+
   async listItems(): Promise<PriceItem[]> {
     const rows = (await db.from("price_items").orderBy("item_key")) as PriceItemRow[];
     return rows.map(priceItemFromRow);

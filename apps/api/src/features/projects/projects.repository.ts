@@ -17,10 +17,21 @@ export const projectsRepository = (db: TenantDb) => ({
       .join("organizations as o", "o.id", "p.organization_id")
       .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
       .leftJoin("layouts as l", { "l.organization_id": "p.organization_id", "l.project_id": "p.id" })
-      .select("p.id", "p.name", "p.number", "p.state", "p.due_at", "p.due_zone", "o.currency")
-      .select({ client_name: "c.name", segment_count: "l.segment_count" })
+      .joinRaw(
+        `LEFT JOIN quote_revisions AS r ON r.organization_id = p.organization_id AND r.project_id = p.id AND r.id = (
+           SELECT x.id FROM quote_revisions AS x
+           WHERE x.organization_id = p.organization_id AND x.project_id = p.id
+           ORDER BY x.issued_at DESC, x.id DESC LIMIT 1)`,
+      )
+      .select("p.id", "p.name", "p.number", "p.state", "p.due_at", "p.due_zone", "r.price_minor", "o.currency")
+      .select({
+        client_name: "c.name",
+        segment_count: "l.segment_count",
+        quote_state: "r.state",
+        quote_currency: "r.currency",
+      })
       .orderByRaw("p.due_at IS NULL, p.due_at, p.name, p.id");
-    return rows.map((row) => projectItemFromRow({ ...row, price_minor: null, quote_state: null }));
+    return rows.map(projectItemFromRow);
   },
 
   async find(id: ProjectId): Promise<Project | null> {

@@ -56,7 +56,9 @@ export interface ProjectItemRow extends Pick<
 > {
   readonly segment_count: number | null;
   readonly price_minor: number | string | null;
+  /** The company's, and of the latest revision where there is one. */
   readonly currency: string;
+  readonly quote_currency: string | null;
   readonly quote_state: string | null;
 }
 
@@ -70,6 +72,6 @@ export const projectItemFromRow = (row: ProjectItemRow): ProjectItem => ({
   dueZone: row.due_zone,
   segmentCount: row.segment_count ?? 0,
   price_minor: row.price_minor === null ? null : Number(row.price_minor),
-  currency: row.currency,
+  currency: row.quote_currency ?? row.currency,
   quoteState: row.quote_state,
 });
