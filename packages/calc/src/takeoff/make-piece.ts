@@ -3,10 +3,11 @@ import type { ConstructionSpec, Insulation, Section } from "../air-system.ts";
 import { outerPerimeter } from "../geometry/section.ts";
 import { hours, kilograms, meters, squareMeters, type Meters, type SquareMeters } from "../quantity.ts";
 import { findGauge, longestSide, scheduleShape, straightConstruction, type GaugeQuestion } from "./gauge.ts";
-import { findSheet, sheetTable, type Sheet } from "./sheet-weights.table.ts";
-import { stretchOut, stretchOutTable } from "./stretch-out.table.ts";
-import { girth } from "./surface/girth.ts";
+import { areaArithmetic, flexibleArithmetic, weightArithmetic } from "./piece-arithmetic.ts";
 import type { FittingPlan } from "./plan-fittings.ts";
+import { findSheet, type Sheet } from "./sheet-weights.table.ts";
+import { stretchOut } from "./stretch-out.table.ts";
+import { girth } from "./surface/girth.ts";
 import type { Arithmetic, Piece, ShopStandards } from "./takeoff.ts";
 
 /** What the pieces of one segment have in common. */
@@ -16,77 +17,72 @@ export interface PieceOrigin {
   readonly levelId: string;
   readonly segmentId: string;
   readonly segmentName: string;
+  readonly spec: ConstructionSpec;
+  readonly standards: ShopStandards;
+  readonly insulation: Insulation;
 }
 
-/** A piece without its mark: whole sections of one segment differ in nothing else. */
-export type Template = Omit<Piece, "mark">;
-
 interface Metal {
+  readonly mark: string;
   readonly kind: Piece["kind"];
-  readonly isFitting: boolean;
+  readonly fitting: Piece["fitting"];
   readonly section: Section;
+  readonly otherSection: Section | null;
+  readonly angle_rad: number;
+  readonly length: Meters;
   readonly gaugeSection: Section;
   readonly construction: GaugeQuestion["construction"];
   readonly netArea: SquareMeters;
   readonly netTerms: Arithmetic["terms"];
   readonly netBasis: string;
-  readonly form: Pick<Piece, "fitting" | "otherSection" | "angle_rad" | "length_m">;
 }
 
-const term = (label: string, value: number, unit: string) => ({ label, value, unit });
-
-export function straightPiece(
-  origin: PieceOrigin,
-  spec: ConstructionSpec,
-  standards: ShopStandards,
-  insulation: Insulation,
-  section: Section,
-  length: Meters,
-): Template {
+export function straightPiece(origin: PieceOrigin, mark: string, section: Section, length: Meters): Piece {
   const around = girth(section);
-  return metalPiece(origin, spec, standards, insulation, {
+  return metalPiece(origin, {
+    mark,
     kind: "straight",
-    isFitting: false,
+    fitting: null,
     section,
+    otherSection: null,
+    angle_rad: 0,
+    length,
     gaugeSection: section,
-    construction: straightConstruction(section, spec),
+    construction: straightConstruction(section, origin.spec),
     netArea: squareMeters(around * length),
-    netTerms: [term("girth", around, "m"), term("length", length, "m")],
+    netTerms: [
+      { label: "girth", value: around, unit: "m" },
+      { label: "length", value: length, unit: "m" },
+    ],
     netBasis: section.shape === "annular" ? "girth × length, both walls" : "girth × length",
-    form: { fitting: null, otherSection: null, angle_rad: 0, length_m: length },
   });
 }
 
-export function fittingPiece(
-  origin: PieceOrigin,
-  spec: ConstructionSpec,
-  standards: ShopStandards,
-  insulation: Insulation,
-  plan: FittingPlan,
-): Template {
-  return metalPiece(origin, spec, standards, insulation, {
-    ...plan,
-    isFitting: true,
+export const fittingPiece = (origin: PieceOrigin, mark: string, plan: FittingPlan): Piece =>
+  metalPiece(origin, {
+    mark,
+    kind: plan.kind,
+    fitting: plan.type,
+    section: plan.section,
+    otherSection: plan.otherSection,
+    angle_rad: plan.angle,
+    length: plan.length,
+    gaugeSection: plan.gaugeSection,
     construction: "fitting",
-    form: {
-      fitting: plan.type,
-      otherSection: plan.otherSection,
-      angle_rad: plan.angle,
-      length_m: plan.length,
-    },
+    netArea: plan.netArea,
+    netTerms: plan.netTerms,
+    netBasis: plan.netBasis,
   });
-}
 
-function metalPiece(
-  origin: PieceOrigin,
-  spec: ConstructionSpec,
-  standards: ShopStandards,
-  insulation: Insulation,
-  metal: Metal,
-): Template {
-  const { section, netArea, isFitting } = metal;
-  const part = isFitting ? "fitting" : "straight";
-  const { gauges, productivity, blankAllowance, allowanceSource } = standards;
+/**
+ * Fields are written out here and in `marked`, never spread: an object spread together with this many fields is an order
+ * of magnitude slower, and thousands are made at each edit.
+ */
+function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
+  const { spec, standards, insulation } = origin;
+  const { section, netArea } = metal;
+  const part = metal.kind === "straight" ? "straight" : "fitting";
+  const { gauges, productivity, blankAllowance } = standards;
 
   const gauge = findGauge(gauges, {
     material: spec.material,
@@ -98,94 +94,63 @@ function metalPiece(
   // A label that no sheet of the metal answers to is as good as none: no weight is made up for it.
   const sheet = gauge === null ? null : findSheet(spec.material, gauge);
 
-  const allowance = blankAllowance[part];
-  const blankArea = squareMeters(netArea * (1 + allowance));
+  const blankArea = squareMeters(netArea * (1 + blankAllowance[part]));
   const weight = kilograms(netArea * (sheet?.weight_kg_m2 ?? 0));
-  const shopRate = productivity.shop_h_per_kg[part];
-  const fieldRate = productivity.field_h_per_kg[part];
-  const shopHours = hours(weight * shopRate);
-  const fieldHours = hours(weight * fieldRate * productivity.conditionFactor);
+  const shopHours = hours(weight * productivity.shop_h_per_kg[part]);
+  const fieldHours = hours(weight * productivity.field_h_per_kg[part] * productivity.conditionFactor);
   const outer = outerPerimeter(section);
-  const outerArea = section.shape === "annular" ? (netArea * outer) / girth(section) : netArea;
+  const outerArea = squareMeters(section.shape === "annular" ? (netArea * outer) / girth(section) : netArea);
+  const wrapShare = insulation.kind === "wrap" ? 1 + stretchOut(section, insulation.thickness_m) / outer : 0;
+  const insulationArea = squareMeters(outerArea * wrapShare);
+  const linerArea = squareMeters(insulation.kind === "liner" ? outerArea : 0);
 
-  const arithmetic: Arithmetic[] = [
-    { quantity: "net-area", terms: metal.netTerms, result: netArea, unit: "m²", basis: metal.netBasis },
-    {
-      quantity: "blank-area",
-      terms: [term("net area", netArea, "m²"), term("with seams, joints, laps", 1 + allowance, "×")],
-      result: blankArea,
-      unit: "m²",
-      basis: allowanceSource,
-    },
-  ];
-  if (sheet) {
-    arithmetic.push(
-      {
-        quantity: "weight",
-        terms: [term("net area", netArea, "m²"), term(`${gauge} ${spec.material}`, sheet.weight_kg_m2, "kg/m²")],
-        result: weight,
-        unit: "kg",
-        basis: `${sheetTable.source}; ${sheetTable.basis}`,
-      },
-      {
-        quantity: "shop-hours",
-        terms: [term("weight", weight, "kg"), term("hours", shopRate, "h/kg")],
-        result: shopHours,
-        unit: "h",
-        basis: `${productivity.name}: ${productivity.source}`,
-      },
-      {
-        quantity: "field-hours",
-        terms: [
-          term("weight", weight, "kg"),
-          term("hours", fieldRate, "h/kg"),
-          term("conditions", productivity.conditionFactor, "×"),
-        ],
-        result: fieldHours,
-        unit: "h",
-        basis: `${productivity.name}: ${productivity.source}`,
-      },
-    );
-  }
-
-  let insulationArea = squareMeters(0);
-  if (insulation.kind === "wrap") {
-    const added = stretchOut(section, insulation.thickness_m);
-    insulationArea = squareMeters(outerArea * (1 + added / outer));
-    arithmetic.push({
-      quantity: "insulation-area",
-      terms: [
-        term("outside surface", outerArea, "m²"),
-        term("wrap cut wider than the girth, overlap included", 1 + added / outer, "×"),
-      ],
-      result: insulationArea,
-      unit: "m²",
-      basis: stretchOutTable.source,
-    });
-  }
-  let linerArea = squareMeters(0);
-  if (insulation.kind === "liner") {
-    linerArea = squareMeters(outerArea);
-    arithmetic.push({
-      quantity: "liner-area",
-      terms: [term("outer wall of the metal", outerArea, "m²")],
-      result: linerArea,
-      unit: "m²",
-      basis: "liner measured on the metal's girth; common practice",
-    });
+  const arithmetic = areaArithmetic({
+    netArea,
+    netTerms: metal.netTerms,
+    netBasis: metal.netBasis,
+    blankArea,
+    blankAllowance: blankAllowance[part],
+    outerArea,
+    wrapShare,
+    insulationArea,
+    linerArea,
+    standards,
+  });
+  if (gauge !== null && sheet) {
+    for (const line of weightArithmetic({
+      part,
+      netArea,
+      gauge,
+      spec,
+      sheet,
+      weight,
+      shopHours,
+      fieldHours,
+      standards,
+    })) {
+      arithmetic.push(line);
+    }
   }
 
   return {
-    ...origin,
+    mark: metal.mark,
+    systemId: origin.systemId,
+    systemTag: origin.systemTag,
+    levelId: origin.levelId,
+    segmentId: origin.segmentId,
+    segmentName: origin.segmentName,
     kind: metal.kind,
-    ...metal.form,
+    fitting: metal.fitting,
     section,
+    otherSection: metal.otherSection,
+    angle_rad: metal.angle_rad,
+    length_m: metal.length,
     material: spec.material,
     gauge: sheet ? gauge : null,
     sheetThickness_m: sheet?.thickness_m ?? null,
     gaugeSource: gaugeSource(gauges.name, gauge, sheet),
     joint: jointOf(section, spec),
-    seam: seamOf(section, spec, isFitting),
+    seam: seamOf(section, spec, part),
     jointCount: section.shape === "annular" ? 2 : 1,
     netArea_m2: netArea,
     blankArea_m2: blankArea,
@@ -197,6 +162,37 @@ function metalPiece(
     arithmetic,
   };
 }
+
+/** The same piece under its own mark: whole sections of one segment differ in nothing else. */
+export const marked = (piece: Piece, mark: string): Piece => ({
+  mark,
+  systemId: piece.systemId,
+  systemTag: piece.systemTag,
+  levelId: piece.levelId,
+  segmentId: piece.segmentId,
+  segmentName: piece.segmentName,
+  kind: piece.kind,
+  fitting: piece.fitting,
+  section: piece.section,
+  otherSection: piece.otherSection,
+  angle_rad: piece.angle_rad,
+  length_m: piece.length_m,
+  material: piece.material,
+  gauge: piece.gauge,
+  sheetThickness_m: piece.sheetThickness_m,
+  gaugeSource: piece.gaugeSource,
+  joint: piece.joint,
+  seam: piece.seam,
+  jointCount: piece.jointCount,
+  netArea_m2: piece.netArea_m2,
+  blankArea_m2: piece.blankArea_m2,
+  weight_kg: piece.weight_kg,
+  insulationArea_m2: piece.insulationArea_m2,
+  linerArea_m2: piece.linerArea_m2,
+  shopHours_h: piece.shopHours_h,
+  fieldHours_h: piece.fieldHours_h,
+  arithmetic: piece.arithmetic,
+});
 
 function gaugeSource(schedule: string, gauge: string | null, sheet: Sheet | null): string {
   if (gauge === null) return `${schedule}: no row for this size, pressure class and metal`;
@@ -214,23 +210,24 @@ const RECTANGULAR_SEAMS = { "corner-lock": "corner lock", "button-lock": "button
 const jointOf = (section: Section, spec: ConstructionSpec): string =>
   section.shape === "rectangular" ? RECTANGULAR_JOINTS[spec.rectangularJoint] : ROUND_JOINTS[spec.roundJoint];
 
-function seamOf(section: Section, spec: ConstructionSpec, isFitting: boolean): string {
+function seamOf(section: Section, spec: ConstructionSpec, part: "straight" | "fitting"): string {
   if (section.shape === "rectangular") return RECTANGULAR_SEAMS[spec.rectangularSeam];
-  return spec.roundConstruction === "spiral" && !isFitting ? "spiral" : "longitudinal";
+  return spec.roundConstruction === "spiral" && part === "straight" ? "spiral" : "longitudinal";
 }
 
 /** Bought by the length; it comes insulated and is not cut from sheet. */
-export function flexiblePiece(
-  origin: PieceOrigin,
-  { flexibleSlack }: ConstructionSpec,
-  { productivity }: ShopStandards,
-  section: Section,
-  straight: Meters,
-): Template {
+export function flexiblePiece(origin: PieceOrigin, mark: string, section: Section, straight: Meters): Piece {
+  const { flexibleSlack } = origin.spec;
+  const { productivity } = origin.standards;
   const length = meters(straight * (1 + flexibleSlack));
   const fieldHours = hours(length * productivity.flexible_h_per_m * productivity.conditionFactor);
   return {
-    ...origin,
+    mark,
+    systemId: origin.systemId,
+    systemTag: origin.systemTag,
+    levelId: origin.levelId,
+    segmentId: origin.segmentId,
+    segmentName: origin.segmentName,
     kind: "flexible",
     fitting: null,
     section,
@@ -251,19 +248,6 @@ export function flexiblePiece(
     linerArea_m2: squareMeters(0),
     shopHours_h: hours(0),
     fieldHours_h: fieldHours,
-    arithmetic: [
-      {
-        quantity: "field-hours",
-        terms: [
-          term("center line", straight, "m"),
-          term("slack", 1 + flexibleSlack, "×"),
-          term("hours", productivity.flexible_h_per_m, "h/m"),
-          term("conditions", productivity.conditionFactor, "×"),
-        ],
-        result: fieldHours,
-        unit: "h",
-        basis: `${productivity.name}: ${productivity.source}`,
-      },
-    ],
+    arithmetic: [flexibleArithmetic({ straight, flexibleSlack, fieldHours, productivity })],
   };
 }

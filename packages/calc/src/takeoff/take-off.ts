@@ -6,7 +6,7 @@ import { countAccessories, countDevices, countHangers, countSealant, levelOf } f
 import { cutStraight } from "./cut-straight.ts";
 import { frameOf, type Frame } from "./frame.ts";
 import { heavyPiece } from "./making.table.ts";
-import { fittingPiece, flexiblePiece, straightPiece, type PieceOrigin } from "./make-piece.ts";
+import { fittingPiece, flexiblePiece, marked, straightPiece, type PieceOrigin } from "./make-piece.ts";
 import { fittingMark, straightMark } from "./marks.ts";
 import { planFittings, type FittingPlans } from "./plan-fittings.ts";
 import { totalsOf } from "./totals.ts";
@@ -51,41 +51,37 @@ function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: Takeof
   const segment = system.segments[s]!;
   const section = metal[s]!;
   const number = s + 1;
-  const insulation = segment.flexible ? ({ kind: "none" } as const) : frame.insulation[s]!;
   const origin: PieceOrigin = {
     systemId: system.id,
     systemTag: system.tag,
     levelId: levelOf(frame, s),
     segmentId: segment.id,
     segmentName: segment.name,
+    spec,
+    standards,
+    insulation: segment.flexible ? { kind: "none" } : frame.insulation[s]!,
   };
 
   const pieces: Piece[] = [];
   const made = { elbow: 0, transition: 0, branch: 0, "end-cap": 0 };
   for (const plan of plans.of[s]!) {
-    const mark = fittingMark(number, plan.kind, made[plan.kind]++);
-    pieces.push({ mark, ...fittingPiece(origin, spec, standards, insulation, plan) });
+    pieces.push(fittingPiece(origin, fittingMark(number, plan.kind, made[plan.kind]++), plan));
   }
 
   const straight = straightLength(frame, plans, s, findings);
   if (segment.flexible) {
-    if (straight > 0)
-      pieces.push({ mark: straightMark(number, 0), ...flexiblePiece(origin, spec, standards, section, straight) });
+    if (straight > 0) pieces.push(flexiblePiece(origin, straightMark(number, 0), section, straight));
     return pieces;
   }
-  const sectionLength =
-    spec.sectionLength_m[
-      section.shape === "rectangular" ? "rectangular" : section.shape === "flat-oval" ? "flatOval" : "round"
-    ];
+  const shape = section.shape === "annular" ? "round" : section.shape === "flat-oval" ? "flatOval" : section.shape;
+  const sectionLength = spec.sectionLength_m[shape];
   const { whole, rest } = cutStraight(straight, sectionLength);
   if (whole > 0) {
-    const template = straightPiece(origin, spec, standards, insulation, section, sectionLength);
-    for (let place = 0; place < whole; place++) pieces.push({ mark: straightMark(number, place), ...template });
+    const first = straightPiece(origin, straightMark(number, 0), section, sectionLength);
+    pieces.push(first);
+    for (let place = 1; place < whole; place++) pieces.push(marked(first, straightMark(number, place)));
   }
-  if (rest > 0) {
-    const short = straightPiece(origin, spec, standards, insulation, section, rest);
-    pieces.push({ mark: straightMark(number, whole), ...short });
-  }
+  if (rest > 0) pieces.push(straightPiece(origin, straightMark(number, whole), section, rest));
   return pieces;
 }
 
