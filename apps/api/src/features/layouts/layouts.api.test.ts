@@ -161,19 +161,17 @@ describe("a layout that is not sound is refused with the record named, and nothi
   test("a run that leads back to itself", async () => {
     const { estimator, params, save, drawn, sequence } = await aDrawnLayout();
     const before = await estimator.ok("getLayout", { params });
+    // Main hangs on the far end of the east runout, which hangs on the main.
+    const turned = { ...drawn.outlets[0], role: "junction" as const, airflow_m3s: null, requiredPressure_pa: null };
     const problem = await estimator.refused(
       "saveLayout",
-      save(sequence, changing(drawn.main, { fromNodeId: drawn.outlets[0].id })),
+      save(sequence, changing(drawn.outlets[0], turned), changing(drawn.main, { fromNodeId: turned.id })),
     );
-    expect(problem).toMatchObject({ status: 422, type: "/problems/layout-refused" });
-    expect(problem.errors).toEqual(
-      expect.arrayContaining([
-        expect.objectContaining({
-          code: "segment-loops",
-          message: expect.stringContaining(drawn.main.name) as string,
-        }),
-      ]),
-    );
+    expect(problem).toMatchObject({
+      status: 422,
+      type: "/problems/layout-refused",
+      errors: [{ code: "segment-loops", message: expect.stringMatching(/(Main|East runout) \(seg_/) as string }],
+    });
     expect(await estimator.ok("getLayout", { params })).toEqual(before);
   });
 

@@ -1,10 +1,32 @@
 import { meters } from "@cleatwork/calc";
 import { randomUUID } from "node:crypto";
+import { request } from "node:http";
+import { text } from "node:stream/consumers";
+import { pipeline } from "node:stream/promises";
 import { describe, expect, test } from "vitest";
 import { foundCompany } from "../../testing/found-company.ts";
 import { aProject, drawingFields, onePixel } from "./project.testing.ts";
 
 const bytesOf = (text: string) => new Uint8Array(Buffer.from(text));
+
+/** Streams a form with one file of so many bytes, without holding it in memory. */
+function uploadOf(bytes: number, to: { url: string; cookie: string; origin: string }) {
+  const head = '--x\r\ncontent-disposition: form-data; name="file"; filename="huge.png"\r\n\r\n';
+  const headers = { cookie: to.cookie, origin: to.origin, "content-type": "multipart/form-data; boundary=x" };
+  return new Promise<{ status: number | undefined; body: string }>((resolve, reject) => {
+    const sending = request(to.url, { method: "POST", agent: false, headers }, (response) => {
+      text(response).then((body) => resolve({ status: response.statusCode, body }), reject);
+    });
+    sending.on("error", reject);
+    const chunk = Buffer.alloc(2 ** 20);
+    const form = function* () {
+      yield head;
+      for (let left = bytes; left > 0; left -= chunk.length) yield chunk.subarray(0, left);
+      yield "\r\n--x--\r\n";
+    };
+    pipeline(form(), sending).catch(reject);
+  });
+}
 
 describe("drawings", () => {
   test("come back byte for byte, and cannot run anything", async () => {
@@ -54,15 +76,15 @@ describe("drawings", () => {
   });
 
   test("over 50 MB are refused", async () => {
-    const { estimator } = await foundCompany();
+    const { estimator, server, slug } = await foundCompany();
     const { params } = await aProject(estimator);
-    const bytes = new Uint8Array(50 * 2 ** 20 + 1);
-    bytes.set(onePixel);
-    const file = { bytes, name: "huge.png" };
-    expect(await estimator.refused("uploadDrawing", { params, body: drawingFields, file })).toMatchObject({
-      status: 413,
-      type: "/problems/file-too-large",
+    const { status, body } = await uploadOf(50 * 2 ** 20 + 1, {
+      url: `${server.url}/api/companies/${slug}/projects/${params.projectId}/drawings`,
+      cookie: estimator.cookie,
+      origin: server.deps.config.publicUrl,
     });
+    expect(status).toBe(413);
+    expect(JSON.parse(body)).toMatchObject({ type: "/problems/file-too-large" });
   });
 
   test("without a sheet number or a file are refused with the field named", async () => {

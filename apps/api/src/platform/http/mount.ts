@@ -29,7 +29,6 @@ export function mount(
     const chain: RequestHandler[] = [];
     const limiter = limiterFor(name, deps.config);
     if (limiter) chain.push(limiter);
-    if (row.takes === "file") chain.push(upload);
     chain.push((request, response) =>
       withQueryCount(() => answer(name, row, handler, deps, sessions, request, response)),
     );
@@ -40,8 +39,18 @@ export function mount(
 
 const upload: RequestHandler = multer({
   storage: multer.memoryStorage(),
+  // Browsers send file names as UTF-8; without this they arrive as Latin-1.
+  defParamCharset: "utf8",
   limits: { fileSize: MAX_UPLOAD_BYTES, files: 1, fields: 20, fieldSize: 64 * 1024 },
 }).single("file");
+
+const received = (request: Request, response: Response): Promise<void> =>
+  new Promise((resolve, reject) => {
+    void upload(request, response, (error: unknown) => {
+      if (error instanceof Error) reject(error);
+      else resolve();
+    });
+  });
 
 async function answer(
   name: string,
@@ -55,6 +64,8 @@ async function answer(
   const caller = await callerOf(row, sessions, request, response);
   const params = parseParams(request.params);
   const member = memberOf(row, caller, params["company"], deps);
+  // Only who may send a file is listened to: a stranger's megabytes are never held.
+  if (row.takes === "file") await received(request, response);
   const query = row.query.type === "undefined" ? undefined : parse(row.query, request.query, "/query");
   const body = row.body.type === "undefined" ? undefined : parse(row.body, bodyOf(row, request), "");
   const version = row.guards.includes("if-match") ? versionOf(request) : 0;
