@@ -13,3 +13,4 @@ export * from "./commands/split-segment.ts";
 export * from "./commands/remove.ts";
 export * from "./commands/copy-branch.ts";
 export * from "./commands/paste-rows.ts";
+export * from "./project-numbers.ts";

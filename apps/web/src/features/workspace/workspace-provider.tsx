@@ -1,0 +1,163 @@
+import type { CompanySlug, LayoutRecord, ProjectId, RecordId } from "@cleatwork/contracts";
+import { endpoints } from "@cleatwork/contracts";
+import { indexOf, listOf, treeOf, type PricingDocuments, type TreeRow } from "@cleatwork/layout";
+import { useSuspenseQueries } from "@tanstack/react-query";
+import { useEffect, useMemo, useState, useSyncExternalStore, type ReactNode } from "react";
+import { api } from "../../lib/http.ts";
+import { notify } from "../../ui/toast.tsx";
+import { projectQueries } from "../projects/index.ts";
+import { useSession } from "../session/index.ts";
+import { LayoutStore } from "./core/layout-store.ts";
+import { browserShelf } from "./core/saved-edits.ts";
+import { sendBatch } from "./send-batch.ts";
+import { dayIn } from "./today.ts";
+import { useNumbers } from "./use-numbers.ts";
+import { useSelection } from "./use-selection.ts";
+import { WorkspaceContext, type Workspace } from "./workspace-context.ts";
+import { workspaceQueries } from "./workspace.queries.ts";
+
+/** Opens a project: its documents in parallel, its layout in a store, its numbers in a worker. */
+export function WorkspaceProvider({
+  company,
+  projectId,
+  children,
+}: {
+  company: CompanySlug;
+  projectId: ProjectId;
+  children: ReactNode;
+}) {
+  const session = useSession();
+  const [project, layoutRead, specs, book, settings, pricing] = useSuspenseQueries({
+    queries: [
+      projectQueries.detail(company, projectId),
+      workspaceQueries.layout(company, projectId),
+      workspaceQueries.specs(company),
+      workspaceQueries.priceBook(company),
+      workspaceQueries.settings(company),
+      workspaceQueries.pricing(company, projectId),
+    ],
+  });
+
+  const [store] = useState(
+    () =>
+      new LayoutStore(
+        {
+          project: `${company}/${projectId}`,
+          shelf: browserShelf,
+          load: () => api(endpoints.getLayout, { params: { company, projectId } }),
+          send: (request) => sendBatch({ company, projectId }, request),
+          newBatchId: () => crypto.randomUUID(),
+          now: () => new Date(),
+          later: (work, after_ms) => {
+            const timer = setTimeout(work, after_ms);
+            return () => clearTimeout(timer);
+          },
+        },
+        layoutRead.data,
+      ),
+  );
+  const state = useSyncExternalStore(store.subscribe, store.getState);
+  useLifeOf(store);
+
+  const { layout } = state;
+  const index = useMemo(() => indexOf(layout), [layout]);
+  const units = project.data.unitSystem;
+  const documents = useMemo<PricingDocuments>(
+    () => ({
+      records: [...layout.records.values()],
+      specs: specs.data.items,
+      altitude_m: project.data.altitude_m,
+      currency: book.data.currency,
+      items: book.data.items,
+      settings: settings.data,
+      pricing: pricing.data,
+      pricedOn: dayIn(session.company.timeZone, new Date()),
+    }),
+    [layout, specs.data, project.data.altitude_m, book.data, settings.data, pricing.data, session.company.timeZone],
+  );
+  const numbers = useNumbers(documents);
+  const selection = useSelection();
+
+  const systems = useMemo(() => listOf(layout, "system").sort((a, b) => (a.tag < b.tag ? -1 : 1)), [layout]);
+  const trees = useMemo(() => new Map(systems.map(({ id }) => [id as string, treeOf(index, id)])), [systems, index]);
+  const rowNumbers = useMemo(
+    () =>
+      new Map(
+        [...trees.values()].flatMap((rows) =>
+          rows.map(({ segment, number }) => [segment.id as string, String(number)]),
+        ),
+      ),
+    [trees],
+  );
+  const solved = useMemo(
+    () =>
+      new Map(
+        (numbers?.solutions ?? []).flatMap(({ segments }) => segments.map((segment) => [segment.segmentId, segment])),
+      ),
+    [numbers],
+  );
+
+  const workspace = useMemo<Workspace>(() => {
+    const say = (answer: ReturnType<LayoutStore["apply"]>) => {
+      if (!answer.ok) notify(answer.message, { severity: "warn" });
+      return answer;
+    };
+    return {
+      project: project.data,
+      company: session.company,
+      units,
+      store,
+      state,
+      layout,
+      index,
+      systems,
+      rowsOf: (systemId) => trees.get(systemId) ?? NO_ROWS,
+      numberOf: (segmentId) => rowNumbers.get(segmentId) ?? "",
+      numbers,
+      solutionOf: (systemId) => numbers?.solutions.find((solution) => solution.systemId === systemId) ?? null,
+      solvedOf: (segmentId) => solved.get(segmentId) ?? null,
+      selection,
+      mayEdit: session.may("layouts.write"),
+      run: (command) => say(store.run(command)),
+      undo: () => void say(store.undo()),
+      redo: () => void say(store.redo()),
+      record: (id): LayoutRecord | null => layout.records.get(id as RecordId) ?? null,
+    };
+  }, [
+    project.data,
+    session,
+    units,
+    store,
+    state,
+    layout,
+    index,
+    systems,
+    trees,
+    rowNumbers,
+    numbers,
+    solved,
+    selection,
+  ]);
+
+  return <WorkspaceContext value={workspace}>{children}</WorkspaceContext>;
+}
+
+const NO_ROWS: readonly TreeRow[] = [];
+
+/** Takes up unsent edits, sends before the page goes, and tries again when the network is back. */
+function useLifeOf(store: LayoutStore) {
+  useEffect(() => {
+    void store.resume();
+    const flush = () => void store.flush();
+    const hidden = () => {
+      if (document.visibilityState === "hidden") flush();
+    };
+    window.addEventListener("online", flush);
+    document.addEventListener("visibilitychange", hidden);
+    return () => {
+      window.removeEventListener("online", flush);
+      document.removeEventListener("visibilitychange", hidden);
+      flush();
+    };
+  }, [store]);
+}

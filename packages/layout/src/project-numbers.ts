@@ -1,0 +1,79 @@
+/** From a project's documents to its numbers: air, takeoff, estimate. The browser's worker and the server run this. */
+import {
+  price,
+  shippedStandards,
+  solve,
+  takeOff,
+  type AirSystem,
+  type Estimate,
+  type Meters,
+  type PriceItem,
+  type ShopStandards,
+  type Solution,
+  type SystemProblem,
+  type Takeoff,
+} from "@cleatwork/calc";
+import type { LayoutRecord, PricingSettings, ProjectPricing, Spec } from "@cleatwork/contracts";
+import { airSystemsFrom } from "./air-systems.ts";
+import { createLayout } from "./layout.ts";
+
+export interface PricingDocuments {
+  readonly records: readonly LayoutRecord[];
+  readonly specs: readonly Pick<Spec, "id" | "construction">[];
+  readonly altitude_m: Meters;
+  readonly currency: string;
+  readonly items: readonly PriceItem[];
+  readonly settings: PricingSettings;
+  readonly pricing: ProjectPricing;
+  /** The day the prices are read for, YYYY-MM-DD. */
+  readonly pricedOn: string;
+}
+
+export interface Numbers {
+  readonly systems: readonly AirSystem[];
+  readonly solutions: readonly Solution[];
+  readonly takeoffs: readonly Takeoff[];
+  /** Null when a system has problems: a price without one system would be a wrong price. */
+  readonly estimate: Estimate | null;
+  readonly problems: readonly SystemProblem[];
+}
+
+export function computeNumbers(documents: PricingDocuments): Numbers {
+  const { settings, pricing } = documents;
+  const layout = createLayout(documents.records);
+  const systems = airSystemsFrom(layout, { specs: documents.specs, altitude_m: documents.altitude_m });
+  const standards = withCondition(shippedStandards, pricing.conditionFactor ?? settings.conditionFactor);
+
+  const solutions: Solution[] = [];
+  const takeoffs: Takeoff[] = [];
+  const problems: SystemProblem[] = [];
+  for (const system of systems) {
+    const solved = solve(system);
+    if (!solved.ok) {
+      problems.push(...solved.problems);
+      continue;
+    }
+    solutions.push(solved.value);
+    takeoffs.push(takeOff({ system, standards }, solved.value));
+  }
+
+  const estimate =
+    problems.length > 0
+      ? null
+      : price(takeoffs, {
+          currency: documents.currency,
+          items: documents.items,
+          labor: settings.labor,
+          rates: pricing.rates ?? settings.rates,
+          adds: pricing.adds,
+          pricedOn: documents.pricedOn,
+          staleAfterDays: settings.staleAfterDays,
+          marginFloor_bp: settings.marginFloor_bp,
+        });
+  return { systems, solutions, takeoffs, estimate, problems };
+}
+
+const withCondition = (standards: ShopStandards, conditionFactor: number): ShopStandards => ({
+  ...standards,
+  productivity: { ...standards.productivity, conditionFactor },
+});
