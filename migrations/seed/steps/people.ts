@@ -1,4 +1,4 @@
-import type { CompanySlug } from "@cleatwork/contracts";
+import type { CompanySlug, Me } from "@cleatwork/contracts";
 import { ApiClient, Refused } from "../api-client.ts";
 import { company, invited, owner, TIME_ZONE, type DemoPerson } from "../company.ts";
 import { tokenFromMail } from "../inbox.ts";
@@ -18,7 +18,14 @@ export interface People {
 
 export async function signInEveryone(doors: Doors): Promise<People> {
   const ownerClient = new ApiClient(doors.apiUrl);
-  const slug = (await signIn(ownerClient, owner)) ?? (await found(ownerClient, doors));
+  const me = (await signIn(ownerClient, owner)) ?? (await signUp(ownerClient));
+  const slug = me.memberships[0]?.company.slug;
+  if (!slug) throw new Error(`${owner.email} belongs to no company`);
+  if (!me.person.emailVerified) {
+    const token = await tokenFromMail(doors.mailApiUrl, owner.email, /\/verify-email\?token=/);
+    await ownerClient.call("verifyEmail", { params: {}, body: { token } });
+  }
+  await describeCompany(ownerClient, slug);
 
   let estimator: ApiClient | null = null;
   for (const person of invited) {
@@ -30,19 +37,18 @@ export async function signInEveryone(doors: Doors): Promise<People> {
   return { apiUrl: doors.apiUrl, company: slug, owner: ownerClient, estimator };
 }
 
-/** The company's slug; null when there is no such account yet. */
-async function signIn(client: ApiClient, person: DemoPerson): Promise<CompanySlug | null> {
+/** Null when there is no such account yet. */
+async function signIn(client: ApiClient, person: DemoPerson): Promise<Me | null> {
   try {
-    const me = await client.call("signIn", { params: {}, body: { email: person.email, password: person.password } });
-    return me.memberships[0]?.company.slug ?? null;
+    return await client.call("signIn", { params: {}, body: { email: person.email, password: person.password } });
   } catch (error) {
     if (error instanceof Refused && error.code === "credentials-wrong") return null;
     throw error;
   }
 }
 
-async function found(client: ApiClient, doors: Doors): Promise<CompanySlug> {
-  const me = await client.call("signUp", {
+const signUp = (client: ApiClient): Promise<Me> =>
+  client.call("signUp", {
     params: {},
     body: {
       companyName: company.name,
@@ -52,13 +58,10 @@ async function found(client: ApiClient, doors: Doors): Promise<CompanySlug> {
       timeZone: TIME_ZONE,
     },
   });
-  const token = await tokenFromMail(doors.mailApiUrl, owner.email, /verify-email[^\s"'<>]*?[/=#]/);
-  await client.call("verifyEmail", { params: {}, body: { token } });
-  const slug = me.memberships[0]?.company.slug;
-  if (!slug) throw new Error("signing up made no company");
-  const { version } = await client.call("getCompany", { params: { company: slug } });
-  await client.call("updateCompany", { params: { company: slug }, body: company, version });
-  return slug;
+
+async function describeCompany(client: ApiClient, slug: CompanySlug): Promise<void> {
+  const { version, licenseNumber } = await client.call("getCompany", { params: { company: slug } });
+  if (licenseNumber === "") await client.call("updateCompany", { params: { company: slug }, body: company, version });
 }
 
 async function invite(
@@ -73,7 +76,7 @@ async function invite(
       params: { company: slug },
       body: { email: person.email, role: person.role },
     });
-  const token = await tokenFromMail(doors.mailApiUrl, person.email, /invitations?[/=#]/);
+  const token = await tokenFromMail(doors.mailApiUrl, person.email, /\/invitations\//);
   await client.call("acceptInvitation", {
     params: { token },
     body: { name: person.name, password: person.password },

@@ -1,6 +1,5 @@
-import { price, shippedStandards, solve, takeOff, type Takeoff } from "@cleatwork/calc";
 import type { ProjectId } from "@cleatwork/contracts";
-import { airSystemsFrom, createLayout } from "@cleatwork/layout";
+import { computeNumbers } from "@cleatwork/layout";
 import type { People } from "./people.ts";
 
 /** What the estimator has on screen when pressing the button: the same calculation on the same documents. */
@@ -9,7 +8,7 @@ export async function priceAsTheBrowserWould(
   projectId: ProjectId,
 ): Promise<{ sequence: number; price_minor: number }> {
   const params = { company, projectId };
-  const [project, layout, specs, book, settings, pricing] = await Promise.all([
+  const [project, layout, { items: specs }, book, settings, pricing] = await Promise.all([
     estimator.call("getProject", { params }),
     estimator.call("getLayout", { params }),
     estimator.call("listSpecs", { params: { company } }),
@@ -17,20 +16,18 @@ export async function priceAsTheBrowserWould(
     estimator.call("getPricingSettings", { params: { company } }),
     estimator.call("getProjectPricing", { params }),
   ]);
-  void [
-    project,
-    layout,
+  const { estimate, problems } = computeNumbers({
+    records: layout.records,
     specs,
-    book,
+    altitude_m: project.altitude_m,
+    currency: book.currency,
+    items: book.items,
     settings,
     pricing,
-    price,
-    shippedStandards,
-    solve,
-    takeOff,
-    airSystemsFrom,
-    createLayout,
-  ];
-  const takeoffs: Takeoff[] = [];
-  return { sequence: layout.sequence, price_minor: takeoffs.length };
+    pricedOn: new Date().toISOString().slice(0, 10),
+  });
+  if (!estimate) throw new Error(`${project.name} cannot be priced: ${JSON.stringify(problems)}`);
+  const missing = estimate.warnings.filter((warning) => warning.severity === "stop");
+  if (missing.length > 0) throw new Error(`${project.name}: ${missing.map((warning) => warning.message).join("; ")}`);
+  return { sequence: layout.sequence, price_minor: estimate.price_minor };
 }

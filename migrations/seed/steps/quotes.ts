@@ -67,7 +67,7 @@ async function issue(people: People, projectId: ProjectId, quote: Quote, project
 
 async function accept(people: People, seed: ProjectSeed, quote: Quote): Promise<void> {
   const contact = contactOf(seed.project);
-  const token = await tokenFromMail(seed.mailApiUrl, contact.email, /\/q(?:uotes?)?[/=#]/);
+  const token = await tokenFromMail(seed.mailApiUrl, contact.email, /\/q\//);
   const client = new ApiClient(people.apiUrl);
   const letter = await client.call("getClientQuote", { params: { token } });
   if (letter.quoteNumber !== quote.number)
