@@ -1,5 +1,6 @@
 import { inches } from "@cleatwork/calc";
 import type { ChangeSet, SpecId } from "@cleatwork/contracts";
+import { createConnection, type Connection, type RowDataPacket } from "mysql2/promise";
 import { randomUUID } from "node:crypto";
 import { describe, expect, test } from "vitest";
 import { foundCompany } from "../../testing/found-company.ts";
@@ -27,6 +28,18 @@ async function aDrawnLayout() {
   const layout = await aLayout();
   const { sequence } = await layout.estimator.ok("saveLayout", layout.save(1, adding(...layout.drawn.records)));
   return { ...layout, sequence };
+}
+
+/** The connection whose insert into the log is waiting, once there is one. */
+async function connectionThatAppends(watcher: Connection): Promise<number> {
+  for (;;) {
+    const [rows] = await watcher.query<RowDataPacket[]>(
+      "SELECT id FROM information_schema.processlist WHERE db = DATABASE() AND info LIKE 'insert into `layout_changes`%'",
+    );
+    const [waiting] = rows;
+    if (waiting) return Number(waiting["id"]);
+    await new Promise((resolve) => setTimeout(resolve, 20));
+  }
 }
 
 describe("a new project's layout", () => {
@@ -97,6 +110,29 @@ describe("saving edits", () => {
     const systems = Array.from({ length: 250 }, (_, index) => aSmallSystem(level.id, spec.id, `S${index}`));
     await estimator.ok("saveLayout", save(1, adding(...systems.flatMap((system) => system.records))));
     expect((await estimator.ok("getLayout", { params })).records).toHaveLength(250 * 8 + 1);
+  });
+});
+
+describe("a save that is cut off after its first writes", () => {
+  test("leaves nothing behind, and the same batch then counts once", async () => {
+    const { company, estimator, params, save, drawn } = await aLayout();
+    const batch = save(1, adding(...drawn.records));
+    const before = await estimator.ok("getLayout", { params });
+    const other = await createConnection(company.server.deps.config.databaseUrl);
+    try {
+      // Someone else holds the log's end: the save writes its records, then waits to append, and is killed there.
+      await other.query("START TRANSACTION");
+      await other.query("SELECT sequence FROM layout_changes WHERE project_id = ? FOR UPDATE", [params.projectId]);
+      const cutOff = estimator.send("saveLayout", batch);
+      await other.query(`KILL CONNECTION ${await connectionThatAppends(other)}`);
+      expect((await cutOff).status).toBe(500);
+      await other.query("ROLLBACK");
+    } finally {
+      await other.end();
+    }
+    expect(await estimator.ok("getLayout", { params })).toEqual(before);
+    expect(await estimator.ok("saveLayout", batch)).toEqual({ sequence: 2, previousSequence: 1 });
+    expect((await estimator.ok("getLayout", { params })).records).toHaveLength(drawn.records.length + 1);
   });
 });
 
