@@ -47,7 +47,19 @@ export function makeRouter(client: QueryClient) {
                   ],
                 },
                 { path: "clients", ...page(() => import("../routes/clients.tsx")) },
-                { path: "prices", ...page(() => import("../routes/prices.tsx")) },
+                {
+                  path: "prices",
+                  ...page(() => import("../routes/prices.tsx")),
+                  children: [
+                    {
+                      ErrorBoundary: RouteError,
+                      children: [
+                        { index: true, ...page(() => import("../routes/prices.book.tsx")) },
+                        { path: "rates", ...page(() => import("../routes/prices.rates.tsx")) },
+                      ],
+                    },
+                  ],
+                },
                 { path: "specs", ...page(() => import("../routes/specs.tsx")) },
                 {
                   path: "company",

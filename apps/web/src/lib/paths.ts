@@ -17,6 +17,7 @@ export const paths = {
     `/c/${company}/projects/${project}/${step}`,
   clients: (company: CompanySlug) => `/c/${company}/clients`,
   prices: (company: CompanySlug) => `/c/${company}/prices`,
+  rates: (company: CompanySlug) => `/c/${company}/prices/rates`,
   specs: (company: CompanySlug) => `/c/${company}/specs`,
   company: (company: CompanySlug, page: CompanyPage = "people") => `/c/${company}/company/${page}`,
   field: (company: CompanySlug) => `/c/${company}/field`,

@@ -10,6 +10,8 @@ export interface SeamTab {
   readonly label: string;
   /** The one fact about what is behind the tab. */
   readonly fact?: ReactNode;
+  /** It is open only at exactly this address, not below it. */
+  readonly end?: boolean;
 }
 
 /** The title of what is open, its tabs locked by seams, and the tools. */
@@ -57,6 +59,7 @@ function Tab({ tab, last }: { tab: SeamTab; last: boolean }) {
   return (
     <NavLink
       to={tab.to}
+      end={tab.end ?? false}
       className={({ isActive }) =>
         classNames(
           "relative min-w-[88px] flex-1 bg-sheet pl-6 pr-2 pt-2 no-underline max-md:min-w-[104px] max-md:pl-4",

@@ -1,0 +1,3 @@
+export { priceQueries } from "./prices.queries.ts";
+export { PriceBookScreen } from "./price-book-screen.tsx";
+export { RatesForm } from "./rates-form.tsx";

@@ -1,0 +1,2 @@
+export { specQueries } from "./specs.queries.ts";
+export { SpecsScreen } from "./specs-screen.tsx";
