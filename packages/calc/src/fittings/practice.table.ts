@@ -15,7 +15,7 @@ export interface PracticeCoefficients {
 
 export const PRACTICE_SOURCE = "common practice, no source; set your own";
 
-export const SHIPPED_PRACTICE: PracticeCoefficients = {
+export const shippedPractice: PracticeCoefficients = {
   // Five pieces; printed tables lie between 1.25 and 1.4.
   goredOverSmooth: 1.3,
   // Printed figures run from 0.11 to 0.33 with the vane and its spacing.

@@ -65,6 +65,8 @@ export interface FittingContext {
   /** Supply air leaves the equipment and junctions diverge; else it comes in and they converge. */
   readonly diverges: boolean;
   readonly findings: FindingList;
+  /** Room for the fittings of one segment, used again for the next. */
+  readonly scratch: SolvedFitting[];
 }
 
 const NO_FITTINGS: readonly SolvedFitting[] = [];
@@ -79,11 +81,11 @@ export function fittingsOf(context: FittingContext, s: number): readonly SolvedF
   if (before === NONE) return NO_FITTINGS;
 
   const kind = context.joints.leg[s];
-  if (kind === leg.branch || kind === leg.split) return [junction(context, s, before, null)];
+  if (kind === leg.branch || kind === leg.split) return listed(context, junction(context, s, before, null), null, null);
   const passes = kind === leg.run ? passage(context, s, before) : null;
   const changes = isSizeKept(context, s, before) ? null : transition(context, s, before, null);
   const turns = kind === leg.only && context.joints.turnCosine[s]! < SMALLEST_TURN_COSINE;
-  return listed(passes, changes, turns ? elbow(context, s, before, null) : null);
+  return listed(context, passes, changes, turns ? elbow(context, s, before, null) : null);
 }
 
 /** The estimator's choice in place of what was inferred; the loss of passing another's branch stays. */
@@ -94,16 +96,16 @@ function chosenFittings(
   chosen: FittingType,
 ): readonly SolvedFitting[] {
   if (chosen === "none") return NO_FITTINGS;
-  if (before === NONE) return [atEquipment(context, s, chosen)];
-  if (isJunction(chosen)) return [junction(context, s, before, chosen)];
+  if (before === NONE) return listed(context, atEquipment(context, s, chosen), null, null);
+  if (isJunction(chosen)) return listed(context, junction(context, s, before, chosen), null, null);
 
   const kind = context.joints.leg[s];
   const passes = kind === leg.run ? passage(context, s, before) : null;
-  if (isTransition(chosen)) return listed(passes, transition(context, s, before, chosen), null);
-  if (chosen === "end-cap") return listed(passes, endCap(context, s, context.sections.section[before]!), null);
+  if (isTransition(chosen)) return listed(context, passes, transition(context, s, before, chosen), null);
+  if (chosen === "end-cap") return listed(context, passes, endCap(context, s, context.sections.section[before]!), null);
   const joinsDirectly = kind === leg.only || kind === leg.run;
   const changes = joinsDirectly && !isSizeKept(context, s, before) ? transition(context, s, before, null) : null;
-  return listed(passes, changes, elbow(context, s, before, chosen));
+  return listed(context, passes, changes, elbow(context, s, before, chosen));
 }
 
 const isSizeKept = ({ sections }: FittingContext, s: number, before: number): boolean =>
@@ -111,16 +113,18 @@ const isSizeKept = ({ sections }: FittingContext, s: number, before: number): bo
 
 /** Those that are there, in their order. */
 function listed(
+  context: FittingContext,
   first: SolvedFitting | null,
   second: SolvedFitting | null,
   third: SolvedFitting | null,
 ): readonly SolvedFitting[] {
-  if (first === null) {
-    if (second === null) return third === null ? NO_FITTINGS : [third];
-    return third === null ? [second] : [second, third];
-  }
-  if (second === null) return third === null ? [first] : [first, third];
-  return third === null ? [first, second] : [first, second, third];
+  const { scratch } = context;
+  let count = 0;
+  if (first !== null) scratch[count++] = first;
+  if (second !== null) scratch[count++] = second;
+  if (third !== null) scratch[count++] = third;
+  // A copy rather than a literal, for the reason told in plain-record.ts.
+  return count === 0 ? NO_FITTINGS : scratch.slice(0, count);
 }
 
 const SMALLEST_TURN_COSINE = Math.cos(SMALLEST_TURN_RAD);

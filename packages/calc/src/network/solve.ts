@@ -4,7 +4,7 @@ import { airDensity } from "../air/density.ts";
 import { dynamicViscosity } from "../air/viscosity.ts";
 import { describeJoints } from "../fittings/joints.ts";
 import { sumJunctions } from "../fittings/junction-sums.ts";
-import { SHIPPED_PRACTICE, type PracticeCoefficients } from "../fittings/practice.table.ts";
+import { shippedPractice, type PracticeCoefficients } from "../fittings/practice.table.ts";
 import { transitionForm } from "../fittings/transition.ts";
 import { cubicMetersPerSecond, pascals, radians } from "../quantity.ts";
 import { fail, ok, type Result } from "../result.ts";
@@ -32,7 +32,7 @@ import { buildTree } from "./tree.ts";
  */
 export function solve(
   system: AirSystem,
-  practice: PracticeCoefficients = SHIPPED_PRACTICE,
+  practice: PracticeCoefficients = shippedPractice,
 ): Result<Solution, SystemProblem> {
   const problems: SystemProblem[] = [];
   checkConditions(system, problems);
@@ -66,6 +66,7 @@ export function solve(
     transitionForm: transitionForm(radians(spec.transitionAngle_rad)),
     diverges: system.service === "supply",
     findings,
+    scratch: [],
   });
   const { paths, governingOutletNodeId, requiredPressure } = tracePaths(system, tree, solved, findings);
 
