@@ -106,7 +106,8 @@ export const isRecord = (value: unknown): value is Readonly<Record<string, unkno
 const isList = (shape: Shape): shape is readonly [Shape] => Array.isArray(shape);
 const isOrNull = (shape: Shape): shape is { readonly orNull: Shape } => typeof shape === "object" && "orNull" in shape;
 
-const told = (value: unknown): string => (isRecord(value) ? "an object" : Array.isArray(value) ? "a list" : `${value}`);
+const told = (value: unknown): string =>
+  isRecord(value) ? "an object" : Array.isArray(value) ? "a list" : JSON.stringify(value);
 
 function words(shape: Shape): string {
   if (typeof shape === "string") return `a ${shape}`;

@@ -21,7 +21,7 @@ export function layCourse(system: AirSystem, tree: Tree, problems: SystemProblem
     const segment = segments[s]!;
     const tail = tree.from[s]!;
     const head = tree.to[s]!;
-    if (tail === NONE || head === NONE) continue;
+    if (tail === NONE || head === NONE || tail === head) continue;
     const dx = nodes[head]!.x_m - nodes[tail]!.x_m;
     const dy = nodes[head]!.y_m - nodes[tail]!.y_m;
     const dz = height[head]! - height[tail]!;
