@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { foundCompany } from "../../testing/found-company.ts";
-import { aContact, anAddress, aProject } from "../projects/project.testing.ts";
+import { aContact, anAddress, aProject } from "../../testing/a-project.ts";
 
 const aClient = (name = "Oxbow Builders") => ({ name, address: anAddress, notes: "", contacts: [aContact()] });
 

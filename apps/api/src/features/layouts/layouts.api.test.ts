@@ -4,8 +4,8 @@ import { createConnection, type Connection, type RowDataPacket } from "mysql2/pr
 import { randomUUID } from "node:crypto";
 import { describe, expect, test } from "vitest";
 import { foundCompany } from "../../testing/found-company.ts";
-import { aProject } from "../projects/project.testing.ts";
-import { adding, aSmallSystem, changing, removing } from "./small-system.testing.ts";
+import { aProject } from "../../testing/a-project.ts";
+import { adding, aSmallSystem, changing, removing } from "../../testing/a-small-system.ts";
 
 async function aLayout() {
   const company = await foundCompany();

@@ -3,8 +3,8 @@ import { computeNumbers } from "@cleatwork/layout";
 import { randomUUID } from "node:crypto";
 import { describe, expect, test } from "vitest";
 import { foundCompany, type TestCompany } from "../../testing/found-company.ts";
-import { adding, aSmallSystem } from "../layouts/small-system.testing.ts";
-import { aProject } from "../projects/project.testing.ts";
+import { adding, aSmallSystem } from "../../testing/a-small-system.ts";
+import { aProject } from "../../testing/a-project.ts";
 import { computeProject } from "./index.ts";
 
 const PRICED_ON = "2026-12-01";

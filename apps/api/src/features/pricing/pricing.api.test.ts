@@ -1,7 +1,7 @@
 import type { PriceItem } from "@cleatwork/calc";
 import { describe, expect, test } from "vitest";
 import { foundCompany } from "../../testing/found-company.ts";
-import { aProject } from "../projects/project.testing.ts";
+import { aProject } from "../../testing/a-project.ts";
 
 const sheet: PriceItem = {
   key: "metal:galvanized:24 ga",

@@ -5,7 +5,7 @@ import { text } from "node:stream/consumers";
 import { pipeline } from "node:stream/promises";
 import { describe, expect, test } from "vitest";
 import { foundCompany } from "../../testing/found-company.ts";
-import { aProject, drawingFields, onePixel } from "./project.testing.ts";
+import { aProject, drawingFields, onePixel } from "../../testing/a-project.ts";
 
 const bytesOf = (text: string) => new Uint8Array(Buffer.from(text));
 

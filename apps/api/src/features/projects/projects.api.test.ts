@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { foundCompany } from "../../testing/found-company.ts";
-import { aProject } from "./project.testing.ts";
+import { aProject } from "../../testing/a-project.ts";
 
 describe("projects", () => {
   test("are listed by bid date, undated last", async () => {

@@ -1,7 +1,7 @@
 /** Projects for tests: `aProject(estimator)` adds a client and starts a project for it. */
 import { makeId, type BodyOf, type endpoints } from "@cleatwork/contracts";
 import { meters } from "@cleatwork/calc";
-import type { TestPerson } from "../../testing/found-company.ts";
+import type { TestPerson } from "./found-company.ts";
 
 type ProjectBody = BodyOf<(typeof endpoints)["createProject"]>;
 
