@@ -1,19 +1,13 @@
 import { feet } from "@cleatwork/calc";
-import type { ChangeSet, Client, LevelRecord, ProjectId } from "@cleatwork/contracts";
+import type { ChangeSet, LevelRecord, ProjectId } from "@cleatwork/contracts";
 import { randomUUID } from "node:crypto";
 import { TIME_ZONE } from "../company.ts";
 import { layoutOfSystem } from "../layout-builder.ts";
 import { drawLibraryPlan, sheet } from "../library/plan-drawing.ts";
 import { library, type DemoProject } from "../projects.ts";
 import type { People } from "./people.ts";
+import type { ProjectSeed } from "./project-seed.ts";
 import { seedQuote } from "./quotes.ts";
-
-export interface ProjectSeed {
-  readonly project: DemoProject;
-  readonly clients: ReadonlyMap<string, Client>;
-  readonly today: Date;
-  readonly mailApiUrl: string;
-}
 
 export async function seedProject(people: People, seed: ProjectSeed): Promise<void> {
   const projectId = await findOrStart(people, seed);

@@ -5,7 +5,7 @@ import { tokenFromMail } from "../inbox.ts";
 import type { DemoProject } from "../projects.ts";
 import type { People } from "./people.ts";
 import { priceAsTheBrowserWould } from "./price.ts";
-import type { ProjectSeed } from "./projects.ts";
+import type { ProjectSeed } from "./project-seed.ts";
 
 export async function seedQuote(people: People, projectId: ProjectId, seed: ProjectSeed): Promise<void> {
   const { estimator, company } = people;
