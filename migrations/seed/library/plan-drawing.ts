@@ -1,6 +1,6 @@
 /** Paints the plan as sheet M-101: an 11 × 17 in. page at 1/8 in. to the foot. */
 import PDFDocument from "pdfkit";
-import { building, chairs, doors, grid, rooms, shelves, walls, type Point } from "./plan.ts";
+import { building, chairs, doors, grid, rooms, shelves, unit, walls, type Point } from "./plan.ts";
 
 /** 1/8 in. to the foot: 9 points a foot. */
 const POINTS_PER_FOOT = 9;
@@ -98,6 +98,13 @@ function drawFurniture(doc: Page): void {
     doc
       .rect(x(shelf.at[0]), y(shelf.at[1]), shelf.width_ft * POINTS_PER_FOOT, shelf.depth_ft * POINTS_PER_FOOT)
       .stroke();
+  const [west, north] = unit.from;
+  const [east, south] = unit.to;
+  doc.rect(x(west), y(north), (east - west) * POINTS_PER_FOOT, (south - north) * POINTS_PER_FOOT).stroke();
+  doc
+    .fillColor(WORDS)
+    .fontSize(7.5)
+    .text(unit.tag, x(west), y(north) - 9, { lineBreak: false });
   const size = chairs.size_ft * POINTS_PER_FOOT;
   for (let row = 0; row < chairs.rows; row++)
     for (let column = 0; column < chairs.columns; column++)

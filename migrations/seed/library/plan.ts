@@ -82,8 +82,8 @@ export const rooms: readonly { name: string; number: string; at: Point }[] = [
   { name: "CORRIDOR", number: "110", at: [84, 23] },
   { name: "COMMUNITY ROOM", number: "111", at: [17, 54] },
   { name: "LOBBY", number: "112", at: [50, 55] },
-  { name: "RESTROOM", number: "113", at: [36.5, 29] },
-  { name: "RESTROOM", number: "114", at: [41.5, 29] },
+  { name: "WC", number: "113", at: [36.5, 29] },
+  { name: "WC", number: "114", at: [41.5, 29] },
   { name: "READING", number: "115", at: [74, 54] },
   { name: "CHILDREN’S", number: "116", at: [98, 54] },
 ];
@@ -94,3 +94,6 @@ export const shelves: readonly { at: Point; width_ft: number; depth_ft: number }
 
 /** Chairs of the community room: a corner and the rows and columns. */
 export const chairs = { at: [5, 39.5] as Point, columns: 9, rows: 3, pitch_ft: 2.6, size_ft: 1.5 };
+
+/** The air handler, by its corners. */
+export const unit = { tag: "AH-1", from: [3, 5] as Point, to: [13, 13] as Point };
