@@ -24,7 +24,10 @@ export function frameOf(system: AirSystem, solution: Solution, standards: ShopSt
   const problems: SystemProblem[] = [];
   const tree = buildTree(system, problems);
   const course = layCourse(system, tree, problems);
-  if (problems.length > 0 || solution.segments.length !== system.segments.length) {
+  const isItsOwn =
+    solution.segments.length === system.segments.length &&
+    system.segments.every(({ id }, s) => solution.segments[s]!.segmentId === id);
+  if (problems.length > 0 || !isItsOwn) {
     throw new Error("take off got a system that its solution was not made from");
   }
   const airflow = Float64Array.from(solution.segments, ({ volumetricFlowRate_m3s }) => volumetricFlowRate_m3s);

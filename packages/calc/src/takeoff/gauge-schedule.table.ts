@@ -20,55 +20,55 @@ const OPEN_END = 1000;
 /** Tables 1-3 to 1-9, gauge in the 5 ft column, joints or reinforcement 5 ft apart. */
 // prettier-ignore
 const rectangularAt5ft: readonly PrintedClass[] = [
-  { class_inwg: 0.5, sizes: [[54, 26], [60, 24], [84, 22], [96, 20], [108, 18]], },
-  { class_inwg: 1, sizes: [[30, 26], [42, 24], [60, 22], [84, 18], [96, 16]], },
-  { class_inwg: 2, sizes: [[26, 26], [30, 24], [36, 22], [48, 20], [60, 18], [72, 16]], },
-  { class_inwg: 3, sizes: [[12, 26], [26, 24], [30, 22], [42, 20], [54, 18], [60, 16]], },
-  { class_inwg: 4, sizes: [[12, 26], [22, 24], [30, 22], [36, 20], [48, 18], [60, 16]], },
-  { class_inwg: 6, sizes: [[8, 26], [12, 24], [24, 22], [28, 20], [36, 18], [42, 16]], },
-  { class_inwg: 10, sizes: [[8, 24], [12, 22], [18, 20], [28, 18], [36, 16]], },
+  { class_inwg: 0.5, sizes: [[54, 26], [60, 24], [84, 22], [96, 20], [108, 18]] },
+  { class_inwg: 1, sizes: [[30, 26], [42, 24], [60, 22], [84, 18], [96, 16]] },
+  { class_inwg: 2, sizes: [[26, 26], [30, 24], [36, 22], [48, 20], [60, 18], [72, 16]] },
+  { class_inwg: 3, sizes: [[12, 26], [26, 24], [30, 22], [42, 20], [54, 18], [60, 16]] },
+  { class_inwg: 4, sizes: [[12, 26], [22, 24], [30, 22], [36, 20], [48, 18], [60, 16]] },
+  { class_inwg: 6, sizes: [[8, 26], [12, 24], [24, 22], [28, 20], [36, 18], [42, 16]] },
+  { class_inwg: 10, sizes: [[8, 24], [12, 22], [18, 20], [28, 18], [36, 16]] },
 ];
 
 /** Table 3-2A. */
 // prettier-ignore
 const roundSpiralPositive: readonly PrintedClass[] = [
-  { class_inwg: 2, sizes: [[14, 28], [26, 26], [36, 24], [50, 22], [60, 20], [84, 18]], },
-  { class_inwg: 4, sizes: [[12, 28], [16, 26], [26, 24], [36, 22], [50, 20], [84, 18]], },
-  { class_inwg: 10, sizes: [[10, 28], [14, 26], [26, 24], [36, 22], [50, 20], [84, 18]], },
+  { class_inwg: 2, sizes: [[14, 28], [26, 26], [36, 24], [50, 22], [60, 20], [84, 18]] },
+  { class_inwg: 4, sizes: [[12, 28], [16, 26], [26, 24], [36, 22], [50, 20], [84, 18]] },
+  { class_inwg: 10, sizes: [[10, 28], [14, 26], [26, 24], [36, 22], [50, 20], [84, 18]] },
 ];
 // prettier-ignore
 const roundSeamPositive: readonly PrintedClass[] = [
-  { class_inwg: 2, sizes: [[8, 28], [14, 26], [26, 24], [36, 22], [50, 20], [60, 18], [84, 16]], },
-  { class_inwg: 4, sizes: [[8, 28], [12, 26], [18, 24], [26, 22], [50, 20], [60, 18], [84, 16]], },
-  { class_inwg: 10, sizes: [[6, 28], [10, 26], [14, 24], [26, 22], [50, 20], [60, 18], [84, 16]], },
+  { class_inwg: 2, sizes: [[8, 28], [14, 26], [26, 24], [36, 22], [50, 20], [60, 18], [84, 16]] },
+  { class_inwg: 4, sizes: [[8, 28], [12, 26], [18, 24], [26, 22], [50, 20], [60, 18], [84, 16]] },
+  { class_inwg: 10, sizes: [[6, 28], [10, 26], [14, 24], [26, 22], [50, 20], [60, 18], [84, 16]] },
 ];
 
 /** Table 3-2B, unstiffened only. */
 // prettier-ignore
 const roundSpiralNegative: readonly PrintedClass[] = [
-  { class_inwg: 2, sizes: [[15, 28], [17, 26], [23, 24], [30, 22], [48, 20], [60, 18], [72, 16]], },
-  { class_inwg: 4, sizes: [[9, 28], [13, 26], [19, 24], [24, 22], [36, 20], [48, 18]], },
-  { class_inwg: 10, sizes: [[11, 26], [14, 24], [22, 22], [26, 20], [36, 18]], },
+  { class_inwg: 2, sizes: [[15, 28], [17, 26], [23, 24], [30, 22], [48, 20], [60, 18], [72, 16]] },
+  { class_inwg: 4, sizes: [[9, 28], [13, 26], [19, 24], [24, 22], [36, 20], [48, 18]] },
+  { class_inwg: 10, sizes: [[11, 26], [14, 24], [22, 22], [26, 20], [36, 18]] },
 ];
 // prettier-ignore
 const roundSeamNegative: readonly PrintedClass[] = [
-  { class_inwg: 2, sizes: [[10, 28], [13, 26], [17, 24], [20, 22], [26, 20], [34, 18], [42, 16]], },
-  { class_inwg: 4, sizes: [[8, 28], [10, 26], [13, 24], [16, 22], [20, 20], [26, 18], [33, 16]], },
-  { class_inwg: 10, sizes: [[8, 26], [9, 24], [12, 22], [15, 20], [21, 18], [24, 16]], },
+  { class_inwg: 2, sizes: [[10, 28], [13, 26], [17, 24], [20, 22], [26, 20], [34, 18], [42, 16]] },
+  { class_inwg: 4, sizes: [[8, 28], [10, 26], [13, 24], [16, 22], [20, 20], [26, 18], [33, 16]] },
+  { class_inwg: 10, sizes: [[8, 26], [9, 24], [12, 22], [15, 20], [21, 18], [24, 16]] },
 ];
 
 /** Table 3-4 by major dimension; the standard has it for duct under pressure. */
 // prettier-ignore
 const ovalSpiral: readonly PrintedClass[] = [
-  { class_inwg: 10, sizes: [[24, 24], [48, 22], [70, 20], [OPEN_END, 18]], },
+  { class_inwg: 10, sizes: [[24, 24], [48, 22], [70, 20], [OPEN_END, 18]] },
 ];
 // prettier-ignore
 const ovalSeam: readonly PrintedClass[] = [
-  { class_inwg: 10, sizes: [[36, 20], [60, 18], [OPEN_END, 16]], },
+  { class_inwg: 10, sizes: [[36, 20], [60, 18], [OPEN_END, 16]] },
 ];
 // prettier-ignore
 const ovalFitting: readonly PrintedClass[] = [
-  { class_inwg: 10, sizes: [[36, 20], [60, 18], [OPEN_END, 16]], },
+  { class_inwg: 10, sizes: [[36, 20], [60, 18], [OPEN_END, 16]] },
 ];
 
 /** Table 3-3, 2 in. of water at most; thickness in inches. Rectangular aluminum is not shipped. */

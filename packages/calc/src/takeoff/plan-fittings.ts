@@ -26,7 +26,7 @@ import {
 } from "./surface/elbow.ts";
 import { girth, outerWall } from "./surface/girth.ts";
 import { collarSurface, coneSurface, shoeEntry, shoeSurface, wallOfMain, type MainWall } from "./surface/tap.ts";
-import { transitionLength, transitionSurface } from "./surface/transition.ts";
+import { extent, transitionLength, transitionSurface } from "./surface/transition.ts";
 import type { Arithmetic, PieceKind } from "./takeoff.ts";
 
 type Terms = Arithmetic["terms"];
@@ -228,7 +228,9 @@ function planTap(
   // A branch drawn along its main still leaves it; under 15° it could not be made.
   const angle = radians(type === "wye" ? Math.max(angle_rad, MOST_SLANTED) : Math.PI / 2);
   const entry = type === "tap-shoe" && section.shape === "rectangular" ? shoeEntry(section.width_m) : meters(0);
-  const length = meters(Math.max(makingTable.tapCollar, entry));
+  // A slanted collar is long enough for its short side to clear the main.
+  const lean = extent(section).width / 2 / Math.tan(angle);
+  const length = meters(Math.max(makingTable.tapCollar + lean, entry));
   plans.near[s]! += wall.distance / Math.sin(angle) + length;
 
   let netArea = collarSurface(section, wall, angle, length);

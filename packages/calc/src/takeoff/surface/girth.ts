@@ -12,29 +12,21 @@ export const coveredArea = (section: Section): SquareMeters =>
     ? sectionArea({ shape: "round", diameter_m: section.outerDiameter_m })
     : sectionArea(section);
 
-/** Two half circles of this radius, their centers this far from the axis. Round: no distance. */
+/** Two half circles of this radius, their centers this far from the axis along the width. Round: no distance. */
 export interface Stadium {
   readonly radius: Meters;
   readonly halfFlat: Meters;
-  /** The centers lie along the width, or along the height of an oval that stands. */
-  readonly along: "width" | "height";
 }
 
+/** A flat oval lies: its width is the major axis, as `solve` insists. */
 export function stadiumOf(section: Exclude<Section, { shape: "rectangular" }>): Stadium {
   switch (section.shape) {
     case "round":
-      return { radius: meters(section.diameter_m / 2), halfFlat: meters(0), along: "width" };
+      return { radius: meters(section.diameter_m / 2), halfFlat: meters(0) };
     case "annular":
-      return { radius: meters(section.outerDiameter_m / 2), halfFlat: meters(0), along: "width" };
-    case "flat-oval": {
-      const major = Math.max(section.width_m, section.height_m);
-      const minor = Math.min(section.width_m, section.height_m);
-      return {
-        radius: meters(minor / 2),
-        halfFlat: meters((major - minor) / 2),
-        along: section.width_m >= section.height_m ? "width" : "height",
-      };
-    }
+      return { radius: meters(section.outerDiameter_m / 2), halfFlat: meters(0) };
+    case "flat-oval":
+      return { radius: meters(section.height_m / 2), halfFlat: meters((section.width_m - section.height_m) / 2) };
   }
 }
 

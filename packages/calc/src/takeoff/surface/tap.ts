@@ -20,9 +20,8 @@ export function wallOfMain(main: Section, vertical: boolean): MainWall {
     case "rectangular":
       return { distance: meters((vertical ? wall.height_m : wall.width_m) / 2), radius: null };
     case "flat-oval": {
-      const { radius, along } = stadiumOf(wall);
-      const meetsRound = (along === "width") !== vertical;
-      return { distance: meters((vertical ? wall.height_m : wall.width_m) / 2), radius: meetsRound ? radius : null };
+      const { radius } = stadiumOf(wall);
+      return { distance: meters((vertical ? wall.height_m : wall.width_m) / 2), radius: vertical ? null : radius };
     }
   }
 }
@@ -58,13 +57,9 @@ function aroundGirth(branch: Section, of: (x: number) => number): number {
     const half = branch.height_m / 2;
     return 2 * integrate(of, -1 * half, half) + 2 * branch.width_m * of(half);
   }
-  const { radius, halfFlat, along } = stadiumOf(branch);
-  if (along === "width") {
-    const ends = 4 * radius * integrate((t) => of(radius * Math.sin(t)), 0, Math.PI / 2);
-    return ends + 4 * halfFlat * of(radius);
-  }
-  const ends = 4 * radius * integrate((t) => of(halfFlat + radius * Math.cos(t)), 0, Math.PI / 2);
-  return ends + 2 * integrate(of, -1 * halfFlat, halfFlat);
+  const { radius, halfFlat } = stadiumOf(branch);
+  const ends = 4 * radius * integrate((t) => of(radius * Math.sin(t)), 0, Math.PI / 2);
+  return ends + 4 * halfFlat * of(radius);
 }
 
 /**

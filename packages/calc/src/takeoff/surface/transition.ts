@@ -62,7 +62,6 @@ function betweenRectangles(from: Rectangle, to: Rectangle, length: number): numb
 
 /** Two flats and two halves of a slanted cone; a round end has no flat. */
 function betweenStadiums(from: Stadium, to: Stadium, length: number): number {
-  if (from.along !== to.along && from.halfFlat > 0 && to.halfFlat > 0) return crossedStadiums(from, to, length);
   const shift = to.halfFlat - from.halfFlat;
   const widening = to.radius - from.radius;
   const flats = 2 * (from.halfFlat + to.halfFlat) * Math.hypot(length, widening);
@@ -72,32 +71,15 @@ function betweenStadiums(from: Stadium, to: Stadium, length: number): number {
   return flats + ends;
 }
 
-/** An oval that lies into one that stands: in each quarter a flat triangle, a cone and another triangle. */
-function crossedStadiums(lying: Stadium, standing: Stadium, length: number): number {
-  // Along x the lying flat meets the top of the standing arc; along y the standing flat meets the end of the lying arc.
-  const shiftX = -1 * lying.halfFlat;
-  const shiftY = standing.halfFlat;
-  const widening = standing.radius - lying.radius;
-  const topRise = standing.halfFlat + widening;
-  const endRise = widening - lying.halfFlat;
-  const triangles =
-    (lying.halfFlat / 2) * Math.hypot(length, topRise) + (standing.halfFlat / 2) * Math.hypot(length, endRise);
-  const slant = (t: number) => Math.hypot(length, widening + shiftX * Math.cos(t) + shiftY * Math.sin(t));
-  return 4 * (triangles + ((lying.radius + standing.radius) / 2) * integrate(slant, 0, Math.PI / 2));
-}
-
 /** In each corner of the rectangle a quarter of a slanted cone with its tip there; between them flats. */
 function rectangleToStadium({ width_m, height_m }: Rectangle, end: Stadium, length: number): number {
-  const alongWidth = end.along === "width";
-  const major = alongWidth ? width_m : height_m;
-  const minor = alongWidth ? height_m : width_m;
   const { radius, halfFlat } = end;
 
   // The long sides run to the oval's flat, the short ones to the middle of its round end.
-  const longSides = (major + 2 * halfFlat) * Math.hypot(length, minor / 2 - radius);
-  const shortSides = minor * Math.hypot(length, major / 2 - halfFlat - radius);
-  const cornerAlong = major / 2 - halfFlat;
-  const cornerAcross = minor / 2;
+  const longSides = (width_m + 2 * halfFlat) * Math.hypot(length, height_m / 2 - radius);
+  const shortSides = height_m * Math.hypot(length, width_m / 2 - halfFlat - radius);
+  const cornerAlong = width_m / 2 - halfFlat;
+  const cornerAcross = height_m / 2;
   const fromTip = (t: number) => Math.hypot(length, radius - cornerAlong * Math.cos(t) - cornerAcross * Math.sin(t));
   const corners = 4 * (radius / 2) * integrate(fromTip, 0, Math.PI / 2);
   return longSides + shortSides + corners;
