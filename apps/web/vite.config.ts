@@ -10,7 +10,8 @@ export default defineConfig({
     host: "127.0.0.1",
     port: Number(process.env.WEB_PORT ?? 5173),
     strictPort: process.env.WEB_PORT !== undefined,
-    proxy: { "/api": { target: api, changeOrigin: true } },
+    // The API takes changes from its own pages only; here the page comes from Vite, which vouches for it.
+    proxy: { "/api": { target: api, changeOrigin: true, headers: { origin: new URL(api).origin } } },
   },
   worker: { format: "es" },
   build: {

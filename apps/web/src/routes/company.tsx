@@ -17,7 +17,7 @@ export function Component() {
       <TopBar
         heading={false}
         title={company.name}
-        fact={`cleatwork/${slug}`}
+        fact={[company.address.city, company.address.region].filter(Boolean).join(", ") || company.timeZone}
         label="Company"
         tabs={tabs.filter((tab) => tab.for)}
       />

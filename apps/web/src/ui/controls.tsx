@@ -105,12 +105,14 @@ export function SelectField({
   hideLabel,
   aside,
   className,
-  choices,
+  choices = [],
   empty,
+  children,
   ...input
 }: FieldProps &
-  Omit<ComponentPropsWithRef<"select">, "className" | "children"> & {
-    readonly choices: readonly Choice[];
+  Omit<ComponentPropsWithRef<"select">, "className"> & {
+    /** Or `option` elements as children, where they come in groups. */
+    readonly choices?: readonly Choice[];
     /** What an empty choice says, where there may be none. */
     readonly empty?: string;
   }) {
@@ -124,6 +126,7 @@ export function SelectField({
               {choice.label}
             </option>
           ))}
+          {children}
         </select>
       )}
     </Field>

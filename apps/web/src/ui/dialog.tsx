@@ -10,6 +10,7 @@ export function Dialog({
   title,
   description,
   children,
+  footer,
   wide,
 }: {
   open: boolean;
@@ -17,6 +18,8 @@ export function Dialog({
   title: string;
   description?: ReactNode;
   children: ReactNode;
+  /** Buttons that stay in view while the content scrolls. */
+  footer?: ReactNode;
   wide?: boolean;
 }) {
   return (
@@ -43,6 +46,7 @@ export function Dialog({
             {description && <Radix.Description className="mb-4 text-ink-2">{description}</Radix.Description>}
             {children}
           </div>
+          {footer && <div className="flex flex-wrap justify-end gap-2 border-t border-line px-4 py-3">{footer}</div>}
         </Radix.Content>
       </Radix.Portal>
     </Radix.Root>

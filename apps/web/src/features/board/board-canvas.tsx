@@ -1,4 +1,13 @@
-import { useEffect, useLayoutEffect, useMemo, useRef, useState, type PointerEvent } from "react";
+import {
+  useEffect,
+  useLayoutEffect,
+  useMemo,
+  useRef,
+  useState,
+  type PointerEvent,
+  type ReactNode,
+  type RefObject,
+} from "react";
 import { boundsOf, fit, panBy, toPlan, zoomAt, type Camera, type PlanPoint, type Viewport } from "./core/camera.ts";
 import { hitTest } from "./core/hit-test.ts";
 import { withNodesAt } from "./core/scene.ts";
@@ -7,6 +16,7 @@ import { brushFor } from "./canvas/brush.ts";
 import { paintBoard, type Frame, type Ghost } from "./canvas/paint-board.ts";
 import { paletteOf } from "./canvas/palette.ts";
 import { useTool, type ToolName } from "./use-tool.ts";
+import type { DrawRunState } from "./tools/draw-run/draw-run.ts";
 import type { Intent, PointerInput, World } from "./tools/tool.ts";
 
 /** Pixels within which a pointer means a thing. */
@@ -20,6 +30,8 @@ interface BoardCanvasProps extends Omit<Frame, "ghost"> {
   readonly lengthOf: (text: string) => number | null;
   /** Answers the new end of a placed run, so that the next can start there. */
   readonly onIntent: (intent: Intent) => { nodeId: string; at: PlanPoint } | null;
+  readonly renderDrawing: (state: DrawRunState & { name: "placing" }, pointed_m: number | null) => ReactNode;
+  readonly renderScale: (pixelsPerMeter: number) => ReactNode;
   /** Changes when the view should show everything again. */
   readonly fitKey: string;
   readonly label: string;
@@ -97,72 +109,81 @@ export function BoardCanvas(props: BoardCanvasProps) {
     return { plan, screen, hit: hitTest(scene, plan, REACH / camera.pixelsPerMeter), shift: event.shiftKey };
   };
 
+  const drawing = state.tool === "draw-run" && state.state.name === "placing" ? state.state : null;
+  const pointed_m = drawing?.snap
+    ? Math.hypot(drawing.snap.at.x_m - drawing.anchor.at.x_m, drawing.snap.at.y_m - drawing.anchor.at.y_m)
+    : null;
+
   return (
-    <canvas
-      ref={canvas}
-      className="block size-full touch-none outline-none focus-visible:outline-2 focus-visible:outline-scribe"
-      tabIndex={0}
-      role="application"
-      aria-label={label}
-      aria-describedby="board-keys"
-      data-tool={tool}
-      onPointerDown={(event) => {
-        event.currentTarget.focus();
-        event.currentTarget.setPointerCapture(event.pointerId);
-        if (event.button === 1 || space.current) {
-          panning.current = { x: event.clientX, y: event.clientY };
-          return;
-        }
-        const at = input(event);
-        if (event.button === 0 && at) send({ type: "pointer-down", ...at });
-      }}
-      onPointerMove={(event) => {
-        if (panning.current) {
-          const { x, y } = panning.current;
-          panning.current = { x: event.clientX, y: event.clientY };
-          setCamera((current) => current && panBy(current, event.clientX - x, event.clientY - y));
-          return;
-        }
-        const at = input(event);
-        if (at) send({ type: "pointer-move", ...at });
-      }}
-      onPointerUp={(event) => {
-        if (panning.current) {
-          panning.current = null;
-          return;
-        }
-        const at = input(event);
-        if (event.button === 0 && at) send({ type: "pointer-up", ...at });
-      }}
-      onWheel={(event) => {
-        const box = event.currentTarget.getBoundingClientRect();
-        const pointer = { x: event.clientX - box.left, y: event.clientY - box.top };
-        const factor = Math.exp(-event.deltaY * WHEEL_ZOOM);
-        setCamera((current) => current && zoomAt(current, viewport, pointer, factor));
-      }}
-      onKeyDown={(event) => {
-        if (event.key === " ") {
-          space.current = true;
-          event.preventDefault();
-          return;
-        }
-        const view = keyedView(event.key, viewport);
-        if (event.ctrlKey || event.metaKey) return;
-        if (event.key === "Escape") send({ type: "cancel" });
-        else if (view && tool === "select") setCamera((current) => current && view(current));
-        else if (tool === "draw-run") {
-          send({ type: "key", key: event.key });
-          if (state.tool === "draw-run" && state.state.name === "placing") {
-            // While a run is drawn the drawing box has the keyboard; nothing else may take the letters.
-            event.stopPropagation();
-            if (event.key === "Tab" || event.key === "Backspace") event.preventDefault();
+    <>
+      <canvas
+        ref={canvas}
+        className="absolute inset-0 block size-full touch-none outline-none focus-visible:outline-2 focus-visible:outline-scribe"
+        tabIndex={0}
+        role="application"
+        aria-label={label}
+        aria-describedby="board-keys"
+        data-tool={tool}
+        onPointerDown={(event) => {
+          event.currentTarget.focus();
+          event.currentTarget.setPointerCapture(event.pointerId);
+          if (event.button === 1 || space.current) {
+            panning.current = { x: event.clientX, y: event.clientY };
+            return;
           }
-        }
-      }}
-      onKeyUp={(event) => {
-        if (event.key === " ") space.current = false;
-      }}
-    />
+          const at = input(event);
+          if (event.button === 0 && at) send({ type: "pointer-down", ...at });
+        }}
+        onPointerMove={(event) => {
+          if (panning.current) {
+            const { x, y } = panning.current;
+            panning.current = { x: event.clientX, y: event.clientY };
+            setCamera((current) => current && panBy(current, event.clientX - x, event.clientY - y));
+            return;
+          }
+          const at = input(event);
+          if (at) send({ type: "pointer-move", ...at });
+        }}
+        onPointerUp={(event) => {
+          if (panning.current) {
+            panning.current = null;
+            return;
+          }
+          const at = input(event);
+          if (event.button === 0 && at) send({ type: "pointer-up", ...at });
+        }}
+        onWheel={(event) => {
+          const box = event.currentTarget.getBoundingClientRect();
+          const pointer = { x: event.clientX - box.left, y: event.clientY - box.top };
+          const factor = Math.exp(-event.deltaY * WHEEL_ZOOM);
+          setCamera((current) => current && zoomAt(current, viewport, pointer, factor));
+        }}
+        onKeyDown={(event) => {
+          if (event.key === " ") {
+            space.current = true;
+            event.preventDefault();
+            return;
+          }
+          const view = keyedView(event.key, viewport);
+          if (event.ctrlKey || event.metaKey) return;
+          if (event.key === "Escape") send({ type: "cancel" });
+          else if (view && tool === "select") setCamera((current) => current && view(current));
+          else if (tool === "draw-run") {
+            send({ type: "key", key: event.key });
+            if (state.tool === "draw-run" && state.state.name === "placing") {
+              // While a run is drawn the drawing box has the keyboard; nothing else may take the letters.
+              event.stopPropagation();
+              if (event.key === "Tab" || event.key === "Backspace") event.preventDefault();
+            }
+          }
+        }}
+        onKeyUp={(event) => {
+          if (event.key === " ") space.current = false;
+        }}
+      />
+      {drawing && props.renderDrawing(drawing, pointed_m)}
+      {camera && props.renderScale(camera.pixelsPerMeter)}
+    </>
   );
 }
 
@@ -187,7 +208,7 @@ function keyedView(key: string, viewport: Viewport): ((camera: Camera) => Camera
   }
 }
 
-function useSize(canvas: React.RefObject<HTMLCanvasElement | null>, onSize: (viewport: Viewport) => void) {
+function useSize(canvas: RefObject<HTMLCanvasElement | null>, onSize: (viewport: Viewport) => void) {
   useEffect(() => {
     const element = canvas.current;
     if (!element) return;

@@ -1,4 +1,4 @@
-import { useSuspenseInfiniteQuery } from "@tanstack/react-query";
+import { useSuspenseInfiniteQuery, useSuspenseQuery } from "@tanstack/react-query";
 import { useMemo } from "react";
 import { useSearchParams } from "react-router-dom";
 import { momentText } from "../../lib/format/dates.ts";
@@ -6,6 +6,7 @@ import { Button } from "../../ui/button.tsx";
 import { SelectField } from "../../ui/controls.tsx";
 import { EmptyState } from "../../ui/empty-state.tsx";
 import { DataTable, type TableColumn } from "../../ui/table/data-table.tsx";
+import { projectQueries } from "../projects/index.ts";
 import { useSession } from "../session/index.ts";
 import { detailLines, eventSubject, eventWords, type AuditItem } from "./audit-words.ts";
 import { companyQueries } from "./companies.queries.ts";
@@ -22,7 +23,11 @@ export function AuditScreen() {
     () => (about === null ? all : all.filter((item) => eventSubject(item.event) === about)),
     [all, about],
   );
-  const columns = useMemo(() => columnsFor(company.timeZone), [company.timeZone]);
+  const { data: projects } = useSuspenseQuery(projectQueries.list(slug));
+  const columns = useMemo(() => {
+    const names = new Map(projects.items.map((project) => [project.id as string, project.name]));
+    return columnsFor(company.timeZone, company.currency, (subject) => names.get(subject) ?? subject);
+  }, [company, projects]);
   return (
     <main className="flex min-h-0 flex-1 flex-col p-4">
       <h1 className="sr-only">Audit of {company.name}</h1>
@@ -64,7 +69,11 @@ export function AuditScreen() {
   );
 }
 
-const columnsFor = (zone: string): readonly TableColumn<AuditItem>[] => [
+const columnsFor = (
+  zone: string,
+  currency: string,
+  nameOf: (subject: string) => string,
+): readonly TableColumn<AuditItem>[] => [
   {
     id: "at",
     head: "When",
@@ -74,11 +83,28 @@ const columnsFor = (zone: string): readonly TableColumn<AuditItem>[] => [
   },
   { id: "by", head: "Who", value: (item) => item.by?.name ?? "the system", className: "whitespace-nowrap" },
   { id: "event", head: "What", value: (item) => eventWords(item.event), className: "whitespace-nowrap font-[560]" },
-  { id: "subject", head: "About", value: (item) => item.subject || null },
+  { id: "subject", head: "About", value: (item) => nameOf(item.subject) || null },
   {
     id: "details",
     head: "Details",
-    value: (item) => detailLines(item.details).join("; ") || null,
-    className: "text-ink-2",
+    value: (item) => detailLines(item.details, currency).join("; ") || null,
+    cell: (item) => <Details lines={detailLines(item.details, currency)} />,
+    className: "py-1! text-ink-2",
   },
 ];
+
+/** Two lines, and the rest when asked for. */
+function Details({ lines }: { lines: readonly string[] }) {
+  const list = (some: readonly string[]) => some.map((line) => <li key={line}>{line}</li>);
+  return (
+    <>
+      <ul>{list(lines.slice(0, 2))}</ul>
+      {lines.length > 2 && (
+        <details>
+          <summary className="text-help text-dye-ink">{lines.length - 2} more</summary>
+          <ul>{list(lines.slice(2))}</ul>
+        </details>
+      )}
+    </>
+  );
+}

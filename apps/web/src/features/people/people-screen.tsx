@@ -34,7 +34,7 @@ export function PeopleScreen() {
   );
 
   return (
-    <main className="grid min-h-0 flex-1 content-start gap-4 overflow-auto p-4 xl:grid-cols-[minmax(0,1fr)_20rem]">
+    <main className="grid min-h-0 flex-1 content-start items-start gap-4 overflow-auto p-4 xl:grid-cols-[minmax(0,1fr)_20rem]">
       <h1 className="sr-only">People of {company.name}</h1>
       <Panel live label="People">
         <PanelHead title="People" fact={`${data.people.length} working, ${data.invitations.length} invited`}>
@@ -61,7 +61,9 @@ export function PeopleScreen() {
                 <th scope="col" className="num">
                   Last here
                 </th>
-                <th aria-label="Actions" />
+                <th>
+                  <span className="sr-only">Actions</span>
+                </th>
               </tr>
             </thead>
             <tbody>

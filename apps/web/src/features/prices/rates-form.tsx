@@ -69,41 +69,52 @@ export function RatesForm() {
         <legend className="sr-only">Labor and percentages</legend>
         <LaborRate index={0} mayWrite={mayWrite} />
         <LaborRate index={1} mayWrite={mayWrite} />
-        <Panel>
-          <PanelHead title="From cost to price" fact="in this order" />
-          <PanelBody className="grid gap-3">
-            <Percent
-              name="rates.wasteOnMetal_bp"
-              label="Waste on metal"
-              hint="On the net pounds, before the price of metal."
-            />
-            <Percent name="rates.tax_bp" label="Sales tax" hint="On what is marked taxable." />
-            <Percent name="rates.overhead_bp" label="Overhead" hint="On cost." />
-            <Percent name="rates.contingency_bp" label="Contingency" />
-            <Percent
-              name="rates.profit_bp"
-              label="Profit"
-              hint="Markup: over cost. The margin is shown beside it in every price."
-            />
-            <Percent name="rates.bond_bp" label="Bond" hint="Of the price." />
-            <Percent name="marginFloor_bp" label="Margin floor" hint="A price under this is pointed out." />
-            <Quantity<number>
-              name="conditionFactor"
-              label="Field hours, times"
-              hint="For height, congestion, an occupied building. 1 is a usual job."
-              parse={(text) => parsePlain(text, "1.15")}
-              format={(value) => ({ text: `× ${value}`, value: String(value), unit: "×" })}
-            />
-            <Quantity<number>
-              name="staleAfterDays"
-              label="A price is old after"
-              parse={(text) => parsePlain(text, "60")}
-              format={(value) => ({ text: `${value} days`, value: String(value), unit: "days" })}
-            />
-          </PanelBody>
-        </Panel>
+        <div className="grid gap-4">
+          <FromCostToPrice />
+          <Watches />
+        </div>
       </fieldset>
     </ContractFormView>
+  );
+}
+
+function FromCostToPrice() {
+  return (
+    <Panel>
+      <PanelHead title="From cost to price" fact="in this order" />
+      <PanelBody className="grid grid-cols-2 items-start gap-3">
+        <Percent name="rates.wasteOnMetal_bp" label="Waste on metal" hint="On the net pounds." />
+        <Percent name="rates.tax_bp" label="Sales tax" hint="On what is marked taxable." />
+        <Percent name="rates.overhead_bp" label="Overhead" hint="On cost." />
+        <Percent name="rates.contingency_bp" label="Contingency" hint="On cost." />
+        <Percent name="rates.profit_bp" label="Profit" hint="Markup, over cost. Every price shows the margin too." />
+        <Percent name="rates.bond_bp" label="Bond" hint="Of the price." />
+      </PanelBody>
+    </Panel>
+  );
+}
+
+function Watches() {
+  return (
+    <Panel>
+      <PanelHead title="Conditions and warnings" />
+      <PanelBody className="grid grid-cols-2 items-start gap-3">
+        <Quantity<number>
+          name="conditionFactor"
+          label="Field hours, times"
+          hint="1 is a usual job; more for height, congestion, an occupied building."
+          parse={(text) => parsePlain(text, "1.15")}
+          format={(value) => ({ text: `× ${value}`, value: String(value), unit: "×" })}
+        />
+        <Percent name="marginFloor_bp" label="Margin floor" hint="A price under this is pointed out." />
+        <Quantity<number>
+          name="staleAfterDays"
+          label="A price is old after"
+          parse={(text) => parsePlain(text, "60")}
+          format={(value) => ({ text: `${value} days`, value: String(value), unit: "days" })}
+        />
+      </PanelBody>
+    </Panel>
   );
 }
 

@@ -6,13 +6,11 @@ import { useSuspenseQuery } from "@tanstack/react-query";
 import { useState, type ReactNode } from "react";
 import { useFormContext, useWatch } from "react-hook-form";
 import type { z } from "zod";
-import { Button } from "../../ui/button.tsx";
 import { AddressFields } from "../../ui/form/address-fields.tsx";
 import { ContractFormView } from "../../ui/form/contract-form-view.tsx";
 import { formParts } from "../../ui/form/form-parts.tsx";
 import type { ContractForm } from "../../ui/form/use-contract-form.ts";
 import type { Understood } from "../../ui/quantity-field.tsx";
-import { PlusIcon } from "../../ui/icons/icon.tsx";
 import { ClientDialog, clientQueries } from "../clients/index.ts";
 import { useSession } from "../session/index.ts";
 import { DueField } from "./due-field.tsx";
@@ -75,10 +73,13 @@ function ClientFields() {
           empty="Choose a client"
           choices={data.items.map((one) => ({ value: one.id, label: one.name }))}
           aside={
-            <Button size="small" rank="bare" className="-my-1.5" onClick={() => setAdding(true)}>
-              <PlusIcon />
+            <button
+              type="button"
+              className="inline-flex items-center gap-1 text-help text-dye-ink underline underline-offset-3"
+              onClick={() => setAdding(true)}
+            >
               New client
-            </Button>
+            </button>
           }
         />
         <ContactField client={client} />

@@ -6,3 +6,4 @@ export { browserIds } from "./browser-ids.ts";
 export { Tally } from "./tally.tsx";
 export { tallyFacts } from "./tally-facts.ts";
 export { useWorkspaceKeys } from "./use-workspace-keys.ts";
+export { useStepFacts } from "./step-facts.tsx";

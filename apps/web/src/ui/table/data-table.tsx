@@ -206,7 +206,18 @@ function HeadCell<Row>({
   sorted: "ascending" | "descending" | null;
   onToggle: () => void;
 }) {
-  if (!column.head) return <th aria-label="Actions" />;
+  if (!column.head) {
+    return (
+      <th>
+        <span className="sr-only">Actions</span>
+      </th>
+    );
+  }
+  const arrow = (
+    <svg width={8} height={5} viewBox="0 0 8 5" aria-hidden className={sorted ? "fill-ink" : "fill-transparent"}>
+      <path d={sorted === "ascending" ? "M4 0l4 5H0z" : "M4 5L0 0h8z"} />
+    </svg>
+  );
   return (
     <th
       scope="col"
@@ -218,10 +229,9 @@ function HeadCell<Row>({
         onClick={onToggle}
         className={classNames("inline-flex h-8 items-center gap-1 hover:text-ink", sorted && "font-[680] text-ink")}
       >
+        {column.align && arrow}
         {column.head}
-        <svg width={8} height={5} viewBox="0 0 8 5" aria-hidden className={sorted ? "fill-ink" : "fill-transparent"}>
-          <path d={sorted === "ascending" ? "M4 0l4 5H0z" : "M4 5L0 0h8z"} />
-        </svg>
+        {!column.align && arrow}
       </button>
     </th>
   );

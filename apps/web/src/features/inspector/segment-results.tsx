@@ -1,0 +1,99 @@
+import {
+  formatAirflow,
+  formatFrictionRate,
+  formatLength,
+  formatPressure,
+  formatPressureChange,
+  formatVelocity,
+  decimal,
+  pascals,
+  type Shown,
+} from "@cleatwork/calc";
+import type { SegmentRecord } from "@cleatwork/contracts";
+import { find } from "@cleatwork/layout";
+import { Figure } from "../../ui/figure.tsx";
+import { classNames } from "../../lib/class-names.ts";
+import { useWorkspace } from "../workspace/index.ts";
+import { fittingNames } from "./words.ts";
+
+/** What the air does in this duct, and how the pressure is spent. */
+export function SegmentResults({ segment }: { segment: SegmentRecord }) {
+  const { solvedOf, units, layout } = useWorkspace();
+  const solved = solvedOf(segment.id);
+  const system = find(layout, "system", segment.systemId);
+  if (!solved || !system) return <p className="text-ink-3">No result while a stop stands.</p>;
+  const velocityLimit = system.limits.velocity_m_s[segment.ductClass];
+  const frictionLimit = system.limits.frictionRate_pa_m[segment.ductClass];
+  return (
+    <div className="grid gap-3 border-t border-line pt-3">
+      <dl className="grid grid-cols-[1fr_auto_auto] items-baseline gap-x-2 gap-y-1">
+        <Row
+          label="Airflow"
+          shown={formatAirflow(solved.volumetricFlowRate_m3s, units)}
+          aside={`${solved.outletCount} ${solved.outletCount === 1 ? "outlet" : "outlets"}`}
+        />
+        <Row
+          label="Velocity"
+          shown={formatVelocity(solved.meanVelocity_m_s, units)}
+          aside={`limit ${formatVelocity(velocityLimit, units).value}`}
+          over={solved.meanVelocity_m_s > velocityLimit}
+        />
+        <Row
+          label="Friction"
+          shown={formatFrictionRate(solved.frictionRate_pa_m, units)}
+          aside={`limit ${formatFrictionRate(frictionLimit, units).value}`}
+          over={solved.frictionRate_pa_m > frictionLimit}
+        />
+        <Row
+          label="Velocity pressure"
+          shown={formatPressure(solved.velocityPressure_pa, units)}
+          aside={`Re ${decimal(solved.reynoldsNumber / 1000, 0)} k`}
+        />
+        <Row label="Length" shown={formatLength(solved.length_m, units)} aside={solved.regime} />
+      </dl>
+      <section>
+        <h3 className="text-help font-semibold">Pressure</h3>
+        <dl className="grid grid-cols-[1fr_auto_auto] items-baseline gap-x-2 gap-y-1">
+          <Row label="Left on entering" shown={formatPressure(solved.pressureLeftEntering_pa, units)} />
+          {solved.fittings.map((fitting, position) => (
+            <Row
+              key={position}
+              label={fittingNames[fitting.type]}
+              shown={formatPressureChange(pascals(-fitting.loss_pa), units)}
+              aside={`${decimal(fitting.lossCoefficient, 2)} × ${formatPressure(fitting.velocityPressure_pa, units).value}`}
+              title={fitting.source}
+            />
+          ))}
+          <Row label="Straight duct" shown={formatPressureChange(pascals(-solved.frictionLoss_pa), units)} />
+          <Row label="Left on leaving" shown={formatPressure(solved.pressureLeftLeaving_pa, units)} />
+        </dl>
+      </section>
+    </div>
+  );
+}
+
+function Row({
+  label,
+  shown,
+  aside,
+  over = false,
+  title,
+}: {
+  label: string;
+  shown: Shown;
+  aside?: string;
+  over?: boolean;
+  title?: string;
+}) {
+  return (
+    <>
+      <dt className="text-ink-2">{label}</dt>
+      <dd className={classNames("text-right font-semibold", over && "text-warn-ink")}>
+        <Figure value={shown.value} unit={shown.unit} />
+      </dd>
+      <dd className="label-width text-right text-label text-ink-3" {...(title ? { title } : {})}>
+        {aside}
+      </dd>
+    </>
+  );
+}

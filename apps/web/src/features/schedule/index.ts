@@ -1,0 +1,2 @@
+/** The door of the schedule. */
+export { ScheduleView } from "./schedule-view.tsx";

@@ -1,0 +1,2 @@
+/** The door of the takeoff. */
+export { TakeoffScreen } from "./takeoff-screen.tsx";

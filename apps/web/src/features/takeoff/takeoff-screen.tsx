@@ -1,0 +1,353 @@
+import {
+  formatArea,
+  formatHours,
+  formatLength,
+  formatSize,
+  formatWeight,
+  hours,
+  kilograms,
+  meters,
+  squareMeters,
+  decimal,
+  type Piece,
+} from "@cleatwork/calc";
+import { find } from "@cleatwork/layout";
+import { Fragment, useMemo, useState } from "react";
+import { csvText, downloadText } from "../../lib/format/csv.ts";
+import { classNames } from "../../lib/class-names.ts";
+import { Button } from "../../ui/button.tsx";
+import { EmptyState } from "../../ui/empty-state.tsx";
+import { DownloadIcon } from "../../ui/icons/icon.tsx";
+import { Panel, PanelBody, PanelHead } from "../../ui/panel.tsx";
+import { ScreenSkeleton } from "../../ui/skeleton.tsx";
+import { Toggle } from "../../ui/toggle.tsx";
+import { useWorkspace } from "../workspace/index.ts";
+import { PieceArithmetic } from "./arithmetic.tsx";
+import { groupsOf, sumOf, type Group, type Grouping, type Line, type Sums } from "./takeoff-rows.ts";
+
+/** Every piece, counted: totals that open to sizes, sizes that open to pieces and their arithmetic. */
+export function TakeoffScreen() {
+  const { numbers, layout, units, project } = useWorkspace();
+  const [by, setBy] = useState<Grouping>("system");
+  const [closed, setClosed] = useState<ReadonlySet<string>>(new Set());
+  const [openLine, setOpenLine] = useState<string | null>(null);
+  const groups = useMemo(
+    () =>
+      groupsOf(numbers?.takeoffs ?? [], by, {
+        units,
+        system: (id) => {
+          const system = find(layout, "system", id);
+          return system ? `${system.tag} ${system.name}` : "";
+        },
+        level: (id) => find(layout, "level", id)?.name ?? "",
+      }),
+    [numbers, by, units, layout],
+  );
+  if (!numbers) return <ScreenSkeleton />;
+  const all = sumOf(numbers.takeoffs.flatMap(({ pieces }) => pieces));
+
+  return (
+    <main className="grid min-h-0 grow grid-cols-[minmax(0,1fr)_320px] content-start gap-3 overflow-auto p-4 max-lg:grid-cols-1">
+      <h1 className="sr-only">Takeoff</h1>
+      <Panel live label="Takeoff">
+        <PanelHead title="Takeoff" fact={`${all.count} pieces`}>
+          <Toggle
+            label="Grouped by"
+            value={by}
+            onChange={setBy}
+            choices={[
+              { value: "system", label: "System" },
+              { value: "level", label: "Level" },
+              { value: "kind", label: "Type" },
+              { value: "gauge", label: "Gauge" },
+            ]}
+          />
+          <Button
+            size="small"
+            onClick={() =>
+              downloadText(`${project.name} takeoff.csv`, pieceCsv(numbers.takeoffs.flatMap(({ pieces }) => pieces)))
+            }
+          >
+            <DownloadIcon size={14} /> CSV
+          </Button>
+        </PanelHead>
+        {groups.length === 0 ? (
+          <EmptyState title="Nothing to count yet">
+            Draw a run, and its pieces, joints, hangers and hours appear here.
+          </EmptyState>
+        ) : (
+          <div className="overflow-x-auto">
+            <table className="grid-table">
+              <thead>
+                <tr>
+                  <th>Item</th>
+                  <th className="num">Size</th>
+                  <th>ga</th>
+                  <th className="num">Pieces</th>
+                  <th className="num">Length</th>
+                  <th className="num">Net</th>
+                  <th className="num">Blank</th>
+                  <th className="num">Weight</th>
+                  <th className="num">Joints</th>
+                  <th className="num">Shop, h</th>
+                  <th className="num">Field, h</th>
+                </tr>
+              </thead>
+              <tbody>
+                {groups.map((group) => (
+                  <GroupRows
+                    key={group.key}
+                    group={group}
+                    open={!closed.has(group.key)}
+                    openLine={openLine}
+                    onToggle={() => setClosed(toggled(closed, group.key))}
+                    onLine={(key) => setOpenLine(openLine === key ? null : key)}
+                  />
+                ))}
+                <tr data-total>
+                  <td>All systems</td>
+                  <td />
+                  <td />
+                  <SumCells sums={all} />
+                </tr>
+              </tbody>
+            </table>
+          </div>
+        )}
+        <PanelBody className="text-help text-ink-3">
+          Weight is net metal. Gauges and hours come from the schedules named at each number; those marked common
+          practice are defaults to replace by your own.
+        </PanelBody>
+      </Panel>
+      <div className="grid content-start gap-3">
+        <MetalByGauge />
+        <Counted />
+      </div>
+    </main>
+  );
+}
+
+const toggled = (set: ReadonlySet<string>, key: string) => {
+  const next = new Set(set);
+  if (!next.delete(key)) next.add(key);
+  return next;
+};
+
+function GroupRows({
+  group,
+  open,
+  openLine,
+  onToggle,
+  onLine,
+}: {
+  group: Group;
+  open: boolean;
+  openLine: string | null;
+  onToggle: () => void;
+  onLine: (key: string) => void;
+}) {
+  return (
+    <>
+      <tr data-group>
+        <td>
+          <button type="button" aria-expanded={open} onClick={onToggle} className="font-semibold">
+            <span aria-hidden>{open ? "– " : "+ "}</span>
+            {group.label}
+          </button>
+        </td>
+        <td />
+        <td />
+        <SumCells sums={group.sums} />
+      </tr>
+      {open &&
+        group.lines.map((line) => (
+          <Fragment key={line.key}>
+            <tr data-hover data-selected={openLine === line.key ? "" : undefined}>
+              <td className="pl-6!">
+                <button
+                  type="button"
+                  aria-expanded={openLine === line.key}
+                  onClick={() => onLine(line.key)}
+                  className="text-left underline-offset-2 hover:underline"
+                >
+                  {line.label || "Pieces"}
+                </button>
+              </td>
+              <td className="num">{line.size}</td>
+              <td>{line.gauge}</td>
+              <SumCells sums={line.sums} />
+            </tr>
+            {openLine === line.key && (
+              <tr>
+                <td colSpan={11} className="border-l-4 border-dye bg-sheet-hi p-3!">
+                  <Opened line={line} />
+                </td>
+              </tr>
+            )}
+          </Fragment>
+        ))}
+    </>
+  );
+}
+
+function Opened({ line }: { line: Line }) {
+  const { units, selection } = useWorkspace();
+  const [mark, setMark] = useState(line.pieces[0]?.mark ?? "");
+  const piece = line.pieces.find((each) => each.mark === mark) ?? line.pieces[0];
+  if (!piece) return null;
+  return (
+    <div className="grid gap-2">
+      <div className="flex flex-wrap gap-1" role="group" aria-label="Pieces">
+        {line.pieces.map((each) => (
+          <button
+            key={`${each.systemId} ${each.mark}`}
+            type="button"
+            aria-pressed={each === piece}
+            className={classNames(
+              "border px-1.5 py-0.5 font-semibold",
+              each === piece ? "border-dye bg-dye-tint" : "border-line",
+            )}
+            onClick={() => {
+              setMark(each.mark);
+              selection.select(each.segmentId);
+            }}
+          >
+            {each.mark}
+          </button>
+        ))}
+      </div>
+      <p>
+        <b>{piece.mark}</b>, {piece.segmentName || "unnamed duct"}: {formatSize(piece.section, units).text}
+        {piece.length_m > 0 && `, ${formatLength(meters(piece.length_m), units).text}`}
+        {piece.gauge && `, ${piece.gauge} ${piece.material}`}
+        {piece.joint && `, ${piece.joint}`}
+        {piece.seam && `, ${piece.seam}`}
+      </p>
+      <PieceArithmetic piece={piece} units={units} />
+      {piece.gaugeSource && <p className="text-help text-ink-3">Gauge: {piece.gaugeSource}</p>}
+    </div>
+  );
+}
+
+function SumCells({ sums }: { sums: Sums }) {
+  const { units } = useWorkspace();
+  return (
+    <>
+      <td className="num">{sums.count}</td>
+      <td className="num">{sums.length_m > 0 ? formatLength(meters(sums.length_m), units).text : ""}</td>
+      <td className="num">{formatArea(squareMeters(sums.netArea_m2), units).value}</td>
+      <td className="num">{formatArea(squareMeters(sums.blankArea_m2), units).value}</td>
+      <td className="num">{formatWeight(kilograms(sums.weight_kg), units).value}</td>
+      <td className="num">{sums.joints}</td>
+      <td className="num">{formatHours(hours(sums.shop_h), units).value}</td>
+      <td className="num">{formatHours(hours(sums.field_h), units).value}</td>
+    </>
+  );
+}
+
+function MetalByGauge() {
+  const { numbers, units } = useWorkspace();
+  const weights = new Map<string, number>();
+  for (const { pieces } of numbers?.takeoffs ?? [])
+    for (const { gauge, weight_kg } of pieces) if (gauge) weights.set(gauge, (weights.get(gauge) ?? 0) + weight_kg);
+  const most = Math.max(...weights.values(), 1);
+  return (
+    <Panel label="Metal by gauge">
+      <PanelHead title="Metal by gauge" fact="net" />
+      <PanelBody>
+        {weights.size === 0 ? (
+          <p className="text-ink-3">No metal yet.</p>
+        ) : (
+          <table className="w-full">
+            <tbody>
+              {[...weights].sort().map(([gauge, weight]) => (
+                <tr key={gauge}>
+                  <th scope="row" className="py-0.5 pr-3 text-left font-normal">
+                    {gauge}
+                  </th>
+                  <td className="pr-3 text-right">{formatWeight(kilograms(weight), units).text}</td>
+                  <td className="w-1/2">
+                    <div className="h-2 bg-ink-2" style={{ width: `${(100 * weight) / most}%` }} />
+                  </td>
+                </tr>
+              ))}
+            </tbody>
+          </table>
+        )}
+      </PanelBody>
+    </Panel>
+  );
+}
+
+function Counted() {
+  const { numbers } = useWorkspace();
+  const sums = new Map<string, { quantity: number; unit: string; basis: string }>();
+  for (const { items } of numbers?.takeoffs ?? [])
+    for (const { description, quantity, unit, basis } of items) {
+      const known = sums.get(description);
+      if (known) known.quantity += quantity;
+      else sums.set(description, { quantity, unit, basis });
+    }
+  return (
+    <Panel label="Counted">
+      <PanelHead title="Hangers, sealant, dampers, devices" />
+      {sums.size === 0 ? (
+        <PanelBody className="text-ink-3">Nothing counted yet.</PanelBody>
+      ) : (
+        <table className="grid-table">
+          <tbody>
+            {[...sums].map(([description, { quantity, unit, basis }]) => (
+              <tr key={description} title={basis}>
+                <td>{description}</td>
+                <td className="num">
+                  {Number.isInteger(quantity) ? quantity : decimal(quantity, 1)} {unit}
+                </td>
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      )}
+    </Panel>
+  );
+}
+
+/** SI, with the unit in each heading: what is computed, for whoever computes on. */
+const pieceCsv = (pieces: readonly Piece[]): string =>
+  csvText([
+    [
+      "system",
+      "mark",
+      "kind",
+      "fitting",
+      "run",
+      "size_mm",
+      "length_m",
+      "material",
+      "gauge",
+      "joint",
+      "seam",
+      "net_area_m2",
+      "blank_area_m2",
+      "weight_kg",
+      "shop_h",
+      "field_h",
+    ],
+    ...pieces.map((piece) => [
+      piece.systemTag,
+      piece.mark,
+      piece.kind,
+      piece.fitting ?? "",
+      piece.segmentName,
+      formatSize(piece.section, "si").text,
+      piece.length_m,
+      piece.material,
+      piece.gauge ?? "",
+      piece.joint,
+      piece.seam,
+      piece.netArea_m2,
+      piece.blankArea_m2,
+      piece.weight_kg,
+      piece.shopHours_h,
+      piece.fieldHours_h,
+    ]),
+  ]);
