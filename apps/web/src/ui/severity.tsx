@@ -59,7 +59,9 @@ export function SeverityText({
   className?: string;
 }) {
   return (
-    <span className={classNames("inline-flex items-center gap-1.5 align-middle font-semibold", ink[severity], className)}>
+    <span
+      className={classNames("inline-flex items-center gap-1.5 align-middle font-semibold", ink[severity], className)}
+    >
       <SeverityMark severity={severity} />
       <span>{children}</span>
     </span>
