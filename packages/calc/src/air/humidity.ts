@@ -25,8 +25,8 @@ const overWater = (t: number): number =>
  *     ln p = C1/T + C2 + C3 T + C4 T² + C5 T³ + C6 T⁴ + C7 ln T
  *
  * Range    173 K to 473 K
- * Source   Hyland, R. W., Wexler, A. (1983), ASHRAE Trans. 89(2A), 500–519; constants recalled, checked against
- *          published densities of moist air in checks/air.check.test.ts
+ * Source   Hyland, R. W., Wexler, A. (1983), ASHRAE Trans. 89(2A), 500–519; constants recalled, held
+ *          against steam tables in checks/air.check.test.ts
  *
  * @example saturationPressure(degreesCelsius(20)) // 2 338.8 Pa
  */

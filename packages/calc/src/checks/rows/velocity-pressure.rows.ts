@@ -1,0 +1,50 @@
+/** Velocity pressure of standard air. */
+
+export const inchPound = {
+  source: "ASHRAE Handbook Fundamentals, duct design: 0.075 lb/ft³, in. of water at 4 °C",
+  standing: "computed",
+  relativeTolerance: 1e-6,
+  why: "exact units, rows printed to eight digits",
+  rows: [
+    [300, 0.0056010269],
+    [500, 0.015558408],
+    [700, 0.03049448],
+    [900, 0.050409243],
+    [1000, 0.062233633],
+    [1200, 0.089616431],
+    [1500, 0.14002567],
+    [1800, 0.20163697],
+    [2000, 0.24893453],
+    [2250, 0.31505777],
+    [2500, 0.3889602],
+    [3000, 0.56010269],
+    [3500, 0.762362],
+    [4000, 0.99573812],
+    [4005, 0.99822902],
+    [4500, 1.2602311],
+    [5000, 1.5558408],
+  ],
+} as const;
+
+export const metric = {
+  source: "Pv = 0.602 V² at 1.204 kg/m³",
+  standing: "found",
+  relativeTolerance: 1e-6,
+  why: "closed form",
+  rows: [
+    [1, 0.602],
+    [2, 2.408],
+    [2.5, 3.7625],
+    [3, 5.418],
+    [4, 9.632],
+    [5, 15.05],
+    [6, 21.672],
+    [7.5, 33.8625],
+    [8, 38.528],
+    [10, 60.2],
+    [12, 86.688],
+    [15, 135.45],
+    [20, 240.8],
+    [25, 376.25],
+  ],
+} as const;
