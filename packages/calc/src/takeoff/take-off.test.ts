@@ -224,6 +224,116 @@ describe("fittings", () => {
   });
 });
 
+describe("junctions", () => {
+  const cross = (spec = {}) =>
+    takeoffOf(
+      aSystem(
+        [
+          { to: "mid", after: "unit", at: [20, 0], section: rectangular(24, 12) },
+          { to: "on", after: "mid", at: [40, 0], section: rectangular(24, 12), outlet: {} },
+          { to: "left", after: "mid", at: [20, 10], section: rectangular(12, 8), outlet: {} },
+          { to: "right", after: "mid", at: [20, -10], section: rectangular(12, 8), outlet: {} },
+        ],
+        spec,
+      ),
+    );
+
+  it("a cross takes a piece of its main and is made once", () => {
+    const takeoff = cross();
+    const made = takeoff.pieces.filter(({ kind }) => kind === "branch");
+    expect(made.map(({ fitting }) => fitting)).toEqual(["cross"]);
+    const [body] = made;
+    expect(body!.length_m / METERS_PER_INCH).toBeCloseTo(16, 9);
+    expect(body!.netArea_m2 / METERS_PER_INCH ** 2).toBeCloseTo(72 * 16 + 2 * (40 * 2 - 96), 6);
+    const main = takeoff.pieces.filter(({ segmentId }) => segmentId === "to-mid" || segmentId === "to-on");
+    expect(straightLength(main) / METERS_PER_INCH).toBeCloseTo(480 - 16, 6);
+  });
+
+  it("a wye that ends its main has the legs of two elbows", () => {
+    const takeoff = takeoffOf(
+      aSystem([
+        { to: "wye", after: "unit", at: [20, 0], section: rectangular(24, 12) },
+        { to: "left", after: "wye", at: [30, 10], section: rectangular(12, 12), outlet: {} },
+        { to: "right", after: "wye", at: [30, -10], section: rectangular(12, 12), outlet: {} },
+      ]),
+    );
+    const made = takeoff.pieces.filter(({ kind }) => kind === "branch");
+    expect(made.map(({ fitting }) => fitting)).toEqual(["wye"]);
+    expect(made[0]!.netArea_m2 / METERS_PER_INCH ** 2).toBeCloseTo(2 * 48 * (Math.PI / 4) * 18, 6);
+  });
+
+  it("a lateral is long enough to clear its main", () => {
+    const takeoff = takeoffOf(
+      aSystem([
+        { to: "tap", after: "unit", at: [20, 0], section: round(20) },
+        { to: "on", after: "tap", at: [40, 0], section: round(20), outlet: {} },
+        { to: "side", after: "tap", at: [30, 10], section: round(10), outlet: {} },
+      ]),
+    );
+    const lateral = pieceOf(takeoff, "3J");
+    expect(lateral.fitting).toBe("wye");
+    expect(lateral.length_m / METERS_PER_INCH).toBeCloseTo(6 + 5, 6);
+  });
+
+  it.each([
+    ["shoe-tap", "conical-tap", "tap-shoe", rectangular(12, 10)],
+    ["straight-tap", "conical-tap", "tap-conical", round(10)],
+  ] as const)("the spec's %s and %s make a %s", (rectangularTap, roundTap, fitting, section) => {
+    const branch = (spec: { rectangular: "straight-tap" | "shoe-tap"; round: "straight-tap" | "conical-tap" }) =>
+      pieceOf(
+        takeoffOf(
+          aSystem(
+            [
+              { to: "tap", after: "unit", at: [20, 0], section: rectangular(24, 12) },
+              { to: "on", after: "tap", at: [40, 0], section: rectangular(24, 12), outlet: {} },
+              { to: "side", after: "tap", at: [20, 10], section, outlet: {} },
+            ],
+            { branch: spec },
+          ),
+        ),
+        "3J",
+      );
+    const eased = branch({ rectangular: rectangularTap, round: roundTap });
+    expect(eased.fitting).toBe(fitting);
+    const straight = branch({ rectangular: "straight-tap", round: "straight-tap" });
+    expect(straight.fitting).toBe("tap-straight");
+    expect(eased.netArea_m2).toBeGreaterThan(straight.netArea_m2);
+  });
+});
+
+describe("hours", () => {
+  it("in the field follow the conditions, in the shop they do not", () => {
+    const system = aSystem([
+      {
+        to: "joint",
+        after: "unit",
+        at: [20, 0],
+        section: round(10),
+        more: { accessories: ["volume-damper"] },
+      },
+      {
+        to: "end",
+        after: "joint",
+        at: [25, 0],
+        section: round(10),
+        more: { flexible: true },
+        outlet: { deviceKey: "diffuser-24x24" },
+      },
+    ]);
+    const { productivity } = shippedStandards;
+    const hard = takeoffOf(system, { ...shippedStandards, productivity: { ...productivity, conditionFactor: 1.5 } });
+    const easy = takeoffOf(system);
+    expect(hard.totals.shopHours_h).toBe(easy.totals.shopHours_h);
+    hard.pieces.forEach((piece, at) => {
+      expect(piece.fieldHours_h).toBeCloseTo(1.5 * easy.pieces[at]!.fieldHours_h, 9);
+    });
+    hard.items.forEach((item, at) => {
+      expect(item.fieldHours_h).toBeCloseTo(1.5 * easy.items[at]!.fieldHours_h, 9);
+    });
+    expect(hard.totals.fieldHours_h).toBeGreaterThan(0);
+  });
+});
+
 describe("outside the schedule", () => {
   it.each([
     ["a size", aRun(rectangular(100, 12), 10)],
@@ -249,6 +359,11 @@ describe("outside the schedule", () => {
 });
 
 describe("counted things", () => {
+  it("a piece too heavy for two people is noted", () => {
+    const { findings } = takeoffOf(aRun(round(60), 10));
+    expect(findings.map(({ code, severity }) => [code, severity])).toEqual([["piece-too-heavy", "note"]]);
+  });
+
   it("dampers carry their size, fire dampers are marked for review", () => {
     const takeoff = takeoffOf(
       aSystem([
