@@ -1,10 +1,7 @@
-import { EmptyState } from "../ui/empty-state.tsx";
+import { PriceScreen } from "../features/price/index.ts";
+import { useWorkspaceKeys } from "../features/workspace/index.ts";
 
-/** Filled by its feature. */
 export function Component() {
-  return (
-    <main className="p-4">
-      <EmptyState title="price" />
-    </main>
-  );
+  useWorkspaceKeys();
+  return <PriceScreen />;
 }

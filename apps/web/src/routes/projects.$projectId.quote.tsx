@@ -1,10 +1,15 @@
-import { EmptyState } from "../ui/empty-state.tsx";
+import type { QueryClient } from "@tanstack/react-query";
+import type { LoaderFunctionArgs } from "react-router-dom";
+import { QuoteScreen, quoteQueries } from "../features/quote-editor/index.ts";
+import { companyParam, projectParam } from "../lib/route-params.ts";
 
-/** Filled by its feature. */
+export const loader =
+  (client: QueryClient) =>
+  ({ params }: LoaderFunctionArgs) => {
+    void client.prefetchQuery(quoteQueries.list(companyParam(params), projectParam(params)));
+    return null;
+  };
+
 export function Component() {
-  return (
-    <main className="p-4">
-      <EmptyState title="quote" />
-    </main>
-  );
+  return <QuoteScreen />;
 }

@@ -49,7 +49,7 @@ export function Toasts() {
       <div
         role="status"
         aria-live="polite"
-        className="fixed bottom-4 left-1/2 z-50 grid -translate-x-1/2 gap-2 print:hidden"
+        className="fixed bottom-16 right-4 left-4 z-50 grid justify-items-end gap-2 print:hidden md:bottom-4 md:left-auto"
       >
         {shown.map((toast) => (
           <ToastView key={toast.id} toast={toast} />

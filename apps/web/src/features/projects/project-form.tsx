@@ -39,7 +39,7 @@ export function ProjectForm({
   actions: ReactNode;
 }) {
   return (
-    <ContractFormView contractForm={contractForm} guard actions={actions} label="Project" className="gap-6!">
+    <ContractFormView contractForm={contractForm} guard actions={actions} label="About the project" className="gap-6!">
       <div className="grid gap-3 sm:grid-cols-[1fr_10rem]">
         <Text name="name" label="Project" autoComplete="off" />
         <Text name="number" label="Your number for it" autoComplete="off" />

@@ -48,9 +48,11 @@ export function ProjectsScreen() {
 
   return (
     <main className="flex min-h-0 flex-1 flex-col gap-4 overflow-auto p-4">
-      <div className="shrink-0">
-        <BidRuler projects={data.items} company={slug} zone={company.timeZone} now={now} actions={add} />
-      </div>
+      {data.items.length > 0 && (
+        <div className="shrink-0">
+          <BidRuler projects={data.items} company={slug} zone={company.timeZone} now={now} actions={add} />
+        </div>
+      )}
       <DataTable
         className="min-h-80 flex-1"
         title="All projects"

@@ -13,6 +13,7 @@ function plainWords(allowed: string): string {
   );
   if (limit) {
     const [, sign = "", bound = "", of] = limit;
+    if (sign === ">=" && bound === "1" && of) return of === "items" ? "at least one" : "some words";
     const unit = of ? ` ${of}` : "";
     const words = { "<=": "at most", ">=": "at least", "<": "less than", ">": "more than" }[sign] ?? sign;
     return `${words} ${bound}${unit}`;

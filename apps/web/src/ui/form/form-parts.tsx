@@ -62,6 +62,8 @@ export function formParts<Values extends FieldValues>() {
         render={({ field, fieldState }) => (
           <QuantityField<Q>
             {...rest}
+            whileUnclear="no-value"
+            ref={field.ref}
             name={field.name}
             value={field.value ?? null}
             onChange={(value) => field.onChange(value ?? (empty === null ? null : undefined))}

@@ -1,0 +1,2 @@
+/** The door of price. */
+export { PriceScreen } from "./price-screen.tsx";

@@ -1,0 +1,3 @@
+/** The door of the quote editor. */
+export { QuoteScreen } from "./quote-screen.tsx";
+export { quoteQueries } from "./quotes.queries.ts";
