@@ -6,6 +6,7 @@ import { layCourse, type Course } from "../network/course.ts";
 import type { Solution, SystemProblem } from "../network/solution.ts";
 import { buildTree } from "../network/tree.ts";
 import { meters } from "../quantity.ts";
+import { gaugeReader } from "./gauge.ts";
 import type { ShopStandards } from "./takeoff.ts";
 
 export interface Frame {
@@ -18,6 +19,8 @@ export interface Frame {
   /** Outside of the liner; what is cut. */
   readonly metal: readonly Section[];
   readonly insulation: readonly Insulation[];
+  /** Of the system's metal and pressure class. */
+  readonly readGauge: ReturnType<typeof gaugeReader>;
 }
 
 export function frameOf(system: AirSystem, solution: Solution, standards: ShopStandards): Frame {
@@ -43,6 +46,7 @@ export function frameOf(system: AirSystem, solution: Solution, standards: ShopSt
       metalSection(section, system.segments[s]!.flexible ? { kind: "none" } : insulation[s]!),
     ),
     insulation,
+    readGauge: gaugeReader(standards.gauges, system.spec),
   };
 }
 

@@ -28,12 +28,27 @@ export interface GaugeQuestion {
  * the last size of the class there is no answer. A fitting goes by its own rows; where a schedule has none, by those of
  * duct with a longitudinal seam, for that is how a fitting is made.
  */
-export function findGauge(schedule: GaugeSchedule, question: GaugeQuestion): string | null {
-  for (const construction of constructionsFor(question.construction)) {
-    const row = lowestClass(schedule, question, construction);
-    if (row) return row.sizes.find(({ upTo_m }) => question.size_m <= upTo_m + SIZE_TOLERANCE)?.gauge ?? null;
-  }
-  return null;
+export const findGauge = (schedule: GaugeSchedule, question: GaugeQuestion): string | null =>
+  gaugeReader(schedule, question)(question);
+
+type Row = GaugeSchedule["rows"][number];
+
+/** The same for many pieces of one metal and pressure class: each row of the schedule is looked for once. */
+export function gaugeReader(
+  schedule: GaugeSchedule,
+  duct: Pick<GaugeQuestion, "material" | "pressureClass_pa">,
+): (piece: Pick<GaugeQuestion, "shape" | "construction" | "size_m">) => string | null {
+  const known = new Map<string, Row | null>();
+  return ({ shape, construction, size_m }) => {
+    const key = `${shape} ${construction}`;
+    let row = known.get(key);
+    if (row === undefined) {
+      row = null;
+      for (const made of constructionsFor(construction)) row ??= lowestClass(schedule, duct, shape, made);
+      known.set(key, row);
+    }
+    return row?.sizes.find(({ upTo_m }) => size_m <= upTo_m + SIZE_TOLERANCE)?.gauge ?? null;
+  };
 }
 
 const constructionsFor = (construction: GaugeQuestion["construction"]) =>
@@ -41,12 +56,13 @@ const constructionsFor = (construction: GaugeQuestion["construction"]) =>
 
 function lowestClass(
   { rows }: GaugeSchedule,
-  { material, shape, pressureClass_pa }: GaugeQuestion,
+  { material, pressureClass_pa }: Pick<GaugeQuestion, "material" | "pressureClass_pa">,
+  shape: GaugeQuestion["shape"],
   construction: GaugeQuestion["construction"],
-): GaugeSchedule["rows"][number] | null {
+): Row | null {
   const sign = pressureClass_pa < 0 ? "negative" : "positive";
   const pressure = Math.abs(pressureClass_pa);
-  let lowest: GaugeSchedule["rows"][number] | null = null;
+  let lowest: Row | null = null;
   for (const row of rows) {
     if (row.material !== material || row.shape !== shape) continue;
     if (row.pressureSign !== undefined && row.pressureSign !== sign) continue;

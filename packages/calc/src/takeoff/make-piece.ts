@@ -2,9 +2,9 @@
 import type { ConstructionSpec, Insulation, Section } from "../air-system.ts";
 import { outerPerimeter } from "../geometry/section.ts";
 import { hours, kilograms, meters, squareMeters, type Meters, type SquareMeters } from "../quantity.ts";
-import { findGauge, longestSide, scheduleShape, straightConstruction, type GaugeQuestion } from "./gauge.ts";
+import { longestSide, scheduleShape, straightConstruction, type GaugeQuestion, type gaugeReader } from "./gauge.ts";
 import { areaArithmetic, flexibleArithmetic, weightArithmetic } from "./piece-arithmetic.ts";
-import type { FittingPlan } from "./plan-fittings.ts";
+import type { FittingPlan } from "./fitting-plan.ts";
 import { findSheet, type Sheet } from "./sheet-weights.table.ts";
 import { stretchOut } from "./stretch-out.table.ts";
 import { girth } from "./surface/girth.ts";
@@ -19,6 +19,7 @@ export interface PieceOrigin {
   readonly segmentName: string;
   readonly spec: ConstructionSpec;
   readonly standards: ShopStandards;
+  readonly readGauge: ReturnType<typeof gaugeReader>;
   readonly insulation: Insulation;
 }
 
@@ -84,11 +85,9 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
   const part = metal.kind === "straight" ? "straight" : "fitting";
   const { gauges, productivity, blankAllowance } = standards;
 
-  const gauge = findGauge(gauges, {
-    material: spec.material,
+  const gauge = origin.readGauge({
     shape: scheduleShape(metal.gaugeSection),
     size_m: longestSide(metal.gaugeSection),
-    pressureClass_pa: spec.pressureClass_pa,
     construction: metal.construction,
   });
   // A label that no sheet of the metal answers to is as good as none: no weight is made up for it.

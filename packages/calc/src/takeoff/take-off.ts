@@ -8,7 +8,8 @@ import { frameOf, type Frame } from "./frame.ts";
 import { heavyPiece } from "./making.table.ts";
 import { fittingPiece, flexiblePiece, marked, straightPiece, type PieceOrigin } from "./make-piece.ts";
 import { fittingMark, straightMark } from "./marks.ts";
-import { planFittings, type FittingPlans } from "./plan-fittings.ts";
+import type { FittingPlans } from "./fitting-plan.ts";
+import { planFittings } from "./plan-fittings.ts";
 import { totalsOf } from "./totals.ts";
 import type { CountedItem, Piece, Takeoff, TakeoffFinding, TakeoffInput } from "./takeoff.ts";
 
@@ -59,6 +60,7 @@ function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: Takeof
     segmentName: segment.name,
     spec,
     standards,
+    readGauge: frame.readGauge,
     insulation: segment.flexible ? { kind: "none" } : frame.insulation[s]!,
   };
 

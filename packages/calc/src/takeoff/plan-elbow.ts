@@ -1,0 +1,90 @@
+/** Elbows: radius, square-throat with or without vanes, smooth and gored. */
+import type { SolvedFitting } from "../network/solution.ts";
+import { meters, radians, squareMeters, type Meters } from "../quantity.ts";
+import { GEOMETRY, sidesInBend, type FittingPlan, type FittingPlans } from "./fitting-plan.ts";
+import { segmentBefore, type Frame } from "./frame.ts";
+import {
+  gorePieces,
+  goredElbowSurface,
+  radiusElbowSurface,
+  radiusElbowTangent,
+  squareElbowSurface,
+  squareElbowTangent,
+  vaneCount,
+  vaneSurface,
+} from "./surface/elbow.ts";
+import { girth } from "./surface/girth.ts";
+
+export function planElbow(
+  frame: Frame,
+  plans: FittingPlans,
+  s: number,
+  { type, angle_rad }: SolvedFitting,
+): FittingPlan {
+  const section = frame.metal[s]!;
+  const angle = radians(angle_rad);
+  const { planeSide, acrossSide } = sidesInBend(frame, s, section);
+  const { radiusRatio } = frame.system.spec.elbow;
+  const centerRadius = meters(radiusRatio * planeSide);
+  const around = { label: "girth", value: girth(section), unit: "m" };
+  const base = {
+    segment: s,
+    type,
+    kind: "elbow",
+    section,
+    otherSection: null,
+    angle,
+    gaugeSection: section,
+  } as const;
+
+  const takeOut = (tangent: Meters) => {
+    plans.near[s]! += tangent;
+    const before = segmentBefore(frame, s);
+    if (before !== null) plans.far[before]! += tangent;
+  };
+
+  if (type === "elbow-square-throat" || type === "elbow-square-throat-vanes") {
+    const tangent = squareElbowTangent(angle, planeSide);
+    takeOut(tangent);
+    const walls = squareElbowSurface(section, angle, planeSide);
+    const terms = [around, { label: "center line through the corner", value: 2 * tangent, unit: "m" }];
+    if (type === "elbow-square-throat") {
+      return { ...base, length: meters(2 * tangent), netArea: walls, netTerms: terms, netBasis: GEOMETRY };
+    }
+    const vanes = vaneSurface({ planeSide, acrossSide, angle });
+    return {
+      ...base,
+      length: meters(2 * tangent),
+      netArea: squareMeters(walls + vanes),
+      netTerms: [...terms, { label: `${vaneCount(planeSide)} turning vanes`, value: vanes, unit: "m²" }],
+      netBasis: `${GEOMETRY}; vanes of 2 in. radius, 1 1/2 in. apart, rails not counted`,
+    };
+  }
+
+  takeOut(radiusElbowTangent(angle, centerRadius));
+  if (type === "elbow-gored") {
+    const pieces = gorePieces(angle, radiusRatio);
+    const netArea = goredElbowSurface(section, angle, centerRadius, pieces);
+    return {
+      ...base,
+      length: meters(netArea / girth(section)),
+      netArea,
+      netTerms: [
+        around,
+        { label: `center line of ${pieces} gored pieces`, value: netArea / girth(section), unit: "m" },
+      ],
+      netBasis: GEOMETRY,
+    };
+  }
+  return {
+    ...base,
+    length: meters(angle * centerRadius),
+    netArea: radiusElbowSurface(section, angle, centerRadius),
+    netTerms: [
+      around,
+      { label: "angle", value: angle, unit: "rad" },
+      { label: "center-line radius", value: centerRadius, unit: "m" },
+    ],
+    netBasis: GEOMETRY,
+  };
+}
