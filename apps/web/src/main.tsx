@@ -1,4 +1,5 @@
 import { createRoot } from "react-dom/client";
+import { LoadFailed } from "./ui/load-failed.tsx";
 import "./styles/app.css";
 
 /**
@@ -15,4 +16,7 @@ async function page() {
 const root = document.getElementById("root");
 if (!root) throw new Error("index.html has no #root");
 const screen = createRoot(root);
-void page().then((Page) => screen.render(<Page />));
+page().then(
+  (Page) => screen.render(<Page />),
+  () => screen.render(<LoadFailed />),
+);

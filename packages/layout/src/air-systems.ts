@@ -1,6 +1,7 @@
 /** From the drawn document to what the calculation reads: one air system for each system, its segments in tree order. */
 import {
   AIR_SYSTEM_SCHEMA,
+  SERVICES,
   meters,
   type AirNode,
   type AirSegment,
@@ -27,13 +28,18 @@ export function airSystemsFrom(
 ): AirSystem[] {
   const specs = new Map(context.specs.map(({ id, construction }) => [id, construction]));
   const levels = levelsOf(layout);
-  return listOf(layout, "system")
-    .sort((a, b) => (a.tag < b.tag ? -1 : a.tag > b.tag ? 1 : 0))
-    .flatMap((system) => {
-      const spec = specs.get(system.specId);
-      return spec ? [airSystem(system, spec, levels, index, context.altitude_m)] : [];
-    });
+  return systemsInOrder(layout).flatMap((system) => {
+    const spec = specs.get(system.specId);
+    return spec ? [airSystem(system, spec, levels, index, context.altitude_m)] : [];
+  });
 }
+
+/** As the trade lists them: supply, return, exhaust, outside air; within a service by tag. */
+export const systemsInOrder = (layout: Layout): SystemRecord[] =>
+  listOf(layout, "system").sort(
+    (a, b) =>
+      SERVICES.indexOf(a.service) - SERVICES.indexOf(b.service) || a.tag.localeCompare(b.tag, "en", { numeric: true }),
+  );
 
 const levelsOf = (layout: Layout): Level[] =>
   listOf(layout, "level").map(({ id, name, elevation_m }) => ({ id, name, elevation_m }));

@@ -1,11 +1,10 @@
-import { listOf } from "@cleatwork/layout";
 import { AirCheck } from "../features/air/index.ts";
 import { SystemChoice, useChosenSystem } from "../features/systems/index.ts";
 import { useWorkspace, useWorkspaceKeys } from "../features/workspace/index.ts";
 import { EmptyState } from "../ui/empty-state.tsx";
 
 export function Component() {
-  const { layout } = useWorkspace();
+  const { systems } = useWorkspace();
   const { system, choose } = useChosenSystem();
   useWorkspaceKeys();
   if (!system)
@@ -18,7 +17,7 @@ export function Component() {
   return (
     <>
       <div className="border-b border-line bg-sheet px-4 py-1.5">
-        <SystemChoice systems={listOf(layout, "system")} value={system.id} onChange={choose} />
+        <SystemChoice systems={systems} value={system.id} onChange={choose} />
       </div>
       <AirCheck systemId={system.id} />
     </>

@@ -27,7 +27,7 @@ export const loader =
 
 /** The layout, as a plan or as a table: the same records, the same selection. */
 export function Component() {
-  const { layout, mayEdit, company, project, selection } = useWorkspace();
+  const { layout, systems, mayEdit, company, project, selection } = useWorkspace();
   const [search, setSearch] = useSearchParams();
   const { system, choose } = useChosenSystem();
   const { data: drawings } = useQuery(workspaceQueries.drawings(company.slug, project.id));
@@ -86,7 +86,7 @@ export function Component() {
             </Button>
           </>
         )}
-        {system && <SystemChoice systems={listOf(layout, "system")} value={system.id} onChange={choose} />}
+        {system && <SystemChoice systems={systems} value={system.id} onChange={choose} />}
         {mayEdit && (
           <>
             {system && (

@@ -51,7 +51,8 @@ export function BoardCanvas(props: BoardCanvasProps) {
   const fitted = useRef("");
   useEffect(() => {
     if (viewport.width === 0 || fitted.current === fitKey) return;
-    const bounds = boundsOf([...scene.nodes.map(({ at }) => at), ...underlayCorners(props.underlay)]);
+    // The ducts when there are any: a sheet has wide margins.
+    const bounds = boundsOf(scene.nodes.length > 1 ? scene.nodes.map(({ at }) => at) : underlayCorners(props.underlay));
     setCamera(fit(bounds ?? { minX_m: 0, minY_m: 0, maxX_m: 30, maxY_m: 20 }, viewport));
     fitted.current = fitKey;
   }, [fitKey, viewport, scene, props.underlay]);

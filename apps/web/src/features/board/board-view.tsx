@@ -147,7 +147,7 @@ export function BoardView({ levelId, systemId, ground, heat, drawings }: BoardVi
         ghostWidth_m={planWidth(selectedSection)}
         lengthOf={(text) => lengthOf(text, units)}
         onIntent={onIntent}
-        fitKey={`${levelId} ${painted ? "drawing" : ""}`}
+        fitKey={`${levelId} ${scene.nodes.length > 1 || painted !== null}`}
         label={`Plan of ${level?.name ?? "the level"}. The schedule shows the same ducts as a table.`}
         renderDrawing={(state, pointed_m) => <DrawingBox state={state} pointed_m={pointed_m} units={units} />}
         renderScale={(pixelsPerMeter) => <ScaleBar pixelsPerMeter={pixelsPerMeter} units={units} />}

@@ -1,6 +1,6 @@
 import type { CompanySlug, LayoutRecord, ProjectId, RecordId } from "@cleatwork/contracts";
 import { endpoints } from "@cleatwork/contracts";
-import { indexOf, listOf, treeOf, type PricingDocuments, type TreeRow } from "@cleatwork/layout";
+import { indexOf, systemsInOrder, treeOf, type PricingDocuments, type TreeRow } from "@cleatwork/layout";
 import { useSuspenseQueries } from "@tanstack/react-query";
 import { useEffect, useMemo, useState, useSyncExternalStore, type ReactNode } from "react";
 import { api } from "../../lib/http.ts";
@@ -78,7 +78,7 @@ export function WorkspaceProvider({
   const numbers = useNumbers(documents);
   const selection = useSelection();
 
-  const systems = useMemo(() => listOf(layout, "system").sort((a, b) => (a.tag < b.tag ? -1 : 1)), [layout]);
+  const systems = useMemo(() => systemsInOrder(layout), [layout]);
   const trees = useMemo(() => new Map(systems.map(({ id }) => [id as string, treeOf(index, id)])), [systems, index]);
   const rowNumbers = useMemo(
     () =>

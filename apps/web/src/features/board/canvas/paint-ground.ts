@@ -20,7 +20,9 @@ export function paintGround(brush: Brush, grid_m: number): void {
   }
   context.strokeStyle = palette.grid;
   context.lineWidth = 1;
+  context.globalAlpha = 0.22;
   context.stroke();
+  context.globalAlpha = 1;
 }
 
 export interface PaintedUnderlay {
@@ -46,7 +48,7 @@ export function paintUnderlay(brush: Brush, underlay: PaintedUnderlay, ground: "
   if (ground === "dye") {
     context.filter = "invert(1) grayscale(1)";
     context.globalCompositeOperation = "screen";
-    context.globalAlpha = 0.38;
+    context.globalAlpha = 0.75;
   } else {
     context.globalCompositeOperation = "multiply";
     context.globalAlpha = 0.8;
