@@ -111,17 +111,17 @@ describe("junctions", () => {
     expect(junctionRows.rows.length).toBeGreaterThan(40);
     for (const row of junctionRows.rows) {
       const [angle, areaRatio, flowRatio, divergingBranch, divergingMain, convergingBranch, convergingMain] = row;
-      const branch = { angle: degrees(angle), areaRatio, flowRatio };
-      const main = { angle: degrees(0), areaRatio: 1, flowRatio: 1 - flowRatio };
+      const branch = { turnCosine: Math.cos(degrees(angle)), areaRatio, flowRatio };
+      const main = { turnCosine: 1, areaRatio: 1, flowRatio: 1 - flowRatio };
       const tolerance = { ...junctionRows, absoluteTolerance: 5e-9 };
       expectWithin(divergingBranchCoefficient(branch), divergingBranch, tolerance, row);
       expectWithin(divergingMainCoefficient(branch), divergingMain, tolerance, row);
 
       if (convergingBranch === null || convergingMain === null) continue;
       const momentum = joiningMomentum(branch) + joiningMomentum(main);
-      const ours = convergingLegCoefficient(branch, momentum) * convergingBranchFactor(branch);
+      const ours = convergingLegCoefficient(flowRatio / areaRatio, momentum) * convergingBranchFactor(branch);
       expectWithin(ours, convergingBranch, tolerance, row);
-      expectWithin(convergingLegCoefficient(main, momentum), convergingMain, tolerance, row);
+      expectWithin(convergingLegCoefficient(1 - flowRatio, momentum), convergingMain, tolerance, row);
     }
   });
 });

@@ -2,9 +2,9 @@
 import type { ConstructionSpec, FittingType, Section } from "../air-system.ts";
 
 /** Under this a bend is how it was drawn, not an elbow. */
-export const SMALLEST_TURN_RAD = (10 * Math.PI) / 180;
-/** A leg that leaves at less than this leans along the main: a wye rather than a tap or tee. */
-const WYE_UNDER_RAD = (67.5 * Math.PI) / 180;
+export const SMALLEST_TURN_COSINE = Math.cos((10 * Math.PI) / 180);
+/** A leg that leaves at less than 67.5° leans along the main: a wye rather than a tap or tee. */
+const WYE_OVER_COSINE = Math.cos((67.5 * Math.PI) / 180);
 
 export const elbowType = (section: Section, { elbow }: ConstructionSpec): FittingType => {
   if (section.shape !== "rectangular") return elbow.round === "gored" ? "elbow-gored" : "elbow-smooth";
@@ -31,12 +31,13 @@ export const tapType = (section: Section, { branch }: ConstructionSpec): Fitting
 export const branchType = (
   section: Section,
   spec: ConstructionSpec,
-  { angle, facesAnother }: { angle: number; facesAnother: boolean },
-): FittingType => (facesAnother ? "cross" : angle < WYE_UNDER_RAD ? "wye" : tapType(section, spec));
+  turnCosine: number,
+  facesAnother: boolean,
+): FittingType => (facesAnother ? "cross" : turnCosine > WYE_OVER_COSINE ? "wye" : tapType(section, spec));
 
 /** The end of a duct that splits. */
-export const splitType = (legCount: number, smallestAngle: number): FittingType =>
-  legCount > 2 ? "cross" : smallestAngle < WYE_UNDER_RAD ? "wye" : "tee";
+export const splitType = (legCount: number, leastTurnCosine: number): FittingType =>
+  legCount > 2 ? "cross" : leastTurnCosine > WYE_OVER_COSINE ? "wye" : "tee";
 
 export const transitionType = (upstream: Section, downstream: Section): FittingType =>
   upstream.shape === downstream.shape ? "transition" : "shape-transition";

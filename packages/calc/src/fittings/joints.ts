@@ -1,6 +1,7 @@
 /** What happens where segments meet: the turn of each, and which legs run on, branch off or split. Geometry only. */
 import type { Course } from "../network/course.ts";
-import { NONE, type Tree } from "../network/tree.ts";
+import { radians, type Radians } from "../quantity.ts";
+import { NONE, type Tree } from "../network/tree-shape.ts";
 
 /** How a segment leaves the one that feeds it. */
 export const leg = {
@@ -83,3 +84,7 @@ function markLegs(
     legs[s] = run < 0 ? leg.split : s === run ? leg.run : leg.branch;
   }
 }
+
+/** Most turns in a building are straight or square, and need no inverse cosine. */
+export const angleOfCosine = (cosine: number): Radians =>
+  radians(cosine === 0 ? Math.PI / 2 : cosine === 1 ? 0 : Math.acos(cosine));

@@ -1,6 +1,7 @@
 /** What the legs of each junction come to together, so that no leg has to ask all the others. One pass. */
-import { NONE, type Tree } from "../network/tree.ts";
+import { NONE, type Tree } from "../network/tree-shape.ts";
 import { leg, type Joints } from "./joints.ts";
+import { joiningMomentum } from "./junction.ts";
 
 /** Every array is indexed by the segment that feeds the junction, which is also its common leg. */
 export interface JunctionSums {
@@ -36,10 +37,12 @@ export function sumJunctions(tree: Tree, joints: Joints, airflow: Float64Array, 
 
     const isRun = kind === leg.run;
     const cosine = legCosine(joints, s);
-    const flowRatio = airflow[s]! / airflow[common]!;
-    // The run passes at its full size; a change of its size is a transition after the junction.
-    const areaRatio = isRun ? 1 : area[s]! / area[common]!;
-    sums.momentum[common]! += ((flowRatio * flowRatio) / areaRatio) * cosine;
+    sums.momentum[common]! += joiningMomentum({
+      turnCosine: cosine,
+      // The run passes at its full size; a change of its size is a transition after the junction.
+      areaRatio: isRun ? 1 : area[s]! / area[common]!,
+      flowRatio: airflow[s]! / airflow[common]!,
+    });
     if (isRun) continue;
 
     sums.branchCount[common]!++;

@@ -2,7 +2,6 @@
  * Loss coefficients of taps, tees and wyes, all on the velocity pressure of the COMMON leg, the one with all the air.
  * c common, b branch, s straight on. Coefficients may be negative, where one stream drives the other: never cut at zero.
  */
-import type { Radians } from "../quantity.ts";
 import { readLinear } from "../linear-table.ts";
 
 export const DIVERGING_SOURCE = "Idelchik, 3rd ed., ch. 7, diverging junctions, on common velocity pressure";
@@ -10,7 +9,8 @@ export const CONVERGING_SOURCE = "Idelchik, 3rd ed., ch. 7, converging junctions
 
 /** How a leg leaves (or joins) the common duct. */
 export interface JunctionLeg {
-  readonly angle: Radians;
+  /** Cosine of the angle between the leg and the common duct, both away from the equipment: 1 straight on, 0 at 90°. */
+  readonly turnCosine: number;
   /** Area of the leg over the common area. */
   readonly areaRatio: number;
   /** Air of the leg over all the air. */
@@ -34,7 +34,7 @@ function divergingBranchFactor({ areaRatio, flowRatio: q }: JunctionLeg): number
  */
 export function divergingBranchCoefficient(leg: JunctionLeg): number {
   const velocityRatio = leg.flowRatio / leg.areaRatio;
-  return divergingBranchFactor(leg) * (1 + velocityRatio * velocityRatio - 2 * velocityRatio * Math.cos(leg.angle));
+  return divergingBranchFactor(leg) * (1 + velocityRatio * velocityRatio - 2 * velocityRatio * leg.turnCosine);
 }
 
 /** K of a split, by angle in degrees; 0 where nothing turns. */
@@ -49,8 +49,8 @@ const SPLIT_RECOVERY = { at: [0, 15, 30, 45, 60, 90], values: [0, 0.04, 0.16, 0.
  */
 export function splitLegCoefficient(leg: JunctionLeg): number {
   const velocityRatio = leg.flowRatio / leg.areaRatio;
-  const recovery = readLinear(SPLIT_RECOVERY, (leg.angle * 180) / Math.PI);
-  return 1 + (1 - recovery) * velocityRatio * velocityRatio - 2 * velocityRatio * Math.cos(leg.angle);
+  const recovery = readLinear(SPLIT_RECOVERY, (Math.acos(leg.turnCosine) * 180) / Math.PI);
+  return 1 + (1 - recovery) * velocityRatio * velocityRatio - 2 * velocityRatio * leg.turnCosine;
 }
 
 /**
@@ -60,7 +60,7 @@ export function splitLegCoefficient(leg: JunctionLeg): number {
  *
  * Source   Idelchik, 3rd ed. (2006), diagram 7-20
  */
-export function divergingMainCoefficient({ areaRatio, flowRatio: q }: Omit<JunctionLeg, "angle">): number {
+export function divergingMainCoefficient({ areaRatio, flowRatio: q }: Omit<JunctionLeg, "turnCosine">): number {
   if (areaRatio <= 0.4) return 0.4 * q * q;
   return (q <= 0.5 ? 2 : 0.3) * (2 * q - 1) * q * q;
 }
@@ -70,20 +70,20 @@ export function divergingMainCoefficient({ areaRatio, flowRatio: q }: Omit<Junct
  *
  *     M = Σ qi² (Ac/Ai) cos αi
  */
-export const joiningMomentum = ({ angle, areaRatio, flowRatio: q }: JunctionLeg): number =>
-  ((q * q) / areaRatio) * Math.cos(angle);
+export const joiningMomentum = ({ turnCosine, areaRatio, flowRatio: q }: JunctionLeg): number =>
+  ((q * q) / areaRatio) * turnCosine;
 
 /**
  * A stream that joins others in a common duct, by the momentum balance of the junction.
  *
  *     C = 1 + (Vi/Vc)² − 2 M
  *
+ * The velocity ratio is that of this stream over the common one.
+ *
  * Source   Idelchik, 3rd ed. (2006), ch. 7, eq. for converging junctions; for As = Ac it is his branch formula with A = 1
  */
-export function convergingLegCoefficient(leg: JunctionLeg, momentum: number): number {
-  const velocityRatio = leg.flowRatio / leg.areaRatio;
-  return 1 + velocityRatio * velocityRatio - 2 * momentum;
-}
+export const convergingLegCoefficient = (velocityRatio: number, momentum: number): number =>
+  1 + velocityRatio * velocityRatio - 2 * momentum;
 
 /** Factor A on a branch that joins a duct running straight at its full size. Source: Idelchik, tables 7-1 to 7-3. */
 export function convergingBranchFactor({ areaRatio, flowRatio: q }: JunctionLeg): number {

@@ -1,77 +1,96 @@
-/** What an engineer would mark on a segment that can be solved all the same. */
+/** What an engineer would mark on segments that can be solved all the same. */
+import type { AirSystem, DuctClass } from "../air-system.ts";
 import { FLEXIBLE_RANGE, FLEXIBLE_SOURCE, compressionOfSlack } from "../friction/flexible.ts";
-import { TURBULENT_FROM_REYNOLDS } from "../friction/friction-factor.ts";
+import { LAMINAR_UNDER_REYNOLDS, TURBULENT_FROM_REYNOLDS } from "../friction/friction-factor.ts";
 import { aspectRatio } from "../geometry/section.ts";
 import { MOST_ASPECT_RATIO, addFinding, limitSources, type FindingList } from "./findings.ts";
-import type { FittingContext } from "./solve-fittings.ts";
-import { staticLessTotal } from "./static-pressure.ts";
-import type { FindingCode, SolvedSegment } from "./solution.ts";
+import { staticLessTotal } from "./losses.ts";
+import type { FindingCode } from "./solution.ts";
+import type { SolvedColumns } from "./write-segments.ts";
 
 /** A size by rule meets its limit exactly; the last digit is not a finding. */
 const isOver = (value: number, limit: number): boolean => value > limit * (1 + 1e-9);
 
-export function checkDesign(context: FittingContext, solved: SolvedSegment, s: number): void {
-  const { findings } = context;
-  const { segments, limits, spec } = context.system;
-  const { ductClass, flexible } = segments[s]!;
-  const velocityLimit = limits.velocity_m_s[ductClass];
-  if (isOver(solved.meanVelocity_m_s, velocityLimit)) {
-    const limitSource = limitSources.velocity(ductClass);
-    mark(findings, s, solved, "velocity-over-limit", solved.meanVelocity_m_s, velocityLimit, "m/s", limitSource);
-  }
-  const frictionLimit = limits.frictionRate_pa_m[ductClass];
-  if (isOver(solved.frictionRate_pa_m, frictionLimit)) {
-    const limitSource = limitSources.friction(ductClass);
-    mark(findings, s, solved, "friction-over-limit", solved.frictionRate_pa_m, frictionLimit, "Pa/m", limitSource);
-  }
-  const ratio = aspectRatio(solved.section);
-  if (isOver(ratio, MOST_ASPECT_RATIO)) {
-    mark(findings, s, solved, "aspect-ratio-high", ratio, MOST_ASPECT_RATIO, "1", limitSources.aspectRatio);
-  }
-  if (solved.regime === "transitional") {
-    const { transitional } = limitSources;
-    mark(findings, s, solved, "flow-transitional", solved.reynoldsNumber, TURBULENT_FROM_REYNOLDS, "1", transitional);
-  }
-  const pressureClass = Math.abs(spec.pressureClass_pa);
-  const toStatic = staticLessTotal(context.diverges, solved.velocityPressure_pa);
-  const entering = Math.abs(solved.pressureLeftEntering_pa + toStatic);
-  const leaving = Math.abs(solved.pressureLeftLeaving_pa + toStatic);
-  const mostStaticPressure = entering > leaving ? entering : leaving;
-  if (isOver(mostStaticPressure, pressureClass)) {
-    const limitSource = limitSources.pressureClass;
-    mark(findings, s, solved, "pressure-class-exceeded", mostStaticPressure, pressureClass, "Pa", limitSource);
-  }
-  if (flexible) checkFlexible(solved, s, limits.flexibleLength_m, spec.flexibleSlack, findings);
+const limitOf = (limits: Readonly<Record<DuctClass, number>>, ductClass: DuctClass): number =>
+  ductClass === "main" ? limits.main : ductClass === "branch" ? limits.branch : limits.runout;
+
+export function checkDesign(columns: SolvedColumns, findings: FindingList): void {
+  checkSpeed(columns, findings);
+  checkPressureClass(columns, findings);
+  checkForm(columns, findings);
 }
 
-function checkFlexible(
-  solved: SolvedSegment,
-  s: number,
-  lengthLimit: number,
-  slack: number,
-  findings: FindingList,
-): void {
-  if (isOver(solved.length_m, lengthLimit)) {
-    mark(findings, s, solved, "flexible-too-long", solved.length_m, lengthLimit, "m", limitSources.flexibleLength);
+function checkSpeed({ system, friction }: SolvedColumns, findings: FindingList): void {
+  const { segments, limits } = system;
+  const { velocity, frictionRate, reynoldsNumber } = friction;
+  for (let s = 0; s < segments.length; s++) {
+    const { ductClass } = segments[s]!;
+    const velocityLimit = limitOf(limits.velocity_m_s, ductClass);
+    if (isOver(velocity[s]!, velocityLimit)) {
+      const source = limitSources.velocity(ductClass);
+      mark(findings, system, s, "velocity-over-limit", velocity[s]!, velocityLimit, "m/s", source);
+    }
+    const frictionLimit = limitOf(limits.frictionRate_pa_m, ductClass);
+    if (isOver(frictionRate[s]!, frictionLimit)) {
+      const source = limitSources.friction(ductClass);
+      mark(findings, system, s, "friction-over-limit", frictionRate[s]!, frictionLimit, "Pa/m", source);
+    }
+    const reynolds = reynoldsNumber[s]!;
+    if (reynolds >= LAMINAR_UNDER_REYNOLDS && reynolds < TURBULENT_FROM_REYNOLDS) {
+      const source = limitSources.transitional;
+      mark(findings, system, s, "flow-transitional", reynolds, TURBULENT_FROM_REYNOLDS, "1", source);
+    }
   }
-  const compression = compressionOfSlack(slack);
+}
+
+function checkPressureClass({ system, friction, losses }: SolvedColumns, findings: FindingList): void {
+  const limit = Math.abs(system.spec.pressureClass_pa);
+  const { entering, leaving } = losses;
+  for (let s = 0; s < entering.length; s++) {
+    const toStatic = staticLessTotal(system.service === "supply", friction.velocityPressure[s]!);
+    const most = Math.max(Math.abs(entering[s]! + toStatic), Math.abs(leaving[s]! + toStatic));
+    if (!isOver(most, limit)) continue;
+    mark(findings, system, s, "pressure-class-exceeded", most, limit, "Pa", limitSources.pressureClass);
+  }
+}
+
+function checkForm(columns: SolvedColumns, findings: FindingList): void {
+  const { system, sections } = columns;
+  const { segments } = system;
+  for (let s = 0; s < segments.length; s++) {
+    const ratio = aspectRatio(sections.section[s]!);
+    if (isOver(ratio, MOST_ASPECT_RATIO)) {
+      mark(findings, system, s, "aspect-ratio-high", ratio, MOST_ASPECT_RATIO, "1", limitSources.aspectRatio);
+    }
+    if (segments[s]!.flexible) checkFlexible(columns, s, findings);
+  }
+}
+
+function checkFlexible({ system, course, sections }: SolvedColumns, s: number, findings: FindingList): void {
+  const length = course.length[s]!;
+  const lengthLimit = system.limits.flexibleLength_m;
+  if (isOver(length, lengthLimit)) {
+    mark(findings, system, s, "flexible-too-long", length, lengthLimit, "m", limitSources.flexibleLength);
+  }
+  const compression = compressionOfSlack(system.spec.flexibleSlack);
   const { compression: mostCompression, diameter_m: mostDiameter } = FLEXIBLE_RANGE;
+  const diameter = sections.hydraulicDiameter[s]!;
   if (isOver(compression, mostCompression)) {
-    mark(findings, s, solved, "table-range-exceeded", compression, mostCompression, "1", FLEXIBLE_SOURCE);
-  } else if (compression > 0 && isOver(solved.hydraulicDiameter_m, mostDiameter)) {
-    mark(findings, s, solved, "table-range-exceeded", solved.hydraulicDiameter_m, mostDiameter, "m", FLEXIBLE_SOURCE);
+    mark(findings, system, s, "table-range-exceeded", compression, mostCompression, "1", FLEXIBLE_SOURCE);
+  } else if (compression > 0 && isOver(diameter, mostDiameter)) {
+    mark(findings, system, s, "table-range-exceeded", diameter, mostDiameter, "m", FLEXIBLE_SOURCE);
   }
 }
 
 function mark(
   findings: FindingList,
+  { segments }: AirSystem,
   s: number,
-  { segmentId }: SolvedSegment,
   code: FindingCode,
   value: number,
   limit: number,
   unit: string,
   limitSource: string,
 ): void {
-  addFinding(findings, s, code, { kind: "segment", id: segmentId }, { value, limit, unit, limitSource });
+  addFinding(findings, s, code, { kind: "segment", id: segments[s]!.id }, { value, limit, unit, limitSource });
 }

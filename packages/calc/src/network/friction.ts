@@ -1,5 +1,5 @@
 /** Velocity and friction of every segment, by its real area and its hydraulic diameter. */
-import type { AirSystem } from "../air-system.ts";
+import type { AirSystem, Section } from "../air-system.ts";
 import { velocityPressure as pressureOfVelocity } from "../air/velocity-pressure.ts";
 import { slackFactor } from "../friction/flexible.ts";
 import { darcyFrictionFactor } from "../friction/friction-factor.ts";
@@ -17,33 +17,63 @@ export interface Friction {
 }
 
 export function findFriction(
-  { segments, spec }: AirSystem,
+  system: AirSystem,
   airflow: Float64Array,
-  { section, area, hydraulicDiameter }: Sections,
-  { density, viscosity }: { density: KilogramsPerCubicMeter; viscosity: PascalSeconds },
+  sections: Sections,
+  air: { density: KilogramsPerCubicMeter; viscosity: PascalSeconds },
 ): Friction {
+  const count = airflow.length;
   const friction: Friction = {
-    velocity: new Float64Array(segments.length),
-    velocityPressure: new Float64Array(segments.length),
-    reynoldsNumber: new Float64Array(segments.length),
-    darcyFrictionFactor: new Float64Array(segments.length),
-    frictionRate: new Float64Array(segments.length),
+    velocity: new Float64Array(count),
+    velocityPressure: new Float64Array(count),
+    reynoldsNumber: new Float64Array(count),
+    darcyFrictionFactor: new Float64Array(count),
+    frictionRate: new Float64Array(count),
   };
-  const kinematic = viscosity / density;
-  for (let s = 0; s < segments.length; s++) {
-    const segment = segments[s]!;
-    const diameter = hydraulicDiameter[s]!;
-    const velocity = airflow[s]! / area[s]!;
-    const velocityPressure = pressureOfVelocity(density, metersPerSecond(velocity));
-    const reynoldsNumber = (velocity * diameter) / kinematic;
-    const factor = darcyFrictionFactor(section[s]!, reynoldsNumber, roughnessOf(segment, spec) / diameter);
-    const slack = segment.flexible ? slackFactor({ slack: spec.flexibleSlack, diameter: meters(diameter) }) : 1;
-
-    friction.velocity[s] = velocity;
-    friction.velocityPressure[s] = velocityPressure;
-    friction.reynoldsNumber[s] = reynoldsNumber;
-    friction.darcyFrictionFactor[s] = factor;
-    friction.frictionRate[s] = (slack * factor * velocityPressure) / diameter;
-  }
+  const relativeRoughness = new Float64Array(count);
+  fillVelocities(friction, airflow, sections, air.density, air.viscosity / air.density);
+  fillRoughness(system, sections.hydraulicDiameter, relativeRoughness);
+  fillFactors(sections.section, friction.reynoldsNumber, relativeRoughness, friction.darcyFrictionFactor);
+  fillRates(system, sections.hydraulicDiameter, friction);
   return friction;
+}
+
+// Short loops, for the reason told in sections.ts.
+
+function fillVelocities(
+  { velocity, velocityPressure, reynoldsNumber }: Friction,
+  airflow: Float64Array,
+  { area, hydraulicDiameter }: Sections,
+  density: KilogramsPerCubicMeter,
+  kinematicViscosity: number,
+): void {
+  for (let s = 0; s < airflow.length; s++) {
+    velocity[s] = airflow[s]! / area[s]!;
+    velocityPressure[s] = pressureOfVelocity(density, metersPerSecond(velocity[s]!));
+    reynoldsNumber[s] = (velocity[s]! * hydraulicDiameter[s]!) / kinematicViscosity;
+  }
+}
+
+function fillRoughness({ segments, spec }: AirSystem, diameter: Float64Array, relativeRoughness: Float64Array): void {
+  for (let s = 0; s < segments.length; s++) relativeRoughness[s] = roughnessOf(segments[s]!, spec) / diameter[s]!;
+}
+
+function fillFactors(
+  section: readonly Section[],
+  reynoldsNumber: Float64Array,
+  relativeRoughness: Float64Array,
+  factor: Float64Array,
+): void {
+  for (let s = 0; s < factor.length; s++) {
+    factor[s] = darcyFrictionFactor(section[s]!, reynoldsNumber[s]!, relativeRoughness[s]!);
+  }
+}
+
+function fillRates({ segments, spec }: AirSystem, diameter: Float64Array, friction: Friction): void {
+  const { darcyFrictionFactor: factor, velocityPressure, frictionRate } = friction;
+  for (let s = 0; s < segments.length; s++) {
+    const isSlack = segments[s]!.flexible;
+    const slack = isSlack ? slackFactor({ slack: spec.flexibleSlack, diameter: meters(diameter[s]!) }) : 1;
+    frictionRate[s] = (slack * factor[s]! * velocityPressure[s]!) / diameter[s]!;
+  }
 }

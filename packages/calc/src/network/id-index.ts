@@ -67,6 +67,12 @@ export function findId(index: IdIndex, id: string): number {
   return NOT_FOUND;
 }
 
+/** The same, for an id that is likely the one at `guess`: layouts tell nodes and segments in the order they were drawn. */
+export function findIdNear(index: IdIndex, id: string, guess: number): number {
+  const { records } = index;
+  return guess >= 0 && guess < records.length && records[guess]!.id === id ? guess : findId(index, id);
+}
+
 function hash(id: string): number {
   let value = id.length;
   for (let i = 0; i < id.length; i++) value = (Math.imul(value, 31) + id.charCodeAt(i)) | 0;

@@ -5,7 +5,8 @@ import { meters, pascals, type Pascals } from "../quantity.ts";
 import { addFinding, limitSources, type FindingList } from "./findings.ts";
 import { plainRecord, type Draft } from "./plain-record.ts";
 import type { SolvedPath } from "./solution.ts";
-import type { SolvedTree } from "./solve-segments.ts";
+import type { Losses } from "./losses.ts";
+import type { Friction } from "./friction.ts";
 import { NONE, type Tree } from "./tree.ts";
 
 export interface Paths {
@@ -15,13 +16,19 @@ export interface Paths {
 }
 
 /** Paths in the order of the outlets. The governing path needs the most pressure; of equals, the first. */
-export function tracePaths(system: AirSystem, tree: Tree, solved: SolvedTree, findings: FindingList): Paths {
+export function tracePaths(
+  system: AirSystem,
+  tree: Tree,
+  friction: Friction,
+  losses: Losses,
+  findings: FindingList,
+): Paths {
   const { outlets } = tree;
-  const needs = outletNeeds(system, tree, solved);
+  const needs = outletNeeds(system, tree, friction, losses);
   const governing = indexOfMost(needs.required);
   const most = needs.required[governing]!;
   const paths = new Array<SolvedPath>(outlets.length);
-  fillPaths(system, tree, solved, needs, most, paths);
+  fillPaths(system, tree, losses, needs, most, paths);
   reportShort(system, tree, needs.required, findings);
   return { paths, governingOutletNodeId: system.nodes[outlets[governing]!]!.id, requiredPressure: most };
 }
@@ -32,15 +39,20 @@ interface OutletNeeds {
 }
 
 /** An outlet that says no pressure of its own is an open end: it takes one velocity pressure of its duct. */
-function outletNeeds(system: AirSystem, { outlets, into }: Tree, solved: SolvedTree): OutletNeeds {
+function outletNeeds(
+  system: AirSystem,
+  { outlets, into }: Tree,
+  { velocityPressure }: Friction,
+  { frictionTo, dynamicTo }: Losses,
+): OutletNeeds {
   const openEnd = system.service === "supply" ? OPEN_EXIT_COEFFICIENT : OPEN_ENTRY_COEFFICIENT;
   const outletPressure = new Float64Array(outlets.length);
   const required = new Float64Array(outlets.length);
   for (let o = 0; o < outlets.length; o++) {
     const last = into[outlets[o]!]!;
     const typed = system.nodes[outlets[o]!]!.requiredPressure_pa;
-    outletPressure[o] = typed ?? openEnd * solved.segments[last]!.velocityPressure_pa;
-    required[o] = solved.frictionTo[last]! + solved.dynamicTo[last]! + outletPressure[o]!;
+    outletPressure[o] = typed ?? openEnd * velocityPressure[last]!;
+    required[o] = frictionTo[last]! + dynamicTo[last]! + outletPressure[o]!;
   }
   return { outletPressure, required };
 }
@@ -55,7 +67,7 @@ function indexOfMost(values: Float64Array): number {
 function fillPaths(
   { nodes, segments, design }: AirSystem,
   { outlets, into, order, depth }: Tree,
-  solved: SolvedTree,
+  losses: Losses,
   needs: OutletNeeds,
   most: number,
   paths: SolvedPath[],
@@ -73,7 +85,7 @@ function fillPaths(
     paths[o] = new PathRecord(
       nodes[outlets[o]!]!.id,
       segmentIds,
-      solved,
+      losses,
       s,
       needs,
       o,
@@ -87,7 +99,7 @@ const PathRecord = plainRecord(function (
   this: Draft<SolvedPath>,
   outletNodeId: string,
   segmentIds: readonly string[],
-  { lengthTo, frictionTo, dynamicTo }: SolvedTree,
+  { lengthTo, frictionTo, dynamicTo }: Losses,
   last: number,
   { outletPressure, required }: OutletNeeds,
   outlet: number,

@@ -1,16 +1,19 @@
 /** The section of every segment, as typed or by the rule, and the measures that follow from it alone. */
 import type { AirSystem, Section } from "../air-system.ts";
+import { equivalentDiameter } from "../geometry/equivalent-diameter.ts";
 import { hydraulicDiameter, sectionArea, wettedPerimeter } from "../geometry/section.ts";
+import { meters, squareMeters } from "../quantity.ts";
 import type { SizingTables } from "../sizing/size-rule.ts";
 import { clearSection, linerThickness } from "./clear-section.ts";
 import type { FindingList } from "./findings.ts";
 
 export interface Sections {
   /** Clear inside. */
-  readonly section: Section[];
+  readonly section: readonly Section[];
   readonly area: Float64Array;
   readonly perimeter: Float64Array;
   readonly hydraulicDiameter: Float64Array;
+  readonly equivalentDiameter: Float64Array;
 }
 
 export function chooseSections(
@@ -20,19 +23,51 @@ export function chooseSections(
   findings: FindingList,
 ): Sections {
   const section = new Array<Section>(segments.length);
-  const area = new Float64Array(segments.length);
-  const perimeter = new Float64Array(segments.length);
-  const hydraulic = new Float64Array(segments.length);
   for (let s = 0; s < segments.length; s++) {
     const segment = segments[s]!;
     const given = segment.section ?? sizing.sectionFor(segment, airflow[s]!, s, findings);
-    const clear = clearSection(given, linerThickness(segment, spec));
-    const clearArea = sectionArea(clear);
-    const clearPerimeter = wettedPerimeter(clear);
-    section[s] = clear;
-    area[s] = clearArea;
-    perimeter[s] = clearPerimeter;
-    hydraulic[s] = hydraulicDiameter(clearArea, clearPerimeter);
+    section[s] = clearSection(given, linerThickness(segment, spec));
   }
-  return { section, area, perimeter, hydraulicDiameter: hydraulic };
+  return measure(section);
+}
+
+function measure(section: readonly Section[]): Sections {
+  const area = new Float64Array(section.length);
+  const perimeter = new Float64Array(section.length);
+  const hydraulic = new Float64Array(section.length);
+  const equivalent = new Float64Array(section.length);
+  fillAreas(section, area);
+  fillPerimeters(section, perimeter);
+  fillHydraulicDiameters(area, perimeter, hydraulic);
+  fillEquivalentDiameters(section, area, perimeter, hydraulic, equivalent);
+  return { section, area, perimeter, hydraulicDiameter: hydraulic, equivalentDiameter: equivalent };
+}
+
+// A short loop for each measure: the engine compiles a short loop whole, and then makes no number objects on the way.
+
+function fillAreas(section: readonly Section[], area: Float64Array): void {
+  for (let s = 0; s < area.length; s++) area[s] = sectionArea(section[s]!);
+}
+
+function fillPerimeters(section: readonly Section[], perimeter: Float64Array): void {
+  for (let s = 0; s < perimeter.length; s++) perimeter[s] = wettedPerimeter(section[s]!);
+}
+
+function fillHydraulicDiameters(area: Float64Array, perimeter: Float64Array, diameter: Float64Array): void {
+  for (let s = 0; s < area.length; s++) {
+    diameter[s] = hydraulicDiameter(squareMeters(area[s]!), meters(perimeter[s]!));
+  }
+}
+
+function fillEquivalentDiameters(
+  section: readonly Section[],
+  area: Float64Array,
+  perimeter: Float64Array,
+  hydraulic: Float64Array,
+  diameter: Float64Array,
+): void {
+  for (let s = 0; s < area.length; s++) {
+    const areaOf = squareMeters(area[s]!);
+    diameter[s] = equivalentDiameter(section[s]!, areaOf, meters(perimeter[s]!), meters(hydraulic[s]!));
+  }
 }

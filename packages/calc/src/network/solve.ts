@@ -9,16 +9,21 @@ import { transitionForm } from "../fittings/transition.ts";
 import { cubicMetersPerSecond, pascals, radians } from "../quantity.ts";
 import { fail, ok, type Result } from "../result.ts";
 import { sizingTables } from "../sizing/size-rule.ts";
+import { findAccessories } from "./accessories.ts";
 import { checkConditions } from "./check-conditions.ts";
+import { checkDesign } from "./check-design.ts";
 import { layCourse } from "./course.ts";
 import { inOrder, type FindingList } from "./findings.ts";
+import { findFittings } from "./find-fittings.ts";
+import { fittingColumns } from "./fitting-columns.ts";
 import { addUpFlows } from "./flows.ts";
 import { findFriction } from "./friction.ts";
+import { findLeakage, sumLosses } from "./losses.ts";
 import { tracePaths } from "./paths.ts";
 import { chooseSections } from "./sections.ts";
-import { solveSegments } from "./solve-segments.ts";
-import type { Solution, SolvedSegment, SystemProblem } from "./solution.ts";
+import type { Solution, SystemProblem } from "./solution.ts";
 import { buildTree } from "./tree.ts";
+import { writeSegments } from "./write-segments.ts";
 
 /**
  * Flows, sizes, pressure losses, paths and findings of a system, or every reason why it has none.
@@ -49,37 +54,46 @@ export function solve(
   const viscosity = dynamicViscosity(design.temperature_k);
 
   const findings: FindingList = { findings: [] };
-  const { airflow, outletCount } = addUpFlows(system, tree);
+  const flows = addUpFlows(system, tree);
+  const { airflow } = flows;
   const sections = chooseSections(system, airflow, sizingTables(system, { density, viscosity }), findings);
+  const friction = findFriction(system, airflow, sections, { density, viscosity });
+
   const joints = describeJoints(tree, course, airflow);
-  const solved = solveSegments({
+  const fittings = fittingColumns(tree.segmentCount);
+  findFittings({
     system,
     tree,
     course,
     airflow,
-    outletCount,
     sections,
-    friction: findFriction(system, airflow, sections, { density, viscosity }),
+    friction,
     joints,
     sums: sumJunctions(tree, joints, airflow, sections.area),
     practice,
     transitionForm: transitionForm(radians(spec.transitionAngle_rad)),
     diverges: system.service === "supply",
     findings,
-    scratch: [],
+    fittings,
   });
-  const { paths, governingOutletNodeId, requiredPressure } = tracePaths(system, tree, solved, findings);
+  const accessories = findAccessories(system, sections, friction, practice);
+
+  const losses = sumLosses(system, tree, course, friction, fittings, accessories);
+  const leakage = findLeakage(system, sections, course, friction, losses);
+  const columns = { system, course, flows, sections, friction, fittings, accessories, losses, leakage };
+  checkDesign(columns, findings);
+  const { paths, governingOutletNodeId, requiredPressure } = tracePaths(system, tree, friction, losses, findings);
 
   return ok({
     systemId: system.id,
     air: { density_kg_m3: density, viscosity_pa_s: viscosity },
-    segments: solved.segments,
+    segments: writeSegments(columns),
     paths,
     governingOutletNodeId,
     requiredPressure_pa: pascals(requiredPressure),
     availablePressure_pa: design.availablePressure_pa,
     outletAirflow_m3s: cubicMetersPerSecond(totalAirflow(system, tree.outlets)),
-    leakage_m3s: cubicMetersPerSecond(totalLeakage(solved.segments)),
+    leakage_m3s: cubicMetersPerSecond(totalOf(leakage)),
     findings: inOrder(findings),
   });
 }
@@ -90,8 +104,8 @@ function totalAirflow({ nodes }: AirSystem, outlets: readonly number[]): number 
   return total;
 }
 
-function totalLeakage(segments: readonly SolvedSegment[]): number {
+function totalOf(column: Float64Array): number {
   let total = 0;
-  for (let s = 0; s < segments.length; s++) total += segments[s]!.leakage_m3s;
+  for (let i = 0; i < column.length; i++) total += column[i]!;
   return total;
 }

@@ -3,7 +3,7 @@ import type { AirSystem } from "../air-system.ts";
 import { isNodeSound, problemsOfNode } from "./check-node.ts";
 import { isSegmentSound, problemsOfSegment } from "./check-segment.ts";
 import { reportCircles, reportDuplicates, reportLooseEnds, reportSecondParent } from "./check-tree.ts";
-import { findId, indexIds, NOT_FOUND } from "./id-index.ts";
+import { findIdNear, indexIds, NOT_FOUND } from "./id-index.ts";
 import { nodeSubject, problem, segmentSubject, systemSubject } from "./problems.ts";
 import type { SystemProblem } from "./solution.ts";
 import { NONE, type Tree } from "./tree-shape.ts";
@@ -85,12 +85,16 @@ function readSegments(system: AirSystem, ends: Ends, problems: SystemProblem[]):
   if (nodeIndex.hasDuplicates) reportDuplicates(nodes.map(nodeSubject), problems);
   if (indexIds(segments).hasDuplicates) reportDuplicates(segments.map(segmentSubject), problems);
 
+  let tailGuess = equipment;
+  let headGuess = 0;
   for (let s = 0; s < segments.length; s++) {
     const segment = segments[s]!;
     if (!isSegmentSound(segment, spec)) problems.push(...problemsOfSegment(segment, spec));
 
-    const tail = findId(nodeIndex, segment.fromNodeId);
-    const head = findId(nodeIndex, segment.toNodeId);
+    const tail = findIdNear(nodeIndex, segment.fromNodeId, tailGuess);
+    const head = findIdNear(nodeIndex, segment.toNodeId, headGuess);
+    tailGuess = head;
+    headGuess = head + 1;
     from[s] = tail;
     to[s] = head;
     if (tail === NOT_FOUND || head === NOT_FOUND) {
