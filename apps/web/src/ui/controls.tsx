@@ -140,7 +140,7 @@ export function CheckField({
   ...input
 }: { readonly label: ReactNode; readonly hint?: ReactNode } & Omit<ComponentPropsWithRef<"input">, "type">) {
   return (
-    <label className={classNames("flex items-start gap-2", className)}>
+    <label className={classNames("flex min-h-6 items-start gap-2", className)}>
       <input type="checkbox" {...input} className="mt-0.5 size-4 shrink-0 accent-dye" />
       <span>
         {label}

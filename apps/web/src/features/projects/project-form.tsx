@@ -71,6 +71,8 @@ function ClientFields() {
           name="clientId"
           label="Client"
           empty="Choose a client"
+          // A contact of another client is none.
+          onChosen={(id) => setValue("contactId", data.items.find((one) => one.id === id)?.contacts[0]?.id ?? null)}
           choices={data.items.map((one) => ({ value: one.id, label: one.name }))}
           aside={
             <button
@@ -90,13 +92,11 @@ function ClientFields() {
 }
 
 function ContactField({ client }: { client: Client | undefined }) {
-  const { register } = useFormContext<ProjectValues>();
   const contacts = client?.contacts ?? [];
-  // "" in the control is null in the body; a contact of another client is none.
-  register("contactId", { setValueAs: (id: string | null) => (contacts.some((one) => one.id === id) ? id : null) });
   return (
     <Select
       name="contactId"
+      emptyIs={null}
       label="Contact"
       empty={client ? "Nobody in particular" : "Choose the client first"}
       choices={contacts.map((one) => ({ value: one.id, label: one.title ? `${one.name}, ${one.title}` : one.name }))}

@@ -3,7 +3,6 @@ import {
   formatPressure,
   formatThickness,
   parseLength,
-  parsePressure,
   parseThickness,
 } from "@cleatwork/calc/display/index";
 import { inches, meters, type Meters, type Pascals } from "@cleatwork/calc";
@@ -21,7 +20,7 @@ import { useContractForm } from "../../ui/form/use-contract-form.ts";
 import { notify } from "../../ui/toast.tsx";
 import { useSession } from "../session/index.ts";
 import { startingConstruction } from "./new-spec.ts";
-import { plainNumber, degrees, percent } from "./spec-numbers.ts";
+import { degrees, parsePressureClass, percent, plainNumber } from "./spec-numbers.ts";
 import { specChoices } from "./spec-words.ts";
 import { specQueries } from "./specs.queries.ts";
 
@@ -129,7 +128,7 @@ function Sheet() {
       <Quantity<Pascals>
         name="construction.pressureClass_pa"
         label="Pressure class"
-        parse={(text) => parsePressure(text, units)}
+        parse={(text) => parsePressureClass(text, units)}
         format={(value) => formatPressure(value, units)}
         hint="Positive for supply, negative where duct is under suction. It decides gauge and reinforcement."
       />

@@ -1,3 +1,6 @@
+import { parsePressure } from "@cleatwork/calc/display/index";
+import { pascals, type Pascals } from "@cleatwork/calc";
+import type { UnitSystem } from "@cleatwork/contracts";
 import type { Understood } from "../../ui/quantity-field.tsx";
 
 type Numeric = {
@@ -35,3 +38,10 @@ export const percent: Numeric = {
     return { text: `${shown} %`, value: shown, unit: "%" };
   },
 };
+
+/** A pressure class may be negative, for duct under suction; pressures elsewhere may not. */
+export function parsePressureClass(text: string, units: UnitSystem): Understood<Pascals> {
+  const suction = /^\s*[-\u2212\u2013]\s*(.*)$/.exec(text);
+  const read = parsePressure(suction?.[1] ?? text, units);
+  return read.ok && suction ? { ok: true, value: pascals(0 - read.value) } : read;
+}

@@ -33,9 +33,37 @@ export function formParts<Values extends FieldValues>() {
     const { field, error } = useBound(name);
     return <TextAreaField {...rest} {...field} error={error} />;
   };
-  const Select = ({ name, ...rest }: Bound<ComponentProps<typeof SelectField>, Values>) => {
-    const { field, error } = useBound(name);
-    return <SelectField {...rest} {...field} error={error} />;
+  /** Controlled, so that a value may arrive before its choice does. `emptyIs` is what no choice means in the body. */
+  const Select = ({
+    name,
+    emptyIs = "",
+    onChosen,
+    ...rest
+  }: Bound<ComponentProps<typeof SelectField>, Values> & {
+    emptyIs?: null | "";
+    onChosen?: (value: string) => void;
+  }) => {
+    const { control } = useFormContext<Values>();
+    return (
+      <Controller
+        control={control}
+        name={name}
+        render={({ field, fieldState }) => (
+          <SelectField
+            {...rest}
+            name={field.name}
+            ref={field.ref}
+            value={field.value ?? ""}
+            onBlur={field.onBlur}
+            onChange={(event) => {
+              field.onChange(event.target.value === "" ? emptyIs : event.target.value);
+              onChosen?.(event.target.value);
+            }}
+            error={errorOf(fieldState.error, field.value)}
+          />
+        )}
+      />
+    );
   };
   const Check = ({ name, ...rest }: { name: Path<Values>; label: ReactNode; hint?: ReactNode }) => {
     const { register } = useFormContext<Values>();
@@ -68,7 +96,7 @@ export function formParts<Values extends FieldValues>() {
             value={field.value ?? null}
             onChange={(value) => field.onChange(value ?? (empty === null ? null : undefined))}
             onBlur={field.onBlur}
-            error={fieldState.error?.message ? fieldMessage(field.value, fieldState.error.message) : undefined}
+            error={errorOf(fieldState.error, field.value)}
           />
         )}
       />
@@ -77,8 +105,12 @@ export function formParts<Values extends FieldValues>() {
   return { Text, Password, Area, Select, Check, Quantity };
 }
 
-function errorAt(errors: object, name: string, value: unknown): string | undefined {
+function errorAt(errors: object, name: string, value: unknown) {
   const found: { message?: string; type?: string } | undefined = get(errors, name);
+  return errorOf(found, value);
+}
+
+function errorOf(found: { message?: string; type?: string } | undefined, value: unknown): string | undefined {
   if (!found?.message) return undefined;
   // "said": a whole sentence already.
   return found.type === "said" ? found.message : fieldMessage(value, found.message);
