@@ -4,7 +4,7 @@ import { expectAccessible } from "../support/accessible.ts";
 import { linkInMail } from "../support/inbox.ts";
 import { expect, test, type Product } from "../support/product.ts";
 
-const CLIENT = "priya.lindqvist@oxbow.example";
+const CLIENT = "priya.lindqvist@oxbowbuilders.example";
 
 test("a duct becomes a price, a quote, a signature and a cut list without a price", async ({ browser, product }) => {
   const estimator = await signedIn(browser, product, "estimator");

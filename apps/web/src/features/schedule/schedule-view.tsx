@@ -59,6 +59,8 @@ export function ScheduleView({ systemId }: { systemId: string }) {
   }, [chosen, rows, columns.length]);
 
   const go = (next: GridState) => {
+    // The cell that was typed into goes away; the keys stay with the grid.
+    if (grid.editing) scroller.current?.focus({ preventScroll: true });
     setGrid(next);
     setError(null);
     const id = rows[next.active.row]?.segment.id;
