@@ -39,7 +39,7 @@ export function RouteError() {
     return (
       <Frame title="Not for your role">
         <NoPermission screen title="Your role does not open this page">
-          <p>{error.detail} An owner of the company can change your role, under Company, People.</p>
+          <p>{error.detail}</p>
         </NoPermission>
       </Frame>
     );

@@ -2,9 +2,13 @@ import { RatesForm } from "../features/prices/index.ts";
 import { useSession } from "../features/session/index.ts";
 
 export function Component() {
-  const { company } = useSession();
+  const { company, may } = useSession();
   return (
-    <main className="min-h-0 flex-1 overflow-auto px-4 pt-4">
+    <main
+      className="min-h-0 flex-1 overflow-auto px-4 pt-4"
+      // Where every field is closed, the keys still have to scroll.
+      {...(may("prices.write") ? {} : { tabIndex: 0 })}
+    >
       <title>{`Labor and percentages, ${company.name}`}</title>
       <RatesForm />
     </main>

@@ -53,6 +53,11 @@ export function Dialog({
   );
 }
 
+/** The buttons of a form in a dialog; they stay in view while its fields scroll. */
 export function DialogActions({ children }: { children: ReactNode }) {
-  return <div className="mt-4 flex flex-wrap justify-end gap-2 border-t border-line pt-4">{children}</div>;
+  return (
+    <div className="sticky -bottom-4 -mx-4 -mb-4 mt-2 flex flex-wrap justify-end gap-2 border-t border-line bg-sheet px-4 py-3">
+      {children}
+    </div>
+  );
 }

@@ -70,7 +70,9 @@ function Tab({ tab, last }: { tab: SeamTab; last: boolean }) {
       {({ isActive }) => (
         <>
           <span className={classNames("block truncate", isActive ? "font-[680]" : "font-[560]")}>{tab.label}</span>
-          <span className="flex h-4 items-center gap-1 whitespace-nowrap text-label text-ink-3">{tab.fact}</span>
+          <span className="flex h-4 items-center gap-1 overflow-hidden whitespace-nowrap text-label text-ink-3">
+            {tab.fact}
+          </span>
           {!last && <Seam />}
         </>
       )}

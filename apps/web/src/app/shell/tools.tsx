@@ -6,7 +6,7 @@ import { Avatar } from "../../ui/avatar.tsx";
 import { Button } from "../../ui/button.tsx";
 import { DarkIcon, LightIcon, SearchIcon, SystemIcon } from "../../ui/icons/icon.tsx";
 import { KeyCap } from "../../ui/key-cap.tsx";
-import { Menu, MenuChoices, MenuItem, MenuLabel, MenuSeparator } from "../../ui/menu.tsx";
+import { Menu, MenuChoices, MenuItem, MenuSeparator } from "../../ui/menu.tsx";
 import { notify } from "../../ui/toast.tsx";
 
 const roleWord = { owner: "owner", estimator: "estimator", foreman: "foreman" } as const;
@@ -77,7 +77,6 @@ function PersonMenu({ onKeys }: { onKeys: () => void }) {
       />
       <MenuSeparator />
       <MenuItem onSelect={onKeys}>Keys on this screen</MenuItem>
-      <MenuLabel>This computer</MenuLabel>
       <MenuItem
         onSelect={() => {
           signOut().catch(() => notify("You are still signed in: there is no connection.", { severity: "stop" }));

@@ -172,7 +172,7 @@ function MemberRow({
           </span>
         </span>
       </td>
-      <td className="w-36">
+      <td className="w-36 min-w-32">
         {manages ? (
           <SelectField
             label={`Role of ${person.name}`}

@@ -100,7 +100,7 @@ const columnsFor = (slug: Parameters<typeof paths.projects>[0], now: number): re
       </Link>
     ),
   },
-  { id: "number", head: "No.", value: (project) => project.number || null, className: "text-ink-2" },
+  { id: "number", head: "No.", value: (project) => project.number || null, className: "whitespace-nowrap text-ink-2" },
   { id: "client", head: "Client", value: (project) => project.clientName },
   {
     id: "due",

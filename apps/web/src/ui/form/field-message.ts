@@ -18,6 +18,7 @@ function plainWords(allowed: string): string {
     const words = { "<=": "at most", ">=": "at least", "<": "less than", ">": "more than" }[sign] ?? sign;
     return `${words} ${bound}${unit}`;
   }
+  if (/^an id that starts with/.test(allowed)) return "one of the list";
   if (/^Invalid option/.test(allowed)) return "one of the choices";
   if (/^Invalid ISO date/.test(allowed)) return "a date";
   if (/^Invalid/.test(allowed)) return "a value";

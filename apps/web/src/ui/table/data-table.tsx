@@ -265,7 +265,14 @@ function BodyRow<Row>({
       {columns.map((column, index) => {
         const content = column.cell ? column.cell(row) : column.value(row);
         return (
-          <td key={column.id} className={classNames(column.align && "num whitespace-nowrap", column.className)}>
+          <td
+            key={column.id}
+            className={classNames(
+              index === 0 ? "min-w-36" : "max-md:whitespace-nowrap",
+              column.align && "num whitespace-nowrap",
+              column.className,
+            )}
+          >
             {index === 0 && onOpen ? (
               <button
                 type="button"
