@@ -12,6 +12,15 @@ export async function mailsTo(mailUrl: string, address: string): Promise<readonl
   return ((await response.json()) as { items: readonly CaughtMail[] }).items;
 }
 
+/** To whom the newest mail went whose subject begins so. */
+export async function recipientOf(mailUrl: string, subject: string): Promise<string> {
+  const response = await fetch(`${mailUrl}/api/v2/search?kind=containing&query=${encodeURIComponent(subject)}`);
+  const { items } = (await response.json()) as { items: readonly CaughtMail[] };
+  const to = items.find((mail) => mail.Content.Headers["Subject"]?.[0]?.startsWith(subject))?.To[0];
+  if (!to) throw new Error(`no mail begins with ${subject}`);
+  return `${to.Mailbox}@${to.Domain}`;
+}
+
 /** Waits for a mail to an address whose plain text holds a link to this place; answers the link. */
 export async function linkInMail(
   mailUrl: string,

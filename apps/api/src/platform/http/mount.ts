@@ -112,8 +112,8 @@ async function answer(
         )
       : await work();
 
-  if (row.answers === "file") return sendFile(response, result as FileAnswer);
   if (deps.config.environment !== "production") response.set("x-db-queries", String(queriesSoFar()));
+  if (row.answers === "file") return sendFile(response, result as FileAnswer);
   response.set("cache-control", "no-store");
   if (row.response.type === "undefined") return void response.status(204).end();
   // Answers pass through their contract: what it does not name never leaves.
