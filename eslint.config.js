@@ -3,7 +3,7 @@ import reactHooks from "eslint-plugin-react-hooks";
 import tseslint from "typescript-eslint";
 
 export default tseslint.config(
-  { ignores: ["**/dist/**", "**/coverage/**", ".cache/**", ".data/**", ".screens/**", "**/generated/**"] },
+  { ignores: ["**/dist/**", "**/coverage/**", ".cache/**", ".data/**", ".screens/**", "**/generated/**", "**/*.d.mts"] },
   js.configs.recommended,
   ...tseslint.configs.recommendedTypeChecked,
   {

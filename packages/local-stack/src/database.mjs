@@ -19,7 +19,7 @@ const THROWAWAY = [
 ];
 
 /** Starts MariaDB on `port` with its data in `folder`, made when it is not there. Answers the child once it greets. */
-export async function startDatabase({ folder, port, logFile, throwaway = false }) {
+export async function startDatabase({ folder, port, logFile, throwaway = false, onStarted = () => {} }) {
   const data = join(folder, "data");
   // A socket's path has room for 107 characters; the data folder may be deeper than that.
   const socket = join("/tmp", `cleatwork-${process.pid}-${port}.sock`);
@@ -56,6 +56,7 @@ export async function startDatabase({ folder, port, logFile, throwaway = false }
     ],
     { logFile },
   );
+  onStarted(child);
   const up = await until(() => answers(port, { greets: true }), {
     timeout_ms: 60_000,
     failed: async () => !child.isRunning(),

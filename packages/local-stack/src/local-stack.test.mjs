@@ -1,4 +1,4 @@
-import { mkdtempSync, rmSync } from "node:fs";
+import { mkdtempSync, rmSync, writeFileSync } from "node:fs";
 import { createServer } from "node:net";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
@@ -6,7 +6,8 @@ import nodemailer from "nodemailer";
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import { isAlive, startChild, stopChild } from "./children.mjs";
 import { missing } from "./debian.mjs";
-import { readLock, releaseLock, takeLock } from "./lock.mjs";
+import { bornAt, endLeftovers, writeDown } from "./leftovers.mjs";
+import { readLock, releaseLock, takeLock, updateLock } from "./lock.mjs";
 import { startMailCatcher } from "./mail/catcher.mjs";
 import { freePort, LOOPBACK } from "./ports.mjs";
 import { readState, writeState } from "./state.mjs";
@@ -38,6 +39,12 @@ describe("lock", () => {
     expect(takeLock(folder, {})).toMatchObject({ pid: process.pid, address: "http://here.example" });
   });
 
+  it("keeps its holder while it says more", () => {
+    takeLock(folder, {});
+    updateLock(folder, { address: "http://there.example" });
+    expect(readLock(folder)).toEqual({ pid: process.pid, address: "http://there.example" });
+  });
+
   it("is taken over from a process that is gone", async () => {
     const child = startChild("gone", process.execPath, ["-e", ""], { logFile: join(folder, "log") });
     await child.exited;
@@ -46,6 +53,29 @@ describe("lock", () => {
     expect(takeLock(folder, {})).toBeNull();
     releaseLock(folder);
     expect(readLock(folder)).toBeNull();
+  });
+});
+
+describe("leftovers", () => {
+  const idle = (name) =>
+    startChild(name, process.execPath, ["-e", "setInterval(() => {}, 1000)"], { logFile: join(folder, "log") });
+
+  it("of a start-up that was ended without warning are ended by the next one", async () => {
+    const child = idle("left");
+    writeDown(folder, child);
+    expect(await endLeftovers(folder)).toEqual(["left"]);
+    await child.exited;
+    expect(isAlive(child.pid)).toBe(false);
+    expect(await endLeftovers(folder)).toEqual([]);
+  });
+
+  it("do not include a process that has got the same pid since", async () => {
+    const child = idle("stranger");
+    const record = [{ name: "left", pid: child.pid, born: String(Number(bornAt(child.pid)) - 1) }];
+    writeFileSync(join(folder, "children.json"), JSON.stringify(record));
+    expect(await endLeftovers(folder)).toEqual([]);
+    expect(child.isRunning()).toBe(true);
+    await stopChild(child);
   });
 });
 

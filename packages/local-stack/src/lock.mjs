@@ -1,5 +1,5 @@
 /** One stack for one data folder: the lock names the process that holds it, and is worthless once that process is gone. */
-import { closeSync, mkdirSync, openSync, readFileSync, rmSync, writeSync } from "node:fs";
+import { closeSync, mkdirSync, openSync, readFileSync, renameSync, rmSync, writeFileSync, writeSync } from "node:fs";
 import { join } from "node:path";
 import { isAlive } from "./children.mjs";
 
@@ -31,6 +31,13 @@ export function takeLock(folder, content) {
     }
   }
   return readLock(folder);
+}
+
+/** Says more in a lock that we hold; it is never free in between. */
+export function updateLock(folder, content) {
+  const temporary = `${fileOf(folder)}.new`;
+  writeFileSync(temporary, JSON.stringify({ pid: process.pid, ...content }), { mode: 0o600 });
+  renameSync(temporary, fileOf(folder));
 }
 
 export const releaseLock = (folder) => rmSync(fileOf(folder), { force: true });

@@ -2,12 +2,12 @@
  * The whole product on this machine: MariaDB, migrations, API, worker, mail catcher. `npm start`, the browser tests, the
  * fault tests, the bench and the screens all start it here.
  */
-import { mkdirSync, mkdtempSync, rmSync } from "node:fs";
+import { existsSync, mkdirSync, mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
-import { existsSync } from "node:fs";
 import { capture, pause, startChild, stopChild } from "./children.mjs";
 import { databaseUrl, startDatabase } from "./database.mjs";
+import { endLeftovers, forgetChildren, writeDown } from "./leftovers.mjs";
 import { inRoot } from "./paths.mjs";
 import { freePort, LOOPBACK, until } from "./ports.mjs";
 import { readState, writeState } from "./state.mjs";
@@ -36,6 +36,7 @@ export async function startWholeStack({
   onDeath = () => {},
 }) {
   mkdirSync(folder, { recursive: true });
+  await endLeftovers(folder);
   const state = readState(folder);
   const taken = new Set();
   const usual = throwaway
@@ -69,7 +70,13 @@ export async function startWholeStack({
   };
   const children = {};
   const expected = new Set();
+  let stopping = false;
+  /** Once everything is being stopped, nothing may start any more: it would outlive us. */
+  const unlessStopping = () => {
+    if (stopping) throw new Stop("Everything is being stopped.");
+  };
   const watchOver = (child) => {
+    writeDown(folder, child);
     void child.exited.then(() => {
       if (!expected.has(child)) onDeath(child);
     });
@@ -84,16 +91,17 @@ export async function startWholeStack({
   };
 
   const startDatabaseChild = async () => {
-    children.database = watchOver(
-      await startDatabase({
-        folder: join(folder, "mariadb"),
-        port: ports.database,
-        logFile: logFile("mariadb"),
-        throwaway,
-      }),
-    );
+    unlessStopping();
+    await startDatabase({
+      folder: join(folder, "mariadb"),
+      port: ports.database,
+      logFile: logFile("mariadb"),
+      throwaway,
+      onStarted: (child) => (children.database = watchOver(child)),
+    });
   };
   const startMail = async () => {
+    unlessStopping();
     children.mail = watchOver(
       startChild("mail catcher", process.execPath, [inRoot("packages/local-stack/mail-catcher.mjs")], {
         env: { SMTP_PORT: String(ports.smtp), HTTP_PORT: String(ports.mail), MAIL_FOLDER: join(folder, "mail") },
@@ -109,6 +117,7 @@ export async function startWholeStack({
     `--role=${role}`,
   ];
   const startApi = async () => {
+    unlessStopping();
     children.api = watchOver(
       startChild("API", process.execPath, node("api"), {
         env: { ...env, PROCESS_ROLE: "api" },
@@ -118,6 +127,7 @@ export async function startWholeStack({
     await ready(children.api, `${publicUrl}/readyz`);
   };
   const startWorker = () => {
+    unlessStopping();
     children.worker = watchOver(
       startChild("worker", process.execPath, node("worker"), {
         env: { ...env, PROCESS_ROLE: "worker" },
@@ -127,9 +137,11 @@ export async function startWholeStack({
   };
 
   const stop = async () => {
+    stopping = true;
     await Promise.all([end("api"), end("worker")]);
     await end("mail");
     await end("database", { grace_ms: 30_000 });
+    forgetChildren(folder);
     if (throwaway) rmSync(folder, { recursive: true, force: true });
   };
 
@@ -157,6 +169,8 @@ export async function startWholeStack({
     stop,
     /** For faults: ends one part, by default without warning; `start…` brings it back on the same port. */
     kill: (name, signal = "SIGKILL") => end(name, { signal, grace_ms: 5000 }),
+    isStopping: () => stopping,
+    startDatabase: startDatabaseChild,
     startApi,
     startMail,
     startWorker,

@@ -1,5 +1,6 @@
 /** `npm run check`: types, lint, boundaries, unused code, formatting. All of them, then one summary. */
 import { spawn } from "node:child_process";
+import { performance } from "node:perf_hooks";
 import { ensurePackages } from "../packages.mjs";
 import { inRoot, root } from "../paths.mjs";
 import { say } from "../say.mjs";

@@ -1,8 +1,8 @@
 /** `npm start` and `npm run dev`: everything on this machine, until Ctrl-C. */
 import { join } from "node:path";
-import { startChild, stopChild } from "../children.mjs";
+import { pause, startChild, stopChild } from "../children.mjs";
 import { DATABASE, ensureDebian } from "../debian.mjs";
-import { releaseLock, takeLock } from "../lock.mjs";
+import { releaseLock, takeLock, updateLock } from "../lock.mjs";
 import { ensurePackages } from "../packages.mjs";
 import { dataFolder, inRoot } from "../paths.mjs";
 import { freePort, LOOPBACK } from "../ports.mjs";
@@ -11,8 +11,9 @@ import { startWholeStack } from "../stack.mjs";
 import { readState, writeState } from "../state.mjs";
 import { buildWebIfChanged } from "../web-build.mjs";
 
-/** A part that dies is started again this often, then left, so that it cannot spin. */
+/** A part that dies is started again this often within the time, then left, so that it cannot spin. */
 const RESTARTS = 5;
+const WITHIN_MS = 10 * 60_000;
 
 export async function start({ watch }) {
   const holder = takeLock(dataFolder, {});
@@ -23,6 +24,8 @@ export async function start({ watch }) {
     return 0;
   }
   const stopped = stopSignal();
+  let asked = false;
+  void stopped.then(() => (asked = true));
   let stack = null;
   let vite = null;
   try {
@@ -55,11 +58,15 @@ export async function start({ watch }) {
         },
       );
     }
-    releaseLock(dataFolder);
-    takeLock(dataFolder, { address });
+    updateLock(dataFolder, { address });
     announce(address, stack);
     await stopped;
     say("\nStopping");
+  } catch (error) {
+    // Ctrl-C reaches what we wait for as well: that it failed is then no news.
+    await pause(50);
+    if (!asked) throw error;
+    say("\nStopped before everything was there.");
   } finally {
     if (vite) await stopChild(vite);
     if (stack) await stack.stop();
@@ -88,15 +95,32 @@ function stopSignal() {
 }
 
 function restarter(current) {
-  const counts = new Map();
+  const deaths = new Map();
   return (child) => {
-    const count = (counts.get(child.name) ?? 0) + 1;
-    counts.set(child.name, count);
+    if (current()?.isStopping()) return;
+    const recent = [...(deaths.get(child.name) ?? []), Date.now()].filter((at) => Date.now() - at < WITHIN_MS);
+    deaths.set(child.name, recent);
     say(`The ${child.name} ended by itself. Its last words:\n${child.lastLines()}`);
-    const stack = current();
-    const again =
-      stack && { API: stack.startApi, worker: stack.startWorker, "mail catcher": stack.startMail }[child.name];
-    if (!again || count > RESTARTS) return;
-    setTimeout(() => void Promise.resolve(again()).catch((error) => say(error.message)), 500 * 2 ** count);
+    if (recent.length > RESTARTS) {
+      say(`The ${child.name} has ended ${recent.length} times and is left. Stop with Ctrl-C and start again.`);
+      return;
+    }
+    setTimeout(() => void startAgain(current(), child.name), 250 * 2 ** recent.length);
   };
+}
+
+async function startAgain(stack, name) {
+  if (!stack || stack.isStopping()) return;
+  const parts = {
+    API: stack.startApi,
+    worker: stack.startWorker,
+    "mail catcher": stack.startMail,
+    MariaDB: stack.startDatabase,
+  };
+  try {
+    await parts[name]();
+    say(`The ${name} runs again.`);
+  } catch (error) {
+    if (!stack.isStopping()) say(error.message);
+  }
 }
