@@ -7,7 +7,7 @@ export default defineConfig({
   workers: 1,
   fullyParallel: false,
   retries: 0,
-  timeout: 240_000,
+  timeout: 480_000,
   expect: { timeout: 20_000 },
   reporter: [
     ["list"],

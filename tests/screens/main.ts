@@ -4,7 +4,7 @@ import { startWholeStack, throwawayFolder, type SignIn } from "@cleatwork/local-
 import { mkdirSync } from "node:fs";
 import { join } from "node:path";
 import { chromiumOptions } from "../support/chromium.ts";
-import { linkInMail, mailsTo } from "../support/inbox.ts";
+import { linkInMail, type CaughtMail } from "../support/inbox.ts";
 
 const out = join(import.meta.dirname, "..", "..", ".screens");
 const DESK = { width: 1440, height: 900 };
@@ -117,7 +117,7 @@ async function projectOf(page: Page, company: string, name: string): Promise<str
 
 async function clientWithLink(): Promise<string> {
   const response = await fetch(`${mailUrl}/api/v2/search?kind=containing&query=${encodeURIComponent("Quill Street")}`);
-  const { items } = (await response.json()) as Awaited<{ items: Awaited<ReturnType<typeof mailsTo>> }>;
+  const { items } = (await response.json()) as { items: readonly CaughtMail[] };
   const to = items.find((mail) => mail.Content.Headers["Subject"]?.[0]?.startsWith("Quote"))?.To[0];
   if (!to) throw new Error("the demo mailed no open quote");
   return `${to.Mailbox}@${to.Domain}`;

@@ -1,5 +1,5 @@
 /** Reads the mail catcher as a person reads an inbox. */
-interface CaughtMail {
+export interface CaughtMail {
   readonly ID: string;
   readonly To: readonly { readonly Mailbox: string; readonly Domain: string }[];
   readonly Content: { readonly Headers: Readonly<Record<string, readonly string[]>>; readonly Body: string };
@@ -7,7 +7,7 @@ interface CaughtMail {
 }
 
 /** Mails to an address, newest first. */
-export async function mailsTo(mailUrl: string, address: string): Promise<readonly CaughtMail[]> {
+async function mailsTo(mailUrl: string, address: string): Promise<readonly CaughtMail[]> {
   const response = await fetch(`${mailUrl}/api/v2/search?kind=to&query=${encodeURIComponent(address)}&limit=50`);
   return ((await response.json()) as { items: readonly CaughtMail[] }).items;
 }

@@ -2,7 +2,7 @@ import type { QueryClient } from "@tanstack/react-query";
 import { useQuery } from "@tanstack/react-query";
 import { lazy, Suspense, useEffect, useState } from "react";
 import { useSearchParams, type LoaderFunctionArgs } from "react-router-dom";
-import { find, listOf } from "@cleatwork/layout";
+import { listOf } from "@cleatwork/layout";
 import { GradeLineDock } from "../features/air/index.ts";
 import { HEATS, type Heat } from "../features/board/index.ts";
 import { Inspector } from "../features/inspector/index.ts";
@@ -27,13 +27,13 @@ export const loader =
 
 /** The layout, as a plan or as a table: the same records, the same selection. */
 export function Component() {
-  const { layout, systems, mayEdit, company, project, selection } = useWorkspace();
+  const { layout, systems, mayEdit, company, project } = useWorkspace();
   const [search, setSearch] = useSearchParams();
   const { system, choose } = useChosenSystem();
   const { data: drawings } = useQuery(workspaceQueries.drawings(company.slug, project.id));
   const [dialog, setDialog] = useState<"system" | "new-system" | "level" | "new-level" | null>(null);
   useWorkspaceKeys();
-  useSharedPlace();
+  useSharedPlace(search.get("at"));
 
   const levels = listOf(layout, "level").sort((a, b) => a.elevation_m - b.elevation_m);
   const level = levels.find(({ id }) => id === search.get("level")) ?? levels[0] ?? null;
@@ -180,15 +180,14 @@ export function Component() {
       )}
     </main>
   );
+}
 
-  /** `?at=` names a duct or a node to go to: a link from a finding, or from a colleague. */
-  function useSharedPlace() {
-    const at = search.get("at");
-    const { select } = selection;
-    useEffect(() => {
-      if (at && (find(layout, "segment", at) ?? find(layout, "node", at))) select(at);
-      // Only when the address names another place, not whenever the layout changes.
-      // eslint-disable-next-line react-hooks/exhaustive-deps
-    }, [at, select]);
-  }
+/** `?at=` names a duct or a node to go to: a link from a finding, or from a colleague. */
+function useSharedPlace(at: string | null) {
+  const { record, selection } = useWorkspace();
+  const { select } = selection;
+  const isThere = record(at) !== null;
+  useEffect(() => {
+    if (at !== null && isThere) select(at);
+  }, [at, isThere, select]);
 }

@@ -28,7 +28,7 @@ export function GradeLineDock({ systemId }: { systemId: string }) {
         <p className="text-help text-ink-3">Pressure left, {formatPressure(pascals(0), units).unit}</p>
         <div className="mt-1">
           {spare < -0.5 ? (
-            <SeverityText severity="stop">short {formatPressure(pascals(-spare), units).value}</SeverityText>
+            <SeverityText severity="stop">short {formatPressure(pascals(0 - spare), units).value}</SeverityText>
           ) : (
             <SeverityText severity="good">spare {formatPressure(spare, units).value}</SeverityText>
           )}

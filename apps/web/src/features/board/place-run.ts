@@ -1,5 +1,12 @@
 /** What the run tool asks for, as one edit: a tap splits the duct it stands on first. */
-import { parseAirflow, parseLength, parseSize, inchesOfWater, type Section } from "@cleatwork/calc";
+import {
+  parseAirflow,
+  parseLength,
+  parseSize,
+  inchesOfWater,
+  type CubicMetersPerSecond,
+  type Section,
+} from "@cleatwork/calc";
 import type { ChangeSet, UnitSystem } from "@cleatwork/contracts";
 import {
   applyChangeSet,
@@ -73,14 +80,9 @@ type ReadDraft =
       readonly ok: true;
       readonly length_m: number | null;
       readonly section: Section | null;
-      readonly airflow_m3s: ReturnType<typeof airflowOf>;
+      readonly airflow_m3s: CubicMetersPerSecond | null;
     }
   | { readonly ok: false; readonly message: string };
-
-const airflowOf = (text: string, units: UnitSystem) => {
-  const parsed = parseAirflow(text, units);
-  return parsed.ok ? parsed.value : null;
-};
 
 /** What is typed beside the pointer; empty leaves it to the pointer and to sizing. */
 export function readDraft(draft: RunDraft, units: UnitSystem): ReadDraft {

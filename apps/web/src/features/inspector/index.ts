@@ -1,3 +1,3 @@
 /** The door of the inspector. */
 export { Inspector } from "./inspector.tsx";
-export { accessoryNames, fittingNames } from "./words.ts";
+export { fittingNames } from "./words.ts";

@@ -59,12 +59,12 @@ export function SegmentResults({ segment }: { segment: SegmentRecord }) {
             <Row
               key={position}
               label={fittingNames[fitting.type]}
-              shown={formatPressureChange(pascals(-fitting.loss_pa), units)}
+              shown={formatPressureChange(pascals(0 - fitting.loss_pa), units)}
               aside={`${decimal(fitting.lossCoefficient, 2)} × ${formatPressure(fitting.velocityPressure_pa, units).value}`}
               title={fitting.source}
             />
           ))}
-          <Row label="Straight duct" shown={formatPressureChange(pascals(-solved.frictionLoss_pa), units)} />
+          <Row label="Straight duct" shown={formatPressureChange(pascals(0 - solved.frictionLoss_pa), units)} />
           <Row label="Left on leaving" shown={formatPressure(solved.pressureLeftLeaving_pa, units)} />
         </dl>
       </section>

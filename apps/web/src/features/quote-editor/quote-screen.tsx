@@ -127,22 +127,22 @@ function useDraftSaving(quote: Quote, saveDraft: ReturnType<typeof useQuoteActio
   }, [quote.version]);
 
   const flush = useCallback(async () => {
-    if (busy.current || !waiting.current) return;
+    if (busy.current) return;
     busy.current = true;
-    const draft = waiting.current;
-    waiting.current = null;
-    setSaved("Saving");
-    try {
-      const after = await saveDraft.mutateAsync({ quoteId: quote.id, version: version.current, draft });
-      version.current = after.version;
-      setSaved("Saved");
-    } catch (error) {
-      // What was typed stays in the form; the next key tries again.
-      setSaved(error instanceof Error ? error.message : "Not saved");
-    } finally {
-      busy.current = false;
+    // What is typed while one save is under way is saved by the next turn.
+    for (let draft = waiting.current; draft; draft = waiting.current) {
+      waiting.current = null;
+      setSaved("Saving");
+      try {
+        const after = await saveDraft.mutateAsync({ quoteId: quote.id, version: version.current, draft });
+        version.current = after.version;
+        setSaved("Saved");
+      } catch (error) {
+        // What was typed stays in the form; the next key tries again.
+        setSaved(error instanceof Error ? error.message : "Not saved");
+      }
     }
-    if (waiting.current) void flush();
+    busy.current = false;
   }, [quote.id, saveDraft]);
 
   const save = useCallback(

@@ -41,7 +41,7 @@ export function Tally() {
             <span className="text-ink-2">of {formatPressure(facts.pressure.available_pa, units).text}</span>
             {short ? (
               <SeverityText severity="stop">
-                short {formatPressure(pascals(-facts.pressure.spare_pa), units).value}
+                short {formatPressure(pascals(0 - facts.pressure.spare_pa), units).value}
               </SeverityText>
             ) : (
               <SeverityText severity="good">spare {formatPressure(facts.pressure.spare_pa, units).value}</SeverityText>

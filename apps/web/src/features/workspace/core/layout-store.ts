@@ -2,13 +2,7 @@
  * The layout while someone works on it: applied at once, kept durably, sent in batches, undone and redone. No React here;
  * the screen subscribes.
  */
-import type {
-  ChangeSet,
-  LayoutResponse,
-  LayoutRecord,
-  SaveLayoutRequest,
-  SaveLayoutResponse,
-} from "@cleatwork/contracts";
+import type { ChangeSet, LayoutResponse, SaveLayoutRequest, SaveLayoutResponse } from "@cleatwork/contracts";
 import { applyChangeSet, checkLayout, createLayout, invert, type CommandResult, type Layout } from "@cleatwork/layout";
 import type { EditHistory, EditShelf, KeptBatch } from "./saved-edits.ts";
 
@@ -286,6 +280,3 @@ export class LayoutStore {
     for (const listener of this.listeners) listener();
   }
 }
-
-/** Every record, in one array, for those who want a list. */
-export const recordList = (layout: Layout): LayoutRecord[] => [...layout.records.values()];
