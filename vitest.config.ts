@@ -36,6 +36,8 @@ export default defineConfig({
           hookTimeout: 60_000,
           pool: "forks",
           maxWorkers: 2,
+          // After the others: they may use every core, these share one database server.
+          sequence: { groupOrder: 1 },
         },
       },
     ],

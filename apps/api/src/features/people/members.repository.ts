@@ -10,20 +10,43 @@ interface MemberRow {
   joined_at: Date;
   last_seen_at: Date | null;
 }
-interface InvitationRow {
-  id: InvitationId;
+interface ListRow<Id> {
+  id: Id;
+  name: string;
   email: string;
   role: Role;
-  invited_by: string;
-  created_at: Date;
-  expires_at: Date;
+  from_instant: Date;
 }
+type PersonRow = ListRow<PersonId> & { to_instant: Date | null };
+/** The name is of the one who invited. */
+type InvitationRow = ListRow<InvitationId> & { to_instant: Date };
+type PersonOrInvitationRow = PersonRow | InvitationRow;
+
+const isInvitation = (row: PersonOrInvitationRow): row is InvitationRow => row.id.startsWith("inv_");
+const isMember = (row: PersonOrInvitationRow): row is PersonRow => !isInvitation(row);
 
 /** People and invitations of one company. */
 export const membersRepository = (db: TenantDb) => ({
-  async list() {
-    const rows = (await members(db).orderBy("p.name")) as MemberRow[];
-    return rows.map(memberFromRow);
+  /** Both lists of the people page in one round trip; an id says which of the two a row belongs to. */
+  async listPeopleAndInvitations() {
+    const rows = (await db
+      .from("memberships", "m")
+      .join("people as p", "p.id", "m.person_id")
+      .select({ id: "p.id", name: "p.name", email: "p.email", role: "m.role" })
+      .select({ from_instant: "m.joined_at", to_instant: "m.last_seen_at" })
+      .unionAll(
+        db
+          .from("invitations", "i")
+          .join("people as by", "by.id", "i.invited_by")
+          .whereNull("i.accepted_at")
+          .whereNull("i.revoked_at")
+          .where("i.expires_at", ">", db.now())
+          .select({ id: "i.id", name: "by.name", email: "i.email", role: "i.role" })
+          .select({ from_instant: "i.created_at", to_instant: "i.expires_at" }),
+      )) as PersonOrInvitationRow[];
+    const invited = rows.filter(isInvitation).sort((a, b) => b.from_instant.getTime() - a.from_instant.getTime());
+    const joined = rows.filter(isMember).sort((a, b) => a.name.localeCompare(b.name, "en"));
+    return { people: joined.map(personFromRow), invitations: invited.map(invitationFromRow) };
   },
 
   async find(personId: PersonId) {
@@ -43,27 +66,6 @@ export const membersRepository = (db: TenantDb) => ({
 
   async remove(personId: PersonId): Promise<void> {
     await db.from("memberships").where({ person_id: personId }).delete();
-  },
-
-  async listInvitations() {
-    const rows = (await db
-      .from("invitations", "i")
-      .join("people as p", "p.id", "i.invited_by")
-      .whereNull("i.accepted_at")
-      .whereNull("i.revoked_at")
-      .where("i.expires_at", ">", db.now())
-      .orderBy("i.created_at", "desc")
-      .select("i.id", "i.email", "i.role", "i.created_at", "i.expires_at", {
-        invited_by: "p.name",
-      })) as InvitationRow[];
-    return rows.map((row) => ({
-      id: row.id,
-      email: row.email,
-      role: row.role,
-      invitedBy: row.invited_by,
-      createdAt: instantFromColumn(row.created_at),
-      expiresAt: instantFromColumn(row.expires_at),
-    }));
   },
 
   async isMember(email: string): Promise<boolean> {
@@ -130,4 +132,17 @@ const memberFromRow = (row: MemberRow) => ({
   role: row.role,
   joinedAt: instantFromColumn(row.joined_at),
   lastSeenAt: instantOrNull(row.last_seen_at),
+});
+
+const personFromRow = ({ from_instant, to_instant, ...row }: PersonRow) => ({
+  ...row,
+  joinedAt: instantFromColumn(from_instant),
+  lastSeenAt: instantOrNull(to_instant),
+});
+
+const invitationFromRow = ({ name, from_instant, to_instant, ...row }: InvitationRow) => ({
+  ...row,
+  invitedBy: name,
+  createdAt: instantFromColumn(from_instant),
+  expiresAt: instantFromColumn(to_instant),
 });

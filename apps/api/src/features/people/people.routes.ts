@@ -56,11 +56,7 @@ export const peopleHandlers = {
     if (!person.emailVerified) await resendVerification(deps, person);
     return {};
   },
-  listPeople: async ({ tenant }) => {
-    const members = membersRepository(tenant);
-    const [people, invitations] = await Promise.all([members.list(), members.listInvitations()]);
-    return { people, invitations };
-  },
+  listPeople: ({ tenant }) => membersRepository(tenant).listPeopleAndInvitations(),
   invitePerson: ({ tenant, body, person, company, deps }) => invitePerson(tenant, body, person, company.name, deps),
   revokeInvitation: ({ tenant, params, person }) => revokeInvitation(tenant, params.invitationId, person),
   changeRole: ({ tenant, params, body, person }) => changeRole(tenant, params.personId, body.role, person),
