@@ -12,6 +12,7 @@ export function slugFrom(companyName: string, attempt: number): string {
   const base =
     companyName
       .normalize("NFKD")
+      .replace(/\p{Mark}+/gu, "")
       .toLowerCase()
       .replace(/[^a-z0-9]+/g, "-")
       .slice(0, 40)
