@@ -12,31 +12,19 @@ import {
   pascals,
 } from "../quantity.ts";
 
-const ZONES_ON_A_FLOOR = 8;
-const TAPS_ON_A_ZONE = 6;
+const ZONES_ON_A_FLOOR = 12;
+const TAPS_ON_A_ZONE = 8;
 
 /**
  * A riser with a floor at each landing; on each floor a main with zone branches to one side, on each branch taps to outlets.
- * Sizes are typed, of all four shapes; a runout in three is flexible.
+ * All four shapes; a runout in three is flexible. Sizes are typed, or all left to the rule.
  */
-export function benchSystem(segmentCount: number): AirSystem {
+export function benchSystem(segmentCount: number, sizes: "typed" | "by-rule" = "typed"): AirSystem {
   const nodes: AirNode[] = [];
   const segments: AirSegment[] = [];
 
-  const addNode = (role: AirNode["role"], x: number, y: number, z: number, airflow: number | null): AirNode => {
-    const node: AirNode = {
-      id: `nod_${nodes.length}`,
-      role,
-      tag: role === "outlet" ? `D-${nodes.length}` : "",
-      levelId: "lvl_1",
-      x_m: meters(x),
-      y_m: meters(y),
-      elevation_m: meters(z),
-      airflow_m3s: airflow === null ? null : cubicFeetPerMinute(airflow),
-      requiredPressure_pa: role === "outlet" ? inchesOfWater(0.08) : null,
-      deviceKey: null,
-      spaceName: "",
-    };
+  const addNode = (role: AirNode["role"], x: number, y: number, z: number, airflow_cfm: number | null): AirNode => {
+    const node = aNode(nodes.length, role, [x, y, z], airflow_cfm);
     nodes.push(node);
     return node;
   };
@@ -47,7 +35,7 @@ export function benchSystem(segmentCount: number): AirSystem {
       fromNodeId: from.id,
       toNodeId: to.id,
       ductClass,
-      section,
+      section: sizes === "typed" ? section : null,
       length_m: null,
       flexible,
       fitting: null,
@@ -59,10 +47,7 @@ export function benchSystem(segmentCount: number): AirSystem {
   const addOutlet = (from: AirNode, x: number, y: number, z: number) => {
     const turn = segments.length % 3;
     const airflow = 120 + 20 * (segments.length % 7);
-    const section: Section =
-      turn === 1
-        ? { shape: "annular", outerDiameter_m: inches(12), innerDiameter_m: inches(4) }
-        : { shape: "round", diameter_m: inches(8 + (segments.length % 2)) };
+    const section = turn === 1 ? annularOf(12, 4) : roundOf(8 + (segments.length % 2));
     addSegment(from, addNode("outlet", x, y, z, airflow), "runout", section, turn === 0);
   };
 
@@ -73,15 +58,12 @@ export function benchSystem(segmentCount: number): AirSystem {
     let main = riser;
     for (let zone = 1; zone <= ZONES_ON_A_FLOOR && segments.length + 2 <= segmentCount; zone++) {
       const x = 6 * zone;
-      const width = 48 - 4 * (zone >> 1);
-      main = addSegment(main, addNode("junction", x, 0, height, null), "main", rectangleOf(width, 20));
+      main = addSegment(main, addNode("junction", x, 0, height, null), "main", rectangleOf(54 - 4 * (zone >> 1), 20));
       let branch = main;
       for (let tap = 1; tap <= TAPS_ON_A_ZONE && segments.length + 2 <= segmentCount; tap++) {
         const y = 4 * tap;
-        const section: Section =
-          zone % 2 === 0
-            ? rectangleOf(24 - 2 * (tap >> 1), 12)
-            : { shape: "flat-oval", width_m: inches(26 - 2 * tap), height_m: inches(10) };
+        const width = 26 - 2 * (tap >> 1);
+        const section = zone % 2 === 0 ? rectangleOf(width, 12) : flatOvalOf(width, 10);
         branch = addSegment(branch, addNode("junction", x, y, height, null), "branch", section);
         addOutlet(branch, x + 2, y, height);
       }
@@ -93,22 +75,53 @@ export function benchSystem(segmentCount: number): AirSystem {
   return { ...benchFrame, nodes: closed(nodes, segments), segments };
 }
 
+function aNode(
+  index: number,
+  role: AirNode["role"],
+  [x, y, z]: readonly [number, number, number],
+  airflow_cfm: number | null,
+): AirNode {
+  return {
+    id: `nod_${index}`,
+    role,
+    tag: role === "outlet" ? `D-${index}` : "",
+    levelId: "lvl_1",
+    x_m: meters(x),
+    y_m: meters(y),
+    elevation_m: meters(z),
+    airflow_m3s: airflow_cfm === null ? null : cubicFeetPerMinute(airflow_cfm),
+    requiredPressure_pa: role === "outlet" ? inchesOfWater(0.08) : null,
+    deviceKey: null,
+    spaceName: "",
+  };
+}
+
+/** Where the count cut a run short, its last junction becomes an outlet. */
+function closed(nodes: readonly AirNode[], segments: readonly AirSegment[]): AirNode[] {
+  const tails = new Set(segments.map(({ fromNodeId }) => fromNodeId));
+  return nodes.map((node, index) =>
+    node.role === "junction" && !tails.has(node.id)
+      ? aNode(index, "outlet", [node.x_m, node.y_m, node.elevation_m], 200)
+      : node,
+  );
+}
+
 const roundOf = (diameter_in: number): Section => ({ shape: "round", diameter_m: inches(diameter_in) });
 const rectangleOf = (width_in: number, height_in: number): Section => ({
   shape: "rectangular",
   width_m: inches(width_in),
   height_m: inches(height_in),
 });
-
-/** Where the count cut a run short, its last junction becomes an outlet. */
-function closed(nodes: AirNode[], segments: readonly AirSegment[]): AirNode[] {
-  const tails = new Set(segments.map(({ fromNodeId }) => fromNodeId));
-  return nodes.map((node) =>
-    node.role === "junction" && !tails.has(node.id)
-      ? { ...node, role: "outlet", airflow_m3s: cubicFeetPerMinute(200), requiredPressure_pa: inchesOfWater(0.08) }
-      : node,
-  );
-}
+const flatOvalOf = (width_in: number, height_in: number): Section => ({
+  shape: "flat-oval",
+  width_m: inches(width_in),
+  height_m: inches(height_in),
+});
+const annularOf = (outer_in: number, inner_in: number): Section => ({
+  shape: "annular",
+  outerDiameter_m: inches(outer_in),
+  innerDiameter_m: inches(inner_in),
+});
 
 const benchFrame: Omit<AirSystem, "nodes" | "segments"> = {
   schema: "cleatwork.air-system/1",

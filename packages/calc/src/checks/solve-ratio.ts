@@ -6,46 +6,63 @@ import { benchSystem } from "./many-segments.ts";
 
 export interface SolveRatio {
   readonly segmentCount: number;
+  /** Medians. */
   readonly colebrook_ms: number;
   readonly solveTyped_ms: number;
   readonly solveByRule_ms: number;
   readonly typedOverColebrook: number;
   readonly byRuleOverColebrook: number;
+  /** The same ratios of the fastest tenth of each: what is left when the machine has other work to do. */
+  readonly undisturbed: { readonly typedOverColebrook: number; readonly byRuleOverColebrook: number };
 }
 
-/** Medians of `rounds` timings after `warmUp` untimed ones, the three kinds of work taking turns. */
-export function measureSolveRatio(options: {
-  segmentCount: number;
-  warmUp: number;
-  rounds: number;
+interface Turns {
+  readonly segmentCount: number;
+  /** Untimed turns first, so that the engine has compiled what it times. */
+  readonly warmUp: number;
+  readonly rounds: number;
   /** Milliseconds, such as `performance.now`. */
-  now: () => number;
-}): SolveRatio {
-  const { segmentCount, warmUp, rounds, now } = options;
-  const typed = benchSystem(segmentCount);
-  const byRule: AirSystem = { ...typed, segments: typed.segments.map((segment) => ({ ...segment, section: null })) };
-  const flows = frictionInputs(typed);
+  readonly now: () => number;
+}
 
-  const work = [() => evaluateBare(flows), () => solveOnce(typed), () => solveOnce(byRule)];
-  const timings = work.map((): number[] => []);
-  for (let round = 0; round < warmUp + rounds; round++) {
-    work.forEach((task, index) => {
-      const start = now();
-      task();
-      if (round >= warmUp) timings[index]!.push(now() - start);
-    });
-  }
-
-  const [colebrook_ms = NaN, solveTyped_ms = NaN, solveByRule_ms = NaN] = timings.map(median);
+export function measureSolveRatio(turns: Turns): SolveRatio {
+  const typed = takeTurns(benchSystem(turns.segmentCount, "typed"), turns);
+  const byRule = takeTurns(benchSystem(turns.segmentCount, "by-rule"), turns);
   return {
-    segmentCount,
-    colebrook_ms,
-    solveTyped_ms,
-    solveByRule_ms,
-    typedOverColebrook: solveTyped_ms / colebrook_ms,
-    byRuleOverColebrook: solveByRule_ms / colebrook_ms,
+    segmentCount: turns.segmentCount,
+    colebrook_ms: quantile(typed.bare, 0.5),
+    solveTyped_ms: quantile(typed.solving, 0.5),
+    solveByRule_ms: quantile(byRule.solving, 0.5),
+    typedOverColebrook: ratioAt(0.5, typed),
+    byRuleOverColebrook: ratioAt(0.5, byRule),
+    undisturbed: { typedOverColebrook: ratioAt(0.1, typed), byRuleOverColebrook: ratioAt(0.1, byRule) },
   };
 }
+
+interface Timings {
+  readonly bare: readonly number[];
+  readonly solving: readonly number[];
+}
+
+/** Bare evaluations and a solve of the same system, one after the other, again and again. */
+function takeTurns(system: AirSystem, { warmUp, rounds, now }: Turns): Timings {
+  const inputs = frictionInputs(system);
+  const bare: number[] = [];
+  const solving: number[] = [];
+  for (let round = 0; round < warmUp + rounds; round++) {
+    const start = now();
+    evaluateBare(inputs);
+    const between = now();
+    solveOnce(system);
+    const end = now();
+    if (round < warmUp) continue;
+    bare.push(between - start);
+    solving.push(end - between);
+  }
+  return { bare, solving };
+}
+
+const ratioAt = (share: number, { bare, solving }: Timings): number => quantile(solving, share) / quantile(bare, share);
 
 interface FrictionInputs {
   readonly reynoldsNumber: Float64Array;
@@ -77,4 +94,5 @@ function solveOnce(system: AirSystem): number {
   return answer.value.requiredPressure_pa;
 }
 
-const median = (values: readonly number[]): number => [...values].sort((a, b) => a - b)[values.length >> 1] ?? NaN;
+const quantile = (values: readonly number[], share: number): number =>
+  [...values].sort((a, b) => a - b)[Math.floor(values.length * share)] ?? NaN;

@@ -16,7 +16,7 @@ import { meters, type Meters, type SquareMeters } from "../quantity.ts";
  * @example equivalentDiameterOfRectangle({ width: inches(30), height: inches(12) }) // 0.5136 m (20.2 in.)
  */
 export const equivalentDiameterOfRectangle = ({ width, height }: { width: Meters; height: Meters }): Meters =>
-  meters((1.3 * raisedToFiveEighths(width * height)) / raisedToQuarter(width + height));
+  meters(1.3 * equalFrictionPower(width * height, width + height));
 
 /**
  * Equivalent diameter of a flat oval duct.
@@ -28,7 +28,7 @@ export const equivalentDiameterOfRectangle = ({ width, height }: { width: Meters
  * @example a flat oval of 20 × 10 in.: 14.3 in.
  */
 export const equivalentDiameterOfFlatOval = (duct: { area: SquareMeters; perimeter: Meters }): Meters =>
-  meters((1.55 * raisedToFiveEighths(duct.area)) / raisedToQuarter(duct.perimeter));
+  meters(1.55 * equalFrictionPower(duct.area, duct.perimeter));
 
 /**
  * Equivalent diameter of an annulus: no published formula is known to us, so it follows from equal friction rate and flow
@@ -60,9 +60,10 @@ export function equivalentDiameter(
   }
 }
 
-// Square roots are several times faster than a general power, and these exponents are made of them exactly.
-const raisedToQuarter = (value: number): number => Math.sqrt(Math.sqrt(value));
-const raisedToFiveEighths = (value: number): number => {
-  const root = Math.sqrt(value);
-  return root * Math.sqrt(Math.sqrt(root));
-};
+/**
+ * area^0.625 / span^0.25, which both formulas have in common.
+ *
+ * Written as (area² √area / span)^¼: square roots are several times faster than a general power.
+ */
+const equalFrictionPower = (area: number, span: number): number =>
+  Math.sqrt(Math.sqrt((area * area * Math.sqrt(area)) / span));

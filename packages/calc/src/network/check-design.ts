@@ -1,18 +1,16 @@
 /** What an engineer would mark on segments that can be solved all the same. */
-import type { AirSystem, DuctClass } from "../air-system.ts";
+import { DUCT_CLASSES, type AirSystem } from "../air-system.ts";
 import { FLEXIBLE_RANGE, FLEXIBLE_SOURCE, compressionOfSlack } from "../friction/flexible.ts";
 import { LAMINAR_UNDER_REYNOLDS, TURBULENT_FROM_REYNOLDS } from "../friction/friction-factor.ts";
 import { aspectRatio } from "../geometry/section.ts";
 import { MOST_ASPECT_RATIO, addFinding, limitSources, type FindingList } from "./findings.ts";
 import { staticLessTotal } from "./losses.ts";
 import type { FindingCode } from "./solution.ts";
+import { byPlace } from "./traits.ts";
 import type { SolvedColumns } from "./write-segments.ts";
 
 /** A size by rule meets its limit exactly; the last digit is not a finding. */
 const isOver = (value: number, limit: number): boolean => value > limit * (1 + 1e-9);
-
-const limitOf = (limits: Readonly<Record<DuctClass, number>>, ductClass: DuctClass): number =>
-  ductClass === "main" ? limits.main : ductClass === "branch" ? limits.branch : limits.runout;
 
 export function checkDesign(columns: SolvedColumns, findings: FindingList): void {
   checkSpeed(columns, findings);
@@ -20,20 +18,19 @@ export function checkDesign(columns: SolvedColumns, findings: FindingList): void
   checkForm(columns, findings);
 }
 
-function checkSpeed({ system, friction }: SolvedColumns, findings: FindingList): void {
-  const { segments, limits } = system;
+function checkSpeed({ system, traits, friction }: SolvedColumns, findings: FindingList): void {
   const { velocity, frictionRate, reynoldsNumber } = friction;
-  for (let s = 0; s < segments.length; s++) {
-    const { ductClass } = segments[s]!;
-    const velocityLimit = limitOf(limits.velocity_m_s, ductClass);
-    if (isOver(velocity[s]!, velocityLimit)) {
-      const source = limitSources.velocity(ductClass);
-      mark(findings, system, s, "velocity-over-limit", velocity[s]!, velocityLimit, "m/s", source);
+  const velocityLimits = byPlace(system.limits.velocity_m_s);
+  const frictionLimits = byPlace(system.limits.frictionRate_pa_m);
+  for (let s = 0; s < velocity.length; s++) {
+    const place = traits.ductClass[s]!;
+    if (isOver(velocity[s]!, velocityLimits[place]!)) {
+      const source = limitSources.velocity(DUCT_CLASSES[place]!);
+      mark(findings, system, s, "velocity-over-limit", velocity[s]!, velocityLimits[place]!, "m/s", source);
     }
-    const frictionLimit = limitOf(limits.frictionRate_pa_m, ductClass);
-    if (isOver(frictionRate[s]!, frictionLimit)) {
-      const source = limitSources.friction(ductClass);
-      mark(findings, system, s, "friction-over-limit", frictionRate[s]!, frictionLimit, "Pa/m", source);
+    if (isOver(frictionRate[s]!, frictionLimits[place]!)) {
+      const source = limitSources.friction(DUCT_CLASSES[place]!);
+      mark(findings, system, s, "friction-over-limit", frictionRate[s]!, frictionLimits[place]!, "Pa/m", source);
     }
     const reynolds = reynoldsNumber[s]!;
     if (reynolds >= LAMINAR_UNDER_REYNOLDS && reynolds < TURBULENT_FROM_REYNOLDS) {
@@ -55,14 +52,13 @@ function checkPressureClass({ system, friction, losses }: SolvedColumns, finding
 }
 
 function checkForm(columns: SolvedColumns, findings: FindingList): void {
-  const { system, sections } = columns;
-  const { segments } = system;
-  for (let s = 0; s < segments.length; s++) {
+  const { system, sections, traits } = columns;
+  for (let s = 0; s < sections.area.length; s++) {
     const ratio = aspectRatio(sections.section[s]!);
     if (isOver(ratio, MOST_ASPECT_RATIO)) {
       mark(findings, system, s, "aspect-ratio-high", ratio, MOST_ASPECT_RATIO, "1", limitSources.aspectRatio);
     }
-    if (segments[s]!.flexible) checkFlexible(columns, s, findings);
+    if (traits.isFlexible[s] === 1) checkFlexible(columns, s, findings);
   }
 }
 

@@ -1,5 +1,5 @@
 /** The fittings of all segments as columns, in the order of the segments; records are written from them at the end. */
-import { FITTING_TYPES, type AirSystem, type FittingType } from "../air-system.ts";
+import type { AirSystem, FittingType } from "../air-system.ts";
 import { RADIUS_ELBOW_SOURCE, SMOOTH_ELBOW_SOURCE, SQUARE_THROAT_SOURCE } from "../fittings/elbow.ts";
 import { ENDS_SOURCE } from "../fittings/ends.ts";
 import { CONVERGING_SOURCE, DIVERGING_SOURCE } from "../fittings/junction.ts";
@@ -17,8 +17,7 @@ const MOST_FITTINGS = 3;
 export interface FittingColumns {
   /** Fittings of segment s are those from start[s] up to start[s + 1]. */
   readonly start: Int32Array;
-  /** Place in FITTING_TYPES. */
-  readonly type: Uint8Array;
+  readonly type: FittingType[];
   readonly isChosen: Uint8Array;
   readonly madeHere: Uint8Array;
   /** Place in the list of sources. */
@@ -32,7 +31,7 @@ export interface FittingColumns {
 
 export const fittingColumns = (segmentCount: number): FittingColumns => ({
   start: new Int32Array(segmentCount + 1),
-  type: new Uint8Array(MOST_FITTINGS * segmentCount),
+  type: new Array<FittingType>(MOST_FITTINGS * segmentCount),
   isChosen: new Uint8Array(MOST_FITTINGS * segmentCount),
   madeHere: new Uint8Array(MOST_FITTINGS * segmentCount),
   source: new Uint8Array(MOST_FITTINGS * segmentCount),
@@ -88,7 +87,7 @@ export function openFitting(
   source: FittingSource,
 ): number {
   const at = columns.start[s + 1]!++;
-  columns.type[at] = FITTING_TYPES.indexOf(type);
+  columns.type[at] = type;
   columns.isChosen[at] = isChosen ? 1 : 0;
   columns.madeHere[at] = madeHere ? 1 : 0;
   columns.source[at] = source;
@@ -123,7 +122,7 @@ const FittingRecord = plainRecord(function (
   nodeId: string,
 ) {
   const upstream = columns.upstream[at]!;
-  this.type = FITTING_TYPES[columns.type[at]!]!;
+  this.type = columns.type[at]!;
   this.basis = columns.isChosen[at] === 1 ? "chosen" : "inferred";
   this.nodeId = nodeId;
   this.angle_rad = columns.angle[at]!;

@@ -3,9 +3,9 @@ import type { AirSystem, Section } from "../air-system.ts";
 import { velocityPressure as pressureOfVelocity } from "../air/velocity-pressure.ts";
 import { slackFactor } from "../friction/flexible.ts";
 import { darcyFrictionFactor } from "../friction/friction-factor.ts";
-import { roughnessOf } from "../friction/roughness.ts";
 import { meters, metersPerSecond, type KilogramsPerCubicMeter, type PascalSeconds } from "../quantity.ts";
 import type { Sections } from "./sections.ts";
+import type { Traits } from "./traits.ts";
 
 export interface Friction {
   readonly velocity: Float64Array;
@@ -17,9 +17,10 @@ export interface Friction {
 }
 
 export function findFriction(
-  system: AirSystem,
+  { spec }: AirSystem,
   airflow: Float64Array,
   sections: Sections,
+  traits: Traits,
   air: { density: KilogramsPerCubicMeter; viscosity: PascalSeconds },
 ): Friction {
   const count = airflow.length;
@@ -32,9 +33,9 @@ export function findFriction(
   };
   const relativeRoughness = new Float64Array(count);
   fillVelocities(friction, airflow, sections, air.density, air.viscosity / air.density);
-  fillRoughness(system, sections.hydraulicDiameter, relativeRoughness);
+  fillRoughness(traits.roughness, sections.hydraulicDiameter, relativeRoughness);
   fillFactors(sections.section, friction.reynoldsNumber, relativeRoughness, friction.darcyFrictionFactor);
-  fillRates(system, sections.hydraulicDiameter, friction);
+  fillRates(traits.isFlexible, spec.flexibleSlack, sections.hydraulicDiameter, friction);
   return friction;
 }
 
@@ -54,8 +55,8 @@ function fillVelocities(
   }
 }
 
-function fillRoughness({ segments, spec }: AirSystem, diameter: Float64Array, relativeRoughness: Float64Array): void {
-  for (let s = 0; s < segments.length; s++) relativeRoughness[s] = roughnessOf(segments[s]!, spec) / diameter[s]!;
+function fillRoughness(roughness: Float64Array, diameter: Float64Array, relativeRoughness: Float64Array): void {
+  for (let s = 0; s < diameter.length; s++) relativeRoughness[s] = roughness[s]! / diameter[s]!;
 }
 
 function fillFactors(
@@ -69,11 +70,10 @@ function fillFactors(
   }
 }
 
-function fillRates({ segments, spec }: AirSystem, diameter: Float64Array, friction: Friction): void {
+function fillRates(isFlexible: Uint8Array, flexibleSlack: number, diameter: Float64Array, friction: Friction): void {
   const { darcyFrictionFactor: factor, velocityPressure, frictionRate } = friction;
-  for (let s = 0; s < segments.length; s++) {
-    const isSlack = segments[s]!.flexible;
-    const slack = isSlack ? slackFactor({ slack: spec.flexibleSlack, diameter: meters(diameter[s]!) }) : 1;
+  for (let s = 0; s < diameter.length; s++) {
+    const slack = isFlexible[s] === 1 ? slackFactor({ slack: flexibleSlack, diameter: meters(diameter[s]!) }) : 1;
     frictionRate[s] = (slack * factor[s]! * velocityPressure[s]!) / diameter[s]!;
   }
 }

@@ -4,10 +4,8 @@ import { NOT_FOUND, findId, indexIds } from "./id-index.ts";
 
 const records = (ids: readonly string[]) => ids.map((id) => ({ id }));
 
-/** "Aa" and "BB" fall on one place, so words made of them all do. */
-const crowded = Array.from({ length: 4096 }, (_, n) =>
-  n.toString(2).padStart(12, "0").replaceAll("0", "Aa").replaceAll("1", "BB"),
-);
+/** Ids that differ only where they are not looked at first. */
+const crowded = Array.from({ length: 4096 }, (_, n) => `${String(n).padStart(4, "0")}-the-same-end`);
 
 describe("an index of ids", () => {
   it("finds what a Map finds, for any ids", () => {
@@ -25,7 +23,7 @@ describe("an index of ids", () => {
     expect(index.map).not.toBeNull();
     expect(index.hasDuplicates).toBe(false);
     expect(findId(index, crowded[4000] ?? "")).toBe(4000);
-    expect(findId(index, "AaAa")).toBe(NOT_FOUND);
+    expect(findId(index, "4096-the-same-end")).toBe(NOT_FOUND);
     expect(indexIds(records([...crowded, crowded[0] ?? ""])).hasDuplicates).toBe(true);
   });
 });

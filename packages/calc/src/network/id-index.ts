@@ -73,8 +73,13 @@ export function findIdNear(index: IdIndex, id: string, guess: number): number {
   return guess >= 0 && guess < records.length && records[guess]!.id === id ? guess : findId(index, id);
 }
 
+/** Ids differ in their last letters, whether counted or drawn by chance; those that do not are found by the Map. */
+const LETTERS_HASHED = 8;
+
 function hash(id: string): number {
   let value = id.length;
-  for (let i = 0; i < id.length; i++) value = (Math.imul(value, 31) + id.charCodeAt(i)) | 0;
+  for (let i = Math.max(0, id.length - LETTERS_HASHED); i < id.length; i++) {
+    value = (Math.imul(value, 31) + id.charCodeAt(i)) | 0;
+  }
   return value ^ (value >>> 15);
 }

@@ -5,9 +5,10 @@ import { pascals, squareMeters } from "../quantity.ts";
 import type { Course } from "./course.ts";
 import type { FittingColumns } from "./fitting-columns.ts";
 import type { Friction } from "./friction.ts";
-import { leakage, leakageClass } from "./leakage.ts";
+import { leakage } from "./leakage.ts";
 import type { Sections } from "./sections.ts";
 import type { SolvedAccessory } from "./solution.ts";
+import type { Traits } from "./traits.ts";
 import { NONE, type Tree } from "./tree-shape.ts";
 
 export interface Losses {
@@ -84,20 +85,20 @@ export const staticLessTotal = (isUnderPressure: boolean, velocityPressure: numb
 
 /** Air through the walls of each segment, at its mean static pressure. */
 export function findLeakage(
-  { segments, spec, service }: AirSystem,
-  { section }: Sections,
+  { service }: AirSystem,
+  { section, perimeter }: Sections,
+  traits: Traits,
   { length }: Course,
   { velocityPressure }: Friction,
   { entering, leaving }: Losses,
 ): Float64Array {
-  const leaks = new Float64Array(segments.length);
+  const leaks = new Float64Array(length.length);
   const isUnderPressure = service === "supply";
-  for (let s = 0; s < segments.length; s++) {
-    const classOfDuct = leakageClass(spec.sealClass, section[s]!.shape, segments[s]!.flexible);
+  for (let s = 0; s < leaks.length; s++) {
     const meanTotal = (entering[s]! + leaving[s]!) / 2;
     const staticPressure = meanTotal + staticLessTotal(isUnderPressure, velocityPressure[s]!);
-    const surface = squareMeters(outerPerimeter(section[s]!) * length[s]!);
-    leaks[s] = leakage(classOfDuct, surface, pascals(staticPressure));
+    const outer = section[s]!.shape === "annular" ? outerPerimeter(section[s]!) : perimeter[s]!;
+    leaks[s] = leakage(traits.leakageClass[s]!, squareMeters(outer * length[s]!), pascals(staticPressure));
   }
   return leaks;
 }

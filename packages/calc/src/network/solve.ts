@@ -22,6 +22,7 @@ import { findLeakage, sumLosses } from "./losses.ts";
 import { tracePaths } from "./paths.ts";
 import { chooseSections } from "./sections.ts";
 import type { Solution, SystemProblem } from "./solution.ts";
+import { readTraits } from "./traits.ts";
 import { buildTree } from "./tree.ts";
 import { writeSegments } from "./write-segments.ts";
 
@@ -57,7 +58,8 @@ export function solve(
   const flows = addUpFlows(system, tree);
   const { airflow } = flows;
   const sections = chooseSections(system, airflow, sizingTables(system, { density, viscosity }), findings);
-  const friction = findFriction(system, airflow, sections, { density, viscosity });
+  const traits = readTraits(system, sections.section);
+  const friction = findFriction(system, airflow, sections, traits, { density, viscosity });
 
   const joints = describeJoints(tree, course, airflow);
   const fittings = fittingColumns(tree.segmentCount);
@@ -79,8 +81,8 @@ export function solve(
   const accessories = findAccessories(system, sections, friction, practice);
 
   const losses = sumLosses(system, tree, course, friction, fittings, accessories);
-  const leakage = findLeakage(system, sections, course, friction, losses);
-  const columns = { system, course, flows, sections, friction, fittings, accessories, losses, leakage };
+  const leakage = findLeakage(system, sections, traits, course, friction, losses);
+  const columns = { system, course, flows, sections, traits, friction, fittings, accessories, losses, leakage };
   checkDesign(columns, findings);
   const { paths, governingOutletNodeId, requiredPressure } = tracePaths(system, tree, friction, losses, findings);
 

@@ -9,6 +9,7 @@ import type { Friction } from "./friction.ts";
 import type { Losses } from "./losses.ts";
 import { plainRecord, type Draft } from "./plain-record.ts";
 import type { Sections } from "./sections.ts";
+import type { Traits } from "./traits.ts";
 import type { SolvedAccessory, SolvedFitting, SolvedSegment } from "./solution.ts";
 
 export interface SolvedColumns {
@@ -16,6 +17,7 @@ export interface SolvedColumns {
   readonly course: Course;
   readonly flows: Flows;
   readonly sections: Sections;
+  readonly traits: Traits;
   readonly friction: Friction;
   readonly fittings: FittingColumns;
   readonly accessories: readonly (readonly SolvedAccessory[])[];

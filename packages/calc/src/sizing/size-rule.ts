@@ -95,11 +95,15 @@ function capacityTable(
 
   const rows: CapacityRow[] = [];
   let most = 0;
+  let largestArea = 0;
   for (const { section } of allowedCandidates(segment, sizing)) {
     const clear = clearSection(section, lining);
     const area = sectionArea(clear);
+    // More metal for no more area carries no more air: most candidates end here.
+    if (area <= largestArea) continue;
     const perimeter = wettedPerimeter(clear);
-    if (!(area > 0 && perimeter > 0) || !isOpen(clear)) continue;
+    if (!(perimeter > 0) || !isOpen(clear)) continue;
+    largestArea = area;
     const capacity = area * velocityIn(hydraulicDiameter(area, perimeter));
     if (capacity <= most) continue;
     most = capacity;
