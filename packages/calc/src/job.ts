@@ -48,7 +48,7 @@ export function parseJob(text: string): Result<Job, JobProblem> {
   for (const field of ["standards", "pricing"]) {
     if (content[field] !== undefined) problems.push(...shapeProblems(content[field], {}, field));
   }
-  if (problems.length > 0) return fail(...problems);
+  if (problems.length > 0) return { ok: false, problems };
   return ok({
     systems: content["systems"] as readonly AirSystem[],
     standards: (content["standards"] as ShopStandards | undefined) ?? shippedStandards,
@@ -64,7 +64,7 @@ function parseBareSystem(content: unknown): Result<Job, JobProblem> {
     return fail({ code: "schema-unknown", field: "schema", value: String(schema), limit });
   }
   const problems = shapeProblems(content, airSystemShape, "");
-  if (problems.length > 0) return fail(...problems);
+  if (problems.length > 0) return { ok: false, problems };
   return ok({ systems: [content as AirSystem], standards: shippedStandards, pricing: null, isBareSystem: true });
 }
 
@@ -72,7 +72,7 @@ function parseBareSystem(content: unknown): Result<Job, JobProblem> {
 export function solveJob({ systems }: Job): Result<readonly Solution[], SystemProblem> {
   const answers = systems.map((system) => solve(system));
   const problems = answers.flatMap((answer) => (answer.ok ? [] : answer.problems));
-  if (problems.length > 0) return fail(...problems);
+  if (problems.length > 0) return { ok: false, problems };
   return ok(answers.flatMap((answer) => (answer.ok ? [answer.value] : [])));
 }
 

@@ -65,6 +65,20 @@ export function reportLooseEnds({ nodes, segments }: AirSystem, tree: Tree, prob
   }
 }
 
+/** Every path is told segment by segment, so a main with thousands of taps in a row would be told millions of times. */
+const MOST_SEGMENTS_ON_A_PATH = 1000;
+
+export function reportLongWays({ segments }: AirSystem, tree: Tree, reached: number, problems: SystemProblem[]): void {
+  for (let at = 0; at < reached; at++) {
+    const s = tree.order[at]!;
+    // The first beyond the limit stands for all that follow it.
+    if (tree.depth[s] !== MOST_SEGMENTS_ON_A_PATH) continue;
+    const limit = `at most ${MOST_SEGMENTS_ON_A_PATH} segments from the equipment to an outlet`;
+    const segment = segments[s]!;
+    problems.push(problem("value-out-of-range", segmentSubject(segment), "fromNodeId", segment.fromNodeId, limit));
+  }
+}
+
 /** Segments that feed themselves although each node has one parent: circles off the tree. Each segment is named once. */
 export function reportCircles({ segments }: AirSystem, tree: Tree, problems: SystemProblem[]): void {
   const { from, to, into, segmentCount } = tree;

@@ -88,6 +88,19 @@ describe("a layout that is no tree", () => {
     expect(told([unit, out, { ...out }], [duct("unit", "out", size)]).map(([code]) => code)).toContain("duplicate-id");
   });
 
+  it("refuses more segments in a row than any building has", () => {
+    const chain = (count: number) => {
+      const nodes = Array.from({ length: count - 1 }, (_, n) => junction(`n${n}`, [n + 1, 0]));
+      const ends = [unit, ...nodes, outlet("end", [count + 1, 0], 0.2)];
+      const ducts = ends.slice(1).map((node, n) => duct(ends[n]!.id, node.id, size));
+      return aSystem(ends, ducts);
+    };
+    expect(solved(chain(1000)).paths[0]?.segmentIds).toHaveLength(1000);
+    expect(refused(chain(1001)).map(({ code, subject }) => [code, subject.id])).toEqual([
+      ["value-out-of-range", "n999-end"],
+    ]);
+  });
+
   it("asks for one piece of equipment and an outlet", () => {
     expect(told([], []).map(([code]) => code)).toEqual(["no-equipment", "no-outlet"]);
     const second = equipment("second", [1, 1]);

@@ -7,7 +7,7 @@ import { sumJunctions } from "../fittings/junction-sums.ts";
 import { shippedPractice, type PracticeCoefficients } from "../fittings/practice.table.ts";
 import { transitionForm } from "../fittings/transition.ts";
 import { cubicMetersPerSecond, pascals, radians } from "../quantity.ts";
-import { fail, ok, type Result } from "../result.ts";
+import { ok, type Result } from "../result.ts";
 import { sizingTables } from "../sizing/size-rule.ts";
 import { findAccessories } from "./accessories.ts";
 import { checkConditions } from "./check-conditions.ts";
@@ -44,7 +44,7 @@ export function solve(
   checkConditions(system, problems);
   const tree = buildTree(system, problems);
   const course = layCourse(system, tree, problems);
-  if (problems.length > 0) return fail(...problems);
+  if (problems.length > 0) return { ok: false, problems };
 
   const { design, spec } = system;
   const density = airDensity({

@@ -2,7 +2,7 @@
 import type { AirSystem } from "../air-system.ts";
 import { isNodeSound, problemsOfNode } from "./check-node.ts";
 import { isSegmentSound, problemsOfSegment } from "./check-segment.ts";
-import { reportCircles, reportDuplicates, reportLooseEnds, reportSecondParent } from "./check-tree.ts";
+import { reportCircles, reportDuplicates, reportLongWays, reportLooseEnds, reportSecondParent } from "./check-tree.ts";
 import { findIdNear, indexIds, NOT_FOUND } from "./id-index.ts";
 import { nodeSubject, problem, segmentSubject, systemSubject } from "./problems.ts";
 import type { SystemProblem } from "./solution.ts";
@@ -42,6 +42,7 @@ export function buildTree(system: AirSystem, problems: SystemProblem[]): Tree {
     outlets,
   };
   const reached = equipment === NONE ? 0 : walk(tree);
+  reportLongWays(system, tree, reached, problems);
 
   reportLooseEnds(system, tree, problems);
   if (reached < segments.length) reportCircles(system, tree, problems);
