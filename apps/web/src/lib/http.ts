@@ -51,15 +51,17 @@ export function apiUrl<E extends Endpoint>(endpoint: E, params: ParamsOf<E>): st
 }
 
 async function send(endpoint: Endpoint, given: Given): Promise<Response> {
+  const url = urlOf(endpoint, given);
+  const init: RequestInit = {
+    method: endpoint.method.toUpperCase(),
+    credentials: "same-origin",
+    headers: headersOf(endpoint, given),
+    ...bodyOf(endpoint, given),
+    ...(given.signal ? { signal: given.signal } : {}),
+  };
   let response: Response;
   try {
-    response = await fetch(urlOf(endpoint, given), {
-      method: endpoint.method.toUpperCase(),
-      credentials: "same-origin",
-      headers: headersOf(endpoint, given),
-      ...bodyOf(endpoint, given),
-      ...(given.signal ? { signal: given.signal } : {}),
-    });
+    response = await fetch(url, init);
   } catch (error) {
     if (given.signal?.aborted) throw error;
     throw new NetworkProblem({ cause: error });

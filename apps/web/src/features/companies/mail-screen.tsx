@@ -7,7 +7,8 @@ import { Button } from "../../ui/button.tsx";
 import { EmptyState } from "../../ui/empty-state.tsx";
 import { Notice } from "../../ui/notice.tsx";
 import { SeverityText, type Severity } from "../../ui/severity.tsx";
-import { DataTable, type RowGroup, type TableColumn } from "../../ui/table/data-table.tsx";
+import { DataTable, type RowGroup } from "../../ui/table/data-table.tsx";
+import type { TableColumn } from "../../ui/table/table-column.ts";
 import { useSession } from "../session/index.ts";
 import { companyQueries } from "./companies.queries.ts";
 

@@ -4,7 +4,7 @@ import { dueText, instantFromZonedClock, zonedClock, zoneName } from "../../lib/
 import { timeZoneChoices } from "../../lib/format/time-zones.ts";
 import { SelectField, TextField } from "../../ui/controls.tsx";
 import { fieldMessage } from "../../ui/form/field-message.ts";
-import type { ProjectValues } from "./project-form.tsx";
+import type { ProjectValues } from "./project-values.ts";
 
 /** The hour of the bid on the clocks of a zone. Another zone keeps what the clock shows, since that is what was printed. */
 export function DueField() {

@@ -1,3 +1,4 @@
+import type { ProjectValues } from "./project-values.ts";
 import { formatElevation, parseNumber } from "@cleatwork/calc/display/index";
 import { feet, meters, type Meters } from "@cleatwork/calc";
 import type { projectRequest } from "@cleatwork/contracts";
@@ -15,7 +16,6 @@ import { ClientDialog, clientQueries } from "../clients/index.ts";
 import { useSession } from "../session/index.ts";
 import { DueField } from "./due-field.tsx";
 
-export type ProjectValues = z.input<typeof projectRequest>;
 const { Text, Select, Quantity } = formParts<ProjectValues>();
 
 export const projectValues = (project: Project): ProjectValues => ({

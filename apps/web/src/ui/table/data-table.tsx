@@ -5,20 +5,8 @@ import { csvText, downloadText } from "../../lib/format/csv.ts";
 import { Button } from "../button.tsx";
 import { DownloadIcon, SearchIcon } from "../icons/icon.tsx";
 import { PanelHead } from "../panel.tsx";
+import type { TableColumn } from "./table-column.ts";
 import { useRows } from "./use-rows.ts";
-
-export interface TableColumn<Row> {
-  readonly id: string;
-  readonly head: string;
-  /** What sorting, finding and the CSV go by; null is last and empty. */
-  readonly value: (row: Row) => string | number | null;
-  /** What is shown; without it, the value. */
-  readonly cell?: (row: Row) => ReactNode;
-  readonly align?: "right";
-  /** Heading and value in the CSV, where they differ: a unit belongs in the heading there. */
-  readonly csv?: { readonly head: string; readonly value: (row: Row) => string | number | null };
-  readonly className?: string;
-}
 
 export interface RowGroup<Row> {
   readonly id: string;
@@ -79,7 +67,6 @@ export function DataTable<Row>({
 
   const lines = useMemo(() => linesOf(shown, groups), [shown, groups]);
   const virtual = lines.length > VIRTUAL_FROM;
-  // eslint-disable-next-line react-hooks/incompatible-library -- it warns users of the React compiler, which is not used
   const virtualizer = useVirtualizer({
     count: virtual ? lines.length : 0,
     getScrollElement: () => scroller.current,

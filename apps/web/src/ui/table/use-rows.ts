@@ -6,7 +6,7 @@ import {
   useTable,
 } from "@tanstack/react-table";
 import { useMemo } from "react";
-import type { TableColumn } from "./data-table.tsx";
+import type { TableColumn } from "./table-column.ts";
 import { compare, holdsAllWords } from "./words.ts";
 
 const features = tableFeatures({ rowSortingFeature, sortedRowModel: createSortedRowModel() });
