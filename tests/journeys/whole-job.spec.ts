@@ -163,6 +163,8 @@ async function buildAsForeman(page: Page, price: string): Promise<void> {
     if (response.url().includes("/field")) void response.text().then((text) => bodies.push(text));
   });
   await page.reload();
+  await expect(page.getByRole("heading", { level: 1, name: "Sold jobs" })).toBeVisible();
+  await expect(page.getByRole("link", { name: /Marrow Creek Branch Library/ })).toBeVisible();
   await expectAccessible(page, "field home");
   await page.getByRole("link", { name: /Marrow Creek Branch Library/ }).click();
   await expect(page.getByRole("heading", { level: 1, name: /Marrow Creek/ })).toBeVisible();

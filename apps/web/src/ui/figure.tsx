@@ -11,18 +11,6 @@ export function Figure({ value, unit, className }: { value: ReactNode; unit?: st
   );
 }
 
-/** A signed difference: the sign is a shape and a character. */
-export function Difference({ text, direction }: { text: string; direction: "up" | "down" }) {
-  return (
-    <span className="label-width inline-flex items-center gap-1 border border-line-strong bg-sheet-hi px-1 text-help font-semibold">
-      <svg width={8} height={6} viewBox="0 0 8 6" aria-hidden className="fill-ink">
-        <path d={direction === "up" ? "M4 0l4 6H0z" : "M4 6L0 0h8z"} />
-      </svg>
-      {text}
-    </span>
-  );
-}
-
 /** A share of a limit: filled to the value, the limit a tick; what is over is hatched by shape, not only by color. */
 export function LimitBar({ share, label, width = 80 }: { share: number; label: string; width?: number }) {
   const limitAt = width / 1.25;
