@@ -11,7 +11,7 @@ export default tseslint.config(
   {
     languageOptions: {
       parserOptions: {
-        projectService: { allowDefaultProject: ["*.js", "*.cjs"] },
+        projectService: { allowDefaultProject: ["*.js", "*.cjs", "vitest.config.ts"] },
         tsconfigRootDir: import.meta.dirname,
       },
     },

@@ -80,11 +80,10 @@ describe("leftovers", () => {
 });
 
 describe("state", () => {
-  it("keeps its secret from one start to the next", () => {
-    const first = readState(folder);
-    writeState(folder, first);
-    expect(readState(folder)).toEqual(first);
-    expect(first.appSecret.length).toBeGreaterThanOrEqual(43);
+  it("is the same at the next start", () => {
+    const written = { ...readState(folder), ports: { web: 8080 } };
+    writeState(folder, written);
+    expect(readState(folder)).toEqual(written);
   });
 });
 

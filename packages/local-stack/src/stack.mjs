@@ -64,7 +64,6 @@ export async function startWholeStack({
     MAIL_FROM: "Cleatwork <quotes@cleatwork.example>",
     FILES_DIR: join(folder, "files"),
     WEB_DIST: webDist,
-    APP_SECRET: state.appSecret,
     LOG_LEVEL: "info",
     ...extra,
   };

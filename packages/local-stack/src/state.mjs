@@ -1,5 +1,4 @@
-/** What the stack remembers between starts: ports, secrets, whether the demo is seeded and its sign-ins. */
-import { randomBytes } from "node:crypto";
+/** What the stack remembers between starts: ports, whether the demo is seeded and its sign-ins. */
 import { mkdirSync, readFileSync, renameSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 
@@ -9,7 +8,7 @@ export function readState(folder) {
   try {
     return JSON.parse(readFileSync(fileOf(folder), "utf8"));
   } catch {
-    return { appSecret: randomBytes(32).toString("base64url"), ports: {}, signIns: null, webBuild: null };
+    return { ports: {}, signIns: null, webBuild: null };
   }
 }
 
