@@ -3,13 +3,23 @@ import { endpoints, type EndpointName } from "@cleatwork/contracts";
 import type { Figure } from "./figure.ts";
 import type { Member } from "./member.ts";
 
+const NOTES: Partial<Record<string, string>> = {
+  getDraftPdf: "prices the whole project anew and draws it",
+};
+
 export async function roundTripFigures(owner: Member): Promise<readonly Figure[]> {
   const parameters = await someOfEach(owner);
   const figures: Figure[] = [];
   for (const [name, { method, path, access }] of Object.entries(endpoints)) {
     if (method !== "get" || access.kind === "open") continue;
     const { databaseRoundTrips } = await owner.call(name as EndpointName, parametersFor(path, parameters));
-    figures.push({ what: `database round trips of ${name}`, figure: databaseRoundTrips, unit: "", most: 2 });
+    figures.push({
+      what: `database round trips of ${name}`,
+      figure: databaseRoundTrips,
+      unit: "",
+      most: 2,
+      note: NOTES[name] ?? "",
+    });
   }
   return figures;
 }
