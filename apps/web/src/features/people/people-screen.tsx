@@ -59,7 +59,7 @@ export function PeopleScreen() {
                   Since
                 </th>
                 <th scope="col" className="num">
-                  Last here
+                  Last sign-in
                 </th>
                 <th>
                   <span className="sr-only">Actions</span>
@@ -200,6 +200,6 @@ function MemberRow({
 
 const peopleCsv = (people: readonly Member[]) =>
   csvText([
-    ["Name", "E-mail", "Role", "Since", "Last here"],
+    ["Name", "E-mail", "Role", "Since", "Last sign-in"],
     ...people.map((one) => [one.name, one.email, one.role, one.joinedAt, one.lastSeenAt]),
   ]);

@@ -8,12 +8,10 @@ import {
   kilograms,
   meters,
   squareMeters,
-  decimal,
-  type Piece,
 } from "@cleatwork/calc";
 import { find } from "@cleatwork/layout";
 import { Fragment, useMemo, useState } from "react";
-import { csvText, downloadText } from "../../lib/format/csv.ts";
+import { downloadText } from "../../lib/format/csv.ts";
 import { classNames } from "../../lib/class-names.ts";
 import { Button } from "../../ui/button.tsx";
 import { EmptyState } from "../../ui/empty-state.tsx";
@@ -23,6 +21,8 @@ import { ScreenSkeleton } from "../../ui/skeleton.tsx";
 import { Toggle } from "../../ui/toggle.tsx";
 import { useWorkspace } from "../workspace/index.ts";
 import { PieceArithmetic } from "./arithmetic.tsx";
+import { pieceCsv } from "./piece-csv.ts";
+import { Counted, MetalByGauge } from "./takeoff-sides.tsx";
 import { groupsOf, sumOf, type Group, type Grouping, type Line, type Sums } from "./takeoff-rows.ts";
 
 /** Every piece, counted: totals that open to sizes, sizes that open to pieces and their arithmetic. */
@@ -244,110 +244,3 @@ function SumCells({ sums }: { sums: Sums }) {
     </>
   );
 }
-
-function MetalByGauge() {
-  const { numbers, units } = useWorkspace();
-  const weights = new Map<string, number>();
-  for (const { pieces } of numbers?.takeoffs ?? [])
-    for (const { gauge, weight_kg } of pieces) if (gauge) weights.set(gauge, (weights.get(gauge) ?? 0) + weight_kg);
-  const most = Math.max(...weights.values(), 1);
-  return (
-    <Panel label="Metal by gauge">
-      <PanelHead title="Metal by gauge" fact="net" />
-      <PanelBody>
-        {weights.size === 0 ? (
-          <p className="text-ink-3">No metal yet.</p>
-        ) : (
-          <table className="w-full">
-            <tbody>
-              {[...weights].sort().map(([gauge, weight]) => (
-                <tr key={gauge}>
-                  <th scope="row" className="py-0.5 pr-3 text-left font-normal">
-                    {gauge}
-                  </th>
-                  <td className="pr-3 text-right">{formatWeight(kilograms(weight), units).text}</td>
-                  <td className="w-1/2">
-                    <div className="h-2 bg-ink-2" style={{ width: `${(100 * weight) / most}%` }} />
-                  </td>
-                </tr>
-              ))}
-            </tbody>
-          </table>
-        )}
-      </PanelBody>
-    </Panel>
-  );
-}
-
-function Counted() {
-  const { numbers } = useWorkspace();
-  const sums = new Map<string, { quantity: number; unit: string; basis: string }>();
-  for (const { items } of numbers?.takeoffs ?? [])
-    for (const { description, quantity, unit, basis } of items) {
-      const known = sums.get(description);
-      if (known) known.quantity += quantity;
-      else sums.set(description, { quantity, unit, basis });
-    }
-  return (
-    <Panel label="Counted">
-      <PanelHead title="Hangers, sealant, dampers, devices" />
-      {sums.size === 0 ? (
-        <PanelBody className="text-ink-3">Nothing counted yet.</PanelBody>
-      ) : (
-        <table className="grid-table">
-          <tbody>
-            {[...sums].map(([description, { quantity, unit, basis }]) => (
-              <tr key={description} title={basis}>
-                <td>{description}</td>
-                <td className="num">
-                  {Number.isInteger(quantity) ? quantity : decimal(quantity, 1)} {unit}
-                </td>
-              </tr>
-            ))}
-          </tbody>
-        </table>
-      )}
-    </Panel>
-  );
-}
-
-/** SI, with the unit in each heading: what is computed, for whoever computes on. */
-const pieceCsv = (pieces: readonly Piece[]): string =>
-  csvText([
-    [
-      "system",
-      "mark",
-      "kind",
-      "fitting",
-      "run",
-      "size_mm",
-      "length_m",
-      "material",
-      "gauge",
-      "joint",
-      "seam",
-      "net_area_m2",
-      "blank_area_m2",
-      "weight_kg",
-      "shop_h",
-      "field_h",
-    ],
-    ...pieces.map((piece) => [
-      piece.systemTag,
-      piece.mark,
-      piece.kind,
-      piece.fitting ?? "",
-      piece.segmentName,
-      formatSize(piece.section, "si").text,
-      piece.length_m,
-      piece.material,
-      piece.gauge ?? "",
-      piece.joint,
-      piece.seam,
-      piece.netArea_m2,
-      piece.blankArea_m2,
-      piece.weight_kg,
-      piece.shopHours_h,
-      piece.fieldHours_h,
-    ]),
-  ]);
