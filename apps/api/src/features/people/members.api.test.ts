@@ -12,3 +12,10 @@ test("the people page reads members and open invitations in two round trips", as
   expect(invitations).toMatchObject([{ email: "newcomer@here.example", role: "foreman" }]);
   expect(people.map(({ name }) => name)).toContain(invitations[0]?.invitedBy);
 });
+
+test("the people page says when someone signed in last", async () => {
+  const { owner } = await foundCompany();
+  const { people } = await owner.ok("listPeople");
+  const seen = people.find(({ role }) => role === "owner")?.lastSeenAt ?? "";
+  expect(Number.isNaN(Date.parse(seen))).toBe(false);
+});

@@ -68,6 +68,8 @@ export const sessionsRepository = (db: SystemDb) => ({
       ip: session.ip,
       user_agent: session.userAgent?.slice(0, 300) ?? null,
     });
+    // Once a session, not once a request: reading must not cost a write.
+    await db.from("memberships").where({ person_id: session.personId }).update({ last_seen_at: db.now() });
   },
 
   async prolong(id: string, expiresAt: Date): Promise<void> {
