@@ -10,7 +10,7 @@ import type { Deps } from "./platform/http/route.ts";
 import { idsFrom } from "./platform/ids.ts";
 import { startWorker } from "./platform/jobs/worker.ts";
 
-async function main(): Promise<void> {
+function main(): void {
   const config = readConfig(process.env);
   const role = process.env["PROCESS_ROLE"] ?? "all";
   const log = pino({ level: config.logLevel, base: { role } });
@@ -43,7 +43,9 @@ async function main(): Promise<void> {
     });
 }
 
-main().catch((error: unknown) => {
+try {
+  main();
+} catch (error) {
   process.stderr.write(`${error instanceof ConfigError ? error.message : String((error as Error).stack ?? error)}\n`);
   process.exit(1);
-});
+}

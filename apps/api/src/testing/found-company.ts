@@ -66,13 +66,11 @@ export async function foundCompany(): Promise<TestCompany> {
     foreman: await join("foreman", "Rosa Quill"),
     stranger: personAt(server, { name: "", email: "" }),
     async mailTo(email) {
-      const rows = (await system
+      const rows: { message: unknown }[] = await system
         .from("outbox")
         .where({ recipient: email })
         .orderBy("id", "desc")
-        .select("message")) as {
-        message: unknown;
-      }[];
+        .select("message");
       return rows.map(({ message }) => fromJson<MailMessage>(message));
     },
   };

@@ -87,7 +87,7 @@ export class TestPerson {
     const search = new URLSearchParams(
       Object.entries(call.query ?? {}).map(([key, value]): [string, string] => [key, String(value)]),
     );
-    return `${path}${search.size > 0 ? `?${search}` : ""}`;
+    return `${path}${search.size > 0 ? `?${search.toString()}` : ""}`;
   }
 
   private headersOf<N extends EndpointName>(name: N, call: TestCall<N>): Record<string, string> {

@@ -50,7 +50,7 @@ export const companiesRepository = (db: TenantDb) => ({
   },
 
   async lockVersion(): Promise<number> {
-    const row = (await db.organization().forUpdate().first("version")) as { version: number };
+    const row: { version: number } = await db.organization().forUpdate().first("version");
     return row.version;
   },
 
@@ -70,7 +70,7 @@ export const companiesRepository = (db: TenantDb) => ({
 
   /** Ids sort by time, so the id is the cursor. One more is read to see whether there is a next page. */
   async listAudit({ limit, after }: PageRequest) {
-    const rows = (await db
+    const rows: AuditRow[] = await db
       .from("audit_entries", "a")
       .leftJoin("people as p", "p.id", "a.person_id")
       .modify((query) => void (after ? query.where("a.id", "<", after) : query))
@@ -78,7 +78,7 @@ export const companiesRepository = (db: TenantDb) => ({
       .limit(limit + 1)
       .select("a.id", "a.at", "a.person_id", "a.event", "a.subject", "a.details", {
         person_name: "p.name",
-      })) as AuditRow[];
+      });
     return pageOf(rows, limit, (row) => ({
       id: row.id,
       at: instantFromColumn(row.at),
@@ -90,7 +90,7 @@ export const companiesRepository = (db: TenantDb) => ({
   },
 
   async listMail({ limit, after }: PageRequest) {
-    const rows = (await db
+    const rows: MailRow[] = await db
       .outbox()
       .modify((query) => void (after ? query.where("id", "<", after) : query))
       .orderBy("id", "desc")
@@ -105,7 +105,7 @@ export const companiesRepository = (db: TenantDb) => ({
         "created_at",
         "next_attempt_at",
         "sent_at",
-      )) as MailRow[];
+      );
     return pageOf(rows, limit, (row) => ({
       id: row.id,
       to: row.recipient,

@@ -36,7 +36,7 @@ export const fieldRepository = (db: TenantDb) => ({
 
   /** Sold jobs, newest first; of several approvals of one project the latest. */
   async listProjects() {
-    const rows = (await db
+    const rows: ListRow[] = await db
       .from("approved_takeoffs", "t")
       .join("projects as p", { "p.organization_id": "t.organization_id", "p.id": "t.project_id" })
       .leftJoin("approved_takeoffs as later", function () {
@@ -53,7 +53,7 @@ export const fieldRepository = (db: TenantDb) => ({
         approvedAt: "t.approved_at",
         pieceCount: "t.piece_count",
         weight_kg: "t.weight_kg",
-      })) as ListRow[];
+      });
     return rows.map(({ siteAddress, approvedAt, ...row }) => ({
       ...row,
       siteCity: fromJson<{ city: string }>(siteAddress).city,
@@ -62,12 +62,11 @@ export const fieldRepository = (db: TenantDb) => ({
   },
 
   async find(projectId: ProjectId): Promise<FieldTakeoff | null> {
-    const row = (await db
+    const row: { id: ApprovedTakeoffId; document: unknown; approved_at: Date } | undefined = await db
       .from("approved_takeoffs")
       .where({ project_id: projectId })
       .orderBy("id", "desc")
-      .first("id", "document", "approved_at")) as
-      { id: ApprovedTakeoffId; document: unknown; approved_at: Date } | undefined;
+      .first("id", "document", "approved_at");
     return row
       ? {
           ...fromJson<ApprovedDocument>(row.document),

@@ -56,7 +56,7 @@ export const membersRepository = (db: TenantDb) => ({
 
   /** Every owner, locked, so that two removals cannot both see the other one. */
   async lockOwners(): Promise<number> {
-    const rows = (await db.from("memberships").where({ role: "owner" }).forUpdate().select("person_id")) as unknown[];
+    const rows: unknown[] = await db.from("memberships").where({ role: "owner" }).forUpdate().select("person_id");
     return rows.length;
   },
 

@@ -12,7 +12,8 @@ const PERSON = { id: "id", email: "email", name: "name", passwordHash: "password
 
 export const peopleRepository = (db: SystemDb) => ({
   async findByEmail(email: string): Promise<PersonRow | null> {
-    return ((await db.from("people").where({ email }).first(PERSON)) as PersonRow | undefined) ?? null;
+    const row: PersonRow | undefined = await db.from("people").where({ email }).first(PERSON);
+    return row ?? null;
   },
 
   async insert(person: PersonRow & { emailVerifiedAt: Date | null }): Promise<void> {
@@ -81,12 +82,11 @@ export const peopleRepository = (db: SystemDb) => ({
 
   /** Locks the token, marks it used and answers whose it was; null when it is unknown, used or late. */
   async useToken(hash: string, purpose: "verify" | "reset"): Promise<PersonId | null> {
-    const row = (await db
+    const row: { person_id: PersonId; expires_at: Date; used_at: Date | null } | undefined = await db
       .from("email_tokens")
       .where({ token_hash: hash, purpose })
       .forUpdate()
-      .first("person_id", "expires_at", "used_at")) as
-      { person_id: PersonId; expires_at: Date; used_at: Date | null } | undefined;
+      .first("person_id", "expires_at", "used_at");
     if (!row || row.used_at !== null || row.expires_at <= db.now()) return null;
     await db.from("email_tokens").where({ token_hash: hash }).update({ used_at: db.now() });
     return row.person_id;
@@ -103,7 +103,8 @@ export const peopleRepository = (db: SystemDb) => ({
   },
 
   async findInvitation(hash: string) {
-    return ((await invitation(db, hash)) as InvitationRow | undefined) ?? null;
+    const row = (await invitation(db, hash)) as InvitationRow | undefined;
+    return row ?? null;
   },
 
   async markAccepted(organizationId: OrganizationId, id: string): Promise<void> {
@@ -111,23 +112,21 @@ export const peopleRepository = (db: SystemDb) => ({
   },
 
   async membershipsOf(personId: PersonId) {
-    return (await db
+    const rows: { id: OrganizationId; slug: string; name: string; role: Role }[] = await db
       .from("memberships", "m")
       .join("organizations as o", "o.id", "m.organization_id")
       .where("m.person_id", personId)
       .orderBy("o.name")
-      .select({ id: "o.id", slug: "o.slug", name: "o.name", role: "m.role" })) as {
-      id: OrganizationId;
-      slug: string;
-      name: string;
-      role: Role;
-    }[];
+      .select({ id: "o.id", slug: "o.slug", name: "o.name", role: "m.role" });
+    return rows;
   },
 
   async isVerified(personId: PersonId): Promise<boolean> {
-    const row = (await db.from("people").where({ id: personId }).first("email_verified_at")) as
-      { email_verified_at: Date | null } | undefined;
-    return row?.email_verified_at != null;
+    const row: { email_verified_at: Date | null } | undefined = await db
+      .from("people")
+      .where({ id: personId })
+      .first("email_verified_at");
+    return (row?.email_verified_at ?? null) !== null;
   },
 });
 

@@ -196,11 +196,10 @@ async function joinCompany(
 
 export async function meOf(deps: Deps, personId: PersonId): Promise<Me> {
   const db = deps.db.system("a person asks who they are");
-  const person = (await db.from("people").where({ id: personId }).first("id", "name", "email")) as {
-    id: PersonId;
-    name: string;
-    email: string;
-  };
+  const person: { id: PersonId; name: string; email: string } = await db
+    .from("people")
+    .where({ id: personId })
+    .first("id", "name", "email");
   const people = peopleRepository(db);
   const memberships = await people.membershipsOf(personId);
   return {

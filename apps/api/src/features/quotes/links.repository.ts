@@ -36,7 +36,7 @@ type LinkRow = Omit<OpenedLink, "validUntilOn" | "recipient" | "response"> & {
 
 /** A private link says which company: this is the one way into a company's data without a membership. */
 export async function findLink(db: SystemDb, tokenHash: string): Promise<OpenedLink | null> {
-  const row = (await db
+  const row: LinkRow | undefined = await db
     .from("quote_links", "l")
     .join("quote_revisions as r", { "r.organization_id": "l.organization_id", "r.id": "l.revision_id" })
     .join("organizations as o", "o.id", "l.organization_id")
@@ -64,7 +64,7 @@ export async function findLink(db: SystemDb, tokenHash: string): Promise<OpenedL
       responseKind: "a.kind",
       responseName: "a.name",
       responseAt: "a.at",
-    })) as LinkRow | undefined;
+    });
   if (!row) return null;
   const { recipientName, recipientEmail, responseKind, responseName, responseAt, ...link } = row;
   return {
@@ -82,9 +82,11 @@ export const linksRepository = (db: TenantDb) => ({
 
   /** The revision's state with its row locked, so that of two answers one comes first. */
   async lockState(revisionId: RevisionId): Promise<StoredState> {
-    const row = (await db.from("quote_revisions").where({ id: revisionId }).forUpdate().first("state")) as {
-      state: StoredState;
-    };
+    const row: { state: StoredState } = await db
+      .from("quote_revisions")
+      .where({ id: revisionId })
+      .forUpdate()
+      .first("state");
     return row.state;
   },
 
@@ -127,15 +129,11 @@ export const linksRepository = (db: TenantDb) => ({
 
   /** Who hears of an answer. */
   async peopleToTell(): Promise<{ id: PersonId; name: string; email: string; role: Role }[]> {
-    return (await db
+    const rows: { id: PersonId; name: string; email: string; role: Role }[] = await db
       .from("memberships", "m")
       .join("people as p", "p.id", "m.person_id")
       .orderBy("p.id")
-      .select({ id: "p.id", name: "p.name", email: "p.email", role: "m.role" })) as {
-      id: PersonId;
-      name: string;
-      email: string;
-      role: Role;
-    }[];
+      .select({ id: "p.id", name: "p.name", email: "p.email", role: "m.role" });
+    return rows;
   },
 });

@@ -7,7 +7,7 @@ import type { StoredState } from "./quotes.rules.ts";
 export const quotesRepository = (db: TenantDb) => ({
   /** Every quote of a project with revisions, links, mail and answers: one statement. Null when there is no such project. */
   async list(projectId: ProjectId): Promise<Quote[] | null> {
-    const rows = (await db
+    const rows: (QuoteRow & { time_zone: string })[] = await db
       .from("projects", "p")
       .join("organizations as o", "o.id", "p.organization_id")
       .leftJoin("quotes as q", { "q.organization_id": "p.organization_id", "q.project_id": "p.id" })
@@ -18,7 +18,7 @@ export const quotesRepository = (db: TenantDb) => ({
       .leftJoin("outbox as m", "m.id", "l.mail_id")
       .where("p.id", projectId)
       .orderBy([{ column: "q.id" }, { column: "r.number", order: "desc" }, { column: "l.id" }])
-      .select(COLUMNS)) as (QuoteRow & { time_zone: string })[];
+      .select(COLUMNS);
     if (rows.length === 0) return null;
     const zone = rows[0]?.time_zone ?? "UTC";
     return quotesFromRows(
@@ -60,11 +60,11 @@ export const quotesRepository = (db: TenantDb) => ({
     projectId: ProjectId,
     id: QuoteId,
   ): Promise<{ number: string; draft: QuoteDraft; version: number } | null> {
-    const row = (await db
+    const row: { number: string; draft: unknown; version: number } | undefined = await db
       .from("quotes")
       .where({ id, project_id: projectId })
       .forUpdate()
-      .first("number", "draft", "version")) as { number: string; draft: unknown; version: number } | undefined;
+      .first("number", "draft", "version");
     return row ? { ...row, draft: fromJson<QuoteDraft>(row.draft) } : null;
   },
 
@@ -157,11 +157,11 @@ export const quotesRepository = (db: TenantDb) => ({
     quoteId: QuoteId,
     id: RevisionId,
   ): Promise<{ state: StoredState; number: number } | null> {
-    const row = (await db
+    const row: { state: StoredState; number: number } | undefined = await db
       .from("quote_revisions")
       .where({ id, quote_id: quoteId, project_id: projectId })
       .forUpdate()
-      .first("state", "number")) as { state: StoredState; number: number } | undefined;
+      .first("state", "number");
     return row ?? null;
   },
 
@@ -184,12 +184,11 @@ export const quotesRepository = (db: TenantDb) => ({
     quoteId: QuoteId,
     id: RevisionId,
   ): Promise<{ pdfHash: string; number: string; revision: number } | null> {
-    const row = (await db
+    const row: { pdfHash: string; number: string; revision: number } | undefined = await db
       .from("quote_revisions", "r")
       .join("quotes as q", { "q.organization_id": "r.organization_id", "q.id": "r.quote_id" })
       .where({ "r.id": id, "r.quote_id": quoteId, "r.project_id": projectId })
-      .first({ pdfHash: "r.pdf_hash", number: "q.number", revision: "r.number" })) as
-      { pdfHash: string; number: string; revision: number } | undefined;
+      .first({ pdfHash: "r.pdf_hash", number: "q.number", revision: "r.number" });
     return row ?? null;
   },
 });

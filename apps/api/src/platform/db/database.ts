@@ -1,17 +1,11 @@
-import knex, { type Knex } from "knex";
+import knex from "knex";
 import type { OrganizationId } from "@cleatwork/contracts";
 import type { Clock } from "../clock.ts";
 import type { Ids } from "../ids.ts";
+import type { DbContext } from "./db-context.ts";
 import { countQuery } from "./query-count.ts";
 import { systemDb, type SystemDb } from "./system-db.ts";
 import { tenantDb, type TenantDb } from "./tenant-db.ts";
-
-/** What every database handle carries: where rows go, what time it is, how ids are made. */
-export interface DbContext {
-  readonly sql: Knex;
-  readonly clock: Clock;
-  readonly ids: Ids;
-}
 
 /** The one door to MariaDB. A company's data comes through `tenant`, which only a membership or a private link may ask for. */
 export interface Database {

@@ -1,6 +1,6 @@
 import type { OrganizationId } from "@cleatwork/contracts";
 import type { Knex } from "knex";
-import type { DbContext } from "./database.ts";
+import type { DbContext } from "./db-context.ts";
 import type { SystemTable, TenantTable } from "./tables.ts";
 import { tenantDb, type TenantDb } from "./tenant-db.ts";
 import { inTransaction } from "./transaction.ts";

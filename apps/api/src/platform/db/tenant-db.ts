@@ -1,6 +1,6 @@
 import type { OrganizationId } from "@cleatwork/contracts";
 import type { Knex } from "knex";
-import type { DbContext } from "./database.ts";
+import type { DbContext } from "./db-context.ts";
 import type { TenantTable } from "./tables.ts";
 import { inTransaction } from "./transaction.ts";
 

@@ -14,8 +14,11 @@ export const sendProblems =
       .status(known.status)
       .type("application/problem+json")
       .set("cache-control", "no-store")
-      .send(JSON.stringify(known.toDetail(String(request.id))));
+      .send(JSON.stringify(known.toDetail(requestId(request))));
   };
+
+/** Made as text when the request came in. */
+const requestId = (request: { id: unknown }): string => (typeof request.id === "string" ? request.id : "");
 
 function asProblem(error: unknown): HttpProblem {
   if (error instanceof HttpProblem) return error;

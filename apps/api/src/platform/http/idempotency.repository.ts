@@ -28,12 +28,12 @@ export const idempotencyRepository = (db: TenantDb, personId: PersonId) => {
       } catch (error) {
         if (!isDuplicate(error)) throw error;
       }
-      const kept = (await row(key).first({
+      const kept: KeptAnswer | undefined = await row(key).first({
         endpoint: "endpoint",
         requestHash: "request_hash",
         status: "status",
         answer: "answer",
-      })) as KeptAnswer | undefined;
+      });
       return kept ? { ...kept, answer: kept.answer === null ? null : fromJson(kept.answer) } : null;
     },
     async keep(key: string, status: number, answer: unknown): Promise<void> {

@@ -18,16 +18,17 @@ export const outboxRepository = (db: SystemDb) => ({
   claim(): Promise<ClaimedMail | null> {
     return db.transaction(async (tx) => {
       const now = tx.now();
-      const row = (await tx
-        .from("outbox")
-        .where({ state: "queued" })
-        .where("next_attempt_at", "<=", now)
-        .where((free) => void free.whereNull("leased_until").orWhere("leased_until", "<", now))
-        .orderBy("next_attempt_at")
-        .forUpdate()
-        .skipLocked()
-        .first("id", "organization_id", "message", "attempts")) as
-        { id: string; organization_id: OrganizationId | null; message: unknown; attempts: number } | undefined;
+      const row:
+        { id: string; organization_id: OrganizationId | null; message: unknown; attempts: number } | undefined =
+        await tx
+          .from("outbox")
+          .where({ state: "queued" })
+          .where("next_attempt_at", "<=", now)
+          .where((free) => void free.whereNull("leased_until").orWhere("leased_until", "<", now))
+          .orderBy("next_attempt_at")
+          .forUpdate()
+          .skipLocked()
+          .first("id", "organization_id", "message", "attempts");
       if (!row) return null;
       await tx
         .from("outbox")

@@ -2,7 +2,7 @@ import type { PersonId } from "@cleatwork/contracts";
 import { fromJson } from "../db/columns.ts";
 import type { SystemDb } from "../db/system-db.ts";
 import type { Membership } from "../http/route.ts";
-import type { UserAttributes } from "./sessions.ts";
+import type { UserAttributes } from "./user-attributes.ts";
 
 interface SessionRow {
   person_id: PersonId;
@@ -21,12 +21,11 @@ const MEMBERSHIPS = `(SELECT COALESCE(JSON_ARRAYAGG(JSON_OBJECT(
 
 export const sessionsRepository = (db: SystemDb) => ({
   async find(hash: string): Promise<{ personId: PersonId; expiresAt: Date; attributes: UserAttributes } | null> {
-    const row = (await db
+    const row: SessionRow | undefined = await db
       .from("sessions", "s")
       .join("people as p", "p.id", "s.person_id")
       .where("s.id", hash)
-      .first("s.person_id", "s.expires_at", "p.name", "p.email", "p.email_verified_at", db.raw(MEMBERSHIPS))) as
-      SessionRow | undefined;
+      .first("s.person_id", "s.expires_at", "p.name", "p.email", "p.email_verified_at", db.raw(MEMBERSHIPS));
     if (!row) return null;
     const { name, email } = row;
     return {
@@ -42,15 +41,11 @@ export const sessionsRepository = (db: SystemDb) => ({
   },
 
   async listOf(personId: PersonId) {
-    return (await db
+    const rows: { id: string; expiresAt: Date; ip: string | null; userAgent: string | null }[] = await db
       .from("sessions")
       .where({ person_id: personId })
-      .select({ id: "id", expiresAt: "expires_at", ip: "ip", userAgent: "user_agent" })) as {
-      id: string;
-      expiresAt: Date;
-      ip: string | null;
-      userAgent: string | null;
-    }[];
+      .select({ id: "id", expiresAt: "expires_at", ip: "ip", userAgent: "user_agent" });
+    return rows;
   },
 
   async insert(session: {

@@ -8,6 +8,7 @@ import type { Database } from "../db/database.ts";
 import { hashOfToken } from "../tokens.ts";
 import type { Membership, Person } from "../http/route.ts";
 import { sessionsRepository } from "./sessions.repository.ts";
+import type { UserAttributes } from "./user-attributes.ts";
 
 declare module "lucia" {
   interface Register {
@@ -18,12 +19,6 @@ declare module "lucia" {
   }
 }
 
-export interface UserAttributes {
-  readonly name: string;
-  readonly email: string;
-  readonly emailVerified: boolean;
-  readonly memberships: readonly Membership[];
-}
 export interface SessionAttributes {
   readonly ip: string | null;
   readonly userAgent: string | null;
