@@ -49,6 +49,7 @@ export default tseslint.config(
         AbortSignal: "readonly",
         AbortController: "readonly",
         document: "readonly",
+        localStorage: "readonly",
         window: "readonly",
         performance: "readonly",
         module: "writable",
