@@ -65,7 +65,7 @@ const members = names.filter((name) => accessOf(name).kind === "member");
 async function statusFor(person: TestPerson, name: EndpointName, params: Params): Promise<number> {
   const chosen = Object.fromEntries(parametersOf(name).map((parameter) => [parameter, params[parameter]]));
   const { status } = await person.send(name, {
-    params: chosen as never,
+    params: chosen,
     version: 1,
     ...(endpoints[name].takes === "file" ? { form: true } : {}),
   });
@@ -117,7 +117,7 @@ describe("a thing of another company, named under one's own", () => {
     const made = endpoints[name].body.type === "undefined" ? undefined : bodies[name];
     const chosen = Object.fromEntries(parametersOf(name).map((each) => [each, mixed[each]]));
     const { status } = await ours.owner.send(name, {
-      params: chosen as never,
+      params: chosen,
       version: 1,
       ...(endpoints[name].takes === "file"
         ? { body: drawingFields as never, file: { bytes: onePixel, name: "M-101.png" } }
@@ -188,7 +188,7 @@ describe("what a foreman can get", () => {
 
   test.each(open)("%s holds no cost", async (name) => {
     const chosen = Object.fromEntries(parametersOf(name).map((parameter) => [parameter, ourThings[parameter]]));
-    const { bytes } = await ours.foreman.send(name, { params: chosen as never });
+    const { bytes } = await ours.foreman.send(name, { params: chosen });
     expect(bytes.toString("utf8")).not.toMatch(/_minor"|_micro"|_bp"|"\w*(cost|price|margin|markup|amount)\w*"/i);
   });
 });

@@ -1,6 +1,7 @@
 /** A project that can be quoted: drawn, solved, and priced at invented prices. */
 import type { PriceItem } from "@cleatwork/calc";
-import { endpoints, type BodyOf, type Quote } from "@cleatwork/contracts";
+import type { endpoints } from "@cleatwork/contracts";
+import { type BodyOf, type Quote } from "@cleatwork/contracts";
 import { randomUUID } from "node:crypto";
 import { computeProject } from "../features/pricing/index.ts";
 import { aProject } from "./a-project.ts";

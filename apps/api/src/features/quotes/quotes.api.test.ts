@@ -35,13 +35,10 @@ describe("issuing", () => {
     const { company, quote } = await anOpenQuote();
     const [revision] = quote.revisions;
     const system = company.server.deps.db.system("a test looks at what is stored");
-    const row = (await system
-      .from("quote_revisions")
-      .where({ id: revision?.id })
-      .first("snapshot", "snapshot_hash")) as {
+    const row: {
       snapshot: string;
       snapshot_hash: string;
-    };
+    } = await system.from("quote_revisions").where({ id: revision?.id }).first("snapshot", "snapshot_hash");
     expect(createHash("sha256").update(row.snapshot).digest("hex")).toBe(row.snapshot_hash);
     expect(canonicalJson(JSON.parse(row.snapshot))).toBe(row.snapshot);
     expect(revision).toMatchObject({ number: 1, state: "issued", snapshotHash: row.snapshot_hash });
