@@ -22,7 +22,7 @@ export interface TestCompany {
   /** Not signed in: a client behind a link, or anyone. */
   readonly stranger: TestPerson;
   /** What was written into the outbox for an address, newest first. */
-  mailTo(email: string): Promise<MailMessage[]>;
+  readonly mailTo: (email: string) => Promise<MailMessage[]>;
 }
 
 let count = 0;
@@ -65,7 +65,7 @@ export async function foundCompany(): Promise<TestCompany> {
     estimator: await join("estimator", "Teo Varga"),
     foreman: await join("foreman", "Rosa Quill"),
     stranger: personAt(server, { name: "", email: "" }),
-    async mailTo(email) {
+    mailTo: async (email) => {
       const rows: { message: unknown }[] = await system
         .from("outbox")
         .where({ recipient: email })

@@ -144,7 +144,7 @@ describe("what is shown is read back as the same", () => {
       fc.property(side, side, fc.constantFrom("round", "rectangular", "flat-oval"), systems, (a, b, shape, units) => {
         const of = (n: number): Meters => (units === "si" ? meters(n / 1000) : inches(n / 8));
         const section: Section =
-          shape === "round" ? { shape, diameter_m: of(a) } : ({ shape, width_m: of(a), height_m: of(b) });
+          shape === "round" ? { shape, diameter_m: of(a) } : { shape, width_m: of(a), height_m: of(b) };
         const back = valueOf(parseSize(formatSize(section, units).text, units));
         expect(back.shape).toBe(section.shape);
         for (const [name, value] of Object.entries(section))
