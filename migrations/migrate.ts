@@ -18,6 +18,9 @@ const steps: Knex.MigrationSource<string> = {
   getMigration: async (file) => (await import(pathToFileURL(join(versions, file)).href)) as Knex.Migration,
 };
 
+/** Longer than all steps take. */
+const LOCK_WAIT_S = 300;
+
 /** Makes the database when it is missing and applies every step that it has not seen. Answers their names. */
 export async function migrate(databaseUrl: string): Promise<string[]> {
   const url = new URL(databaseUrl);
@@ -30,20 +33,21 @@ export async function migrate(databaseUrl: string): Promise<string[]> {
     password: decodeURIComponent(url.password),
     timezone: "Z",
   };
-  const server = knex({ client: "mysql2", connection });
-  await server.raw(`CREATE DATABASE IF NOT EXISTS ${name} CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci`);
-  await server.destroy();
-
+  // One connection, so that the lock taken on it holds until it closes: several processes may start at once.
+  const server = knex({ client: "mysql2", connection, pool: { min: 1, max: 1 } });
   const database = knex({ client: "mysql2", connection: { ...connection, database: name } });
   try {
-    const [, applied] = (await database.migrate.latest({
-      migrationSource: steps,
-      // MariaDB commits at every schema statement; each step is written so that it can be run again.
-      disableTransactions: true,
-    })) as [number, string[]];
+    await server.raw(`CREATE DATABASE IF NOT EXISTS ${name} CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci`);
+    await server.raw("SELECT GET_LOCK(?, ?)", [`migrate ${name}`, LOCK_WAIT_S]);
+    // Whoever holds the lock is alone: a mark in knex's own table was left by a process that died.
+    const options = { migrationSource: steps, disableTransactions: true };
+    await database.migrate.forceFreeMigrationsLock(options);
+    // MariaDB commits at every schema statement; each step is written so that it can be run again.
+    const [, applied] = (await database.migrate.latest(options)) as [number, string[]];
     return applied;
   } finally {
     await database.destroy();
+    await server.destroy();
   }
 }
 

@@ -65,9 +65,10 @@ describe("a session", () => {
     const [cookie = ""] = headers.getSetCookie().slice(-1);
     expect(cookie).toMatch(/^cleatwork_session=.*HttpOnly.*SameSite=Lax/i);
     const id = /cleatwork_session=([^;]+)/.exec(cookie)?.[1] ?? "";
-    const rows: {
-      id: string = await systemOf(company).from("sessions").where({ person_id: company.owner.id }).select("id");
-    }[];
+    const rows: { id: string }[] = await systemOf(company)
+      .from("sessions")
+      .where({ person_id: company.owner.id })
+      .select("id");
     const ids = rows.map((row) => row.id);
     expect(ids).toContain(createHash("sha256").update(id).digest("hex"));
     expect(ids).not.toContain(id);
