@@ -107,10 +107,11 @@ describe("the API is killed in the middle of editing", () => {
     const acknowledged: string[] = [];
     let now = segment;
     let unanswered = null;
+    let killed = Promise.resolve();
     for (let n = 1; unanswered === null; n++) {
       const next = { ...now, name: `Edit ${n}` };
       const body = batch(now, next);
-      if (n === 25) setTimeout(() => void stack.kill("api"), 1);
+      if (n === 25) setTimeout(() => (killed = stack.kill("api")), 1);
       try {
         await estimator.call("saveLayout", { params, body });
         acknowledged.push(next.name);
@@ -119,6 +120,7 @@ describe("the API is killed in the middle of editing", () => {
         unanswered = { body, next };
       }
     }
+    await killed;
     await stack.startApi();
 
     expect(acknowledged.length).toBeGreaterThanOrEqual(24);

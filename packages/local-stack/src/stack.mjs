@@ -85,8 +85,9 @@ export async function startWholeStack({
     const child = children[name];
     if (!child) return;
     expected.add(child);
-    await stopChild(child, options);
+    // Taken off first: whoever starts the part again meanwhile must not lose the new one.
     delete children[name];
+    await stopChild(child, options);
   };
 
   const startDatabaseChild = async () => {
