@@ -111,7 +111,10 @@ describe("the API is killed in the middle of editing", () => {
     for (let n = 1; unanswered === null; n++) {
       const next = { ...now, name: `Edit ${n}` };
       const body = batch(now, next);
-      if (n === 25) setTimeout(() => (killed = stack.kill("api")), 1);
+      if (n === 25)
+        setTimeout(() => {
+          killed = stack.kill("api");
+        }, 1);
       try {
         await estimator.call("saveLayout", { params, body });
         acknowledged.push(next.name);

@@ -159,8 +159,11 @@ async function acceptAsClient(page: Page, product: Product, price: string): Prom
 
 async function buildAsForeman(page: Page, price: string): Promise<void> {
   const bodies: string[] = [];
-  page.on("response", (response) => {
-    if (response.url().includes("/field")) void response.text().then((text) => bodies.push(text));
+  // Read on the way, not afterwards: a body is gone once its page has been left.
+  await page.route(/\/api\/.*\/field/, async (route) => {
+    const response = await route.fetch();
+    bodies.push(await response.text());
+    await route.fulfill({ response });
   });
   await page.reload();
   await expect(page.getByRole("heading", { level: 1, name: "Sold jobs" })).toBeVisible();

@@ -125,6 +125,7 @@ export function BoardCanvas(props: BoardCanvasProps) {
         aria-label={label}
         aria-describedby="board-keys"
         data-tool={tool}
+        data-snap={ghost?.snap?.kind ?? ""}
         onPointerDown={(event) => {
           event.currentTarget.focus();
           event.currentTarget.setPointerCapture(event.pointerId);
