@@ -3,10 +3,6 @@ import { endpoints, type EndpointName } from "@cleatwork/contracts";
 import type { Figure } from "./figure.ts";
 import type { Member } from "./member.ts";
 
-const NOTES: Partial<Record<string, string>> = {
-  getDraftPdf: "prices the whole project anew and draws it",
-};
-
 export async function roundTripFigures(owner: Member): Promise<readonly Figure[]> {
   const parameters = await someOfEach(owner);
   const figures: Figure[] = [];
@@ -18,7 +14,6 @@ export async function roundTripFigures(owner: Member): Promise<readonly Figure[]
       figure: databaseRoundTrips,
       unit: "",
       most: 2,
-      note: NOTES[name] ?? "",
     });
   }
   return figures;

@@ -21,9 +21,9 @@ export async function aQuotableProject(company: TestCompany) {
   await estimator.ok("saveLayout", { params, body: { batchId: randomUUID(), baseSequence: 1, sets } });
 
   const compute = async () => {
-    const numbers = await computeProject(server.deps.db.tenant(organizationId), project.id, { pricedOn: "2026-12-01" });
-    if (!numbers) throw new Error("the project is there");
-    return numbers;
+    const computed = await computeProject(server.deps.db.tenant(organizationId), project.id, () => "2026-12-01");
+    if (!computed) throw new Error("the project is there");
+    return computed.numbers;
   };
   const { version, ...settings } = await owner.ok("getPricingSettings");
   const parts = [{ label: "Wage", amount_micro: 40_000_000 }];

@@ -1,4 +1,6 @@
-import type { Client, ClientId, Contact, ContactId } from "@cleatwork/contracts";
+import type { Address, ClientId, Client, Contact, ContactId, ProjectId } from "@cleatwork/contracts";
+import { fromJson } from "../../platform/db/columns.ts";
+import type { Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import {
   clientsFromRows,
@@ -7,6 +9,17 @@ import {
   type ClientContactRow,
   type ClientRequest,
 } from "./clients.rows.ts";
+
+/** Where the project's client is to be found; null when there is no such project here. */
+export const clientAddressQuestion = (db: TenantDb, projectId: ProjectId): Question<Address | null> => ({
+  from: db
+    .from("projects", "p")
+    .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
+    .where("p.id", projectId),
+  columns: { address: "c.address" },
+  order: "c.id",
+  read: ([row]: readonly { address: unknown }[]) => (row ? fromJson<Address>(row.address) : null),
+});
 
 export const clientsRepository = (db: TenantDb) => {
   const withContacts = () =>

@@ -1,16 +1,10 @@
 /** The door of clients. */
-import type { Client, ClientId, ContactId } from "@cleatwork/contracts";
+import type { ClientId, ContactId } from "@cleatwork/contracts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
-import { problem } from "../../platform/http/problem.ts";
 import { clientsRepository } from "./clients.repository.ts";
 
+export { clientAddressQuestion } from "./clients.repository.ts";
 export { clientHandlers } from "./clients.routes.ts";
-
-export const getClient = async (db: TenantDb, id: ClientId): Promise<Client> => {
-  const client = await clientsRepository(db).find(id);
-  if (!client) throw problem("not-found", "There is no such client.");
-  return client;
-};
 
 /** Whether a client, and a contact of it, are here to be named by a project. */
 export async function checkClientReference(

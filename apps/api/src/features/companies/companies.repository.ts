@@ -1,5 +1,6 @@
 import type { Address, Company, CompanySlug, OrganizationId, PersonId, UnitSystem } from "@cleatwork/contracts";
 import { fromJson, instantFromColumn, instantOrNull } from "../../platform/db/columns.ts";
+import { ask, type Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 
 interface CompanyRow {
@@ -44,10 +45,30 @@ interface PageRequest {
   readonly after?: string | undefined;
 }
 
+export const companyQuestion = (db: TenantDb): Question<Company> => ({
+  from: db.organization(),
+  columns: Object.fromEntries(COMPANY_COLUMNS.map((column) => [column, `organizations.${column}`])),
+  order: "organizations.id",
+  read: ([row]: readonly CompanyRow[]) => companyFromRow(row!),
+});
+
+const COMPANY_COLUMNS = [
+  "id",
+  "slug",
+  "name",
+  "unit_system",
+  "currency",
+  "time_zone",
+  "address",
+  "phone",
+  "license_number",
+  "brand_color",
+  "quote_terms",
+  "version",
+] as const satisfies readonly (keyof CompanyRow)[];
+
 export const companiesRepository = (db: TenantDb) => ({
-  async get(): Promise<Company> {
-    return companyFromRow((await db.organization().first()) as CompanyRow);
-  },
+  get: (): Promise<Company> => ask(companyQuestion(db)),
 
   async lockVersion(): Promise<number> {
     const row: { version: number } = await db.organization().forUpdate().first("version");

@@ -1,7 +1,3 @@
 /** The door of companies. */
-import type { TenantDb } from "../../platform/db/tenant-db.ts";
-import { companiesRepository } from "./companies.repository.ts";
-
+export { companyQuestion } from "./companies.repository.ts";
 export { companyHandlers } from "./companies.routes.ts";
-
-export const getCompany = (db: TenantDb) => companiesRepository(db).get();

@@ -1,4 +1,5 @@
 import type { Change, DrawingId, LayoutRecord, PersonId, ProjectId, RecordId, SpecId } from "@cleatwork/contracts";
+import { ask, type Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import {
   loggedChangeFromRow,
@@ -22,18 +23,25 @@ export interface LoggedSet {
   readonly changes: readonly Change[];
 }
 
+interface StoredLayout {
+  readonly sequence: number;
+  readonly records: LayoutRecord[];
+}
+
+/** Null when there is no such project here. */
+export const layoutQuestion = (db: TenantDb, projectId: ProjectId): Question<StoredLayout | null> => ({
+  from: db
+    .from("layouts", "l")
+    .leftJoin("layout_records as r", { "r.organization_id": "l.organization_id", "r.project_id": "l.project_id" })
+    .where("l.project_id", projectId),
+  columns: { sequence: "l.sequence", document: "r.document" },
+  order: "r.id",
+  read: (rows: readonly HeadAndRecordRow[]) =>
+    rows[0] ? { sequence: rows[0].sequence, records: recordsFromRows(rows) } : null,
+});
+
 export const layoutsRepository = (db: TenantDb) => ({
-  /** Null when there is no such project here. One query, whatever the size. */
-  async find(projectId: ProjectId): Promise<{ sequence: number; records: LayoutRecord[] } | null> {
-    const rows = (await db
-      .from("layouts", "l")
-      .leftJoin("layout_records as r", { "r.organization_id": "l.organization_id", "r.project_id": "l.project_id" })
-      .where("l.project_id", projectId)
-      .select("l.sequence", "r.document")
-      .orderBy("r.id")) as HeadAndRecordRow[];
-    const head = rows[0];
-    return head ? { sequence: head.sequence, records: recordsFromRows(rows) } : null;
-  },
+  find: (projectId: ProjectId): Promise<StoredLayout | null> => ask(layoutQuestion(db, projectId)),
 
   /** Locks the head, so that saves of one layout go one after the other. */
   async lockHead(projectId: ProjectId): Promise<{ sequence: number } | null> {

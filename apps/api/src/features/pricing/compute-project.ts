@@ -1,34 +1,42 @@
-import type { ProjectId } from "@cleatwork/contracts";
+import type { Company, ProjectId } from "@cleatwork/contracts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
-import { findLayout } from "../layouts/index.ts";
-import { findProject } from "../projects/index.ts";
-import { listSpecs } from "../specs/index.ts";
+import { companyQuestion } from "../companies/index.ts";
+import { layoutQuestion } from "../layouts/index.ts";
+import { projectQuestion } from "../projects/index.ts";
+import { specsQuestion } from "../specs/index.ts";
 import { computeNumbers, type ProjectNumbers } from "./compute.ts";
-import { pricingRepository } from "./pricing.repository.ts";
+import { priceItemsQuestion, projectPricingQuestion, settingsQuestion } from "./pricing.repository.ts";
 
-/**
- * A project's numbers from what is stored now; null when there is no such project here. One transaction, so that all of
- * it is of one moment.
- */
-export const computeProject = (
-  tenant: TenantDb,
+/** All that a project's numbers are computed from, to be asked in one statement, so that all of it is of one moment. */
+export const projectQuestions = (db: TenantDb, projectId: ProjectId) => ({
+  company: companyQuestion(db),
+  project: projectQuestion(db, projectId),
+  layout: layoutQuestion(db, projectId),
+  specs: specsQuestion(db),
+  items: priceItemsQuestion(db),
+  settings: settingsQuestion(db),
+  pricing: projectPricingQuestion(db, projectId),
+});
+
+/** What the database answered to them. */
+export type ProjectAnswers = Awaited<ReturnType<typeof askProject>>;
+const askProject = (db: TenantDb, projectId: ProjectId) => db.askTogether(projectQuestions(db, projectId));
+
+/** Null when there is no such project here. */
+export function numbersFrom(answers: ProjectAnswers, pricedOn: string): ProjectNumbers | null {
+  const { company, project, layout, pricing, ...documents } = answers;
+  if (!project || !layout || !pricing) return null;
+  const { specs, items, settings } = documents;
+  return computeNumbers({ project, ...layout, specs, items, settings, currency: company.currency, pricing, pricedOn });
+}
+
+/** A project's numbers from what is stored now, with the company they are for; null when there is no such project here. */
+export async function computeProject(
+  db: TenantDb,
   projectId: ProjectId,
-  { pricedOn }: { pricedOn: string },
-): Promise<ProjectNumbers | null> =>
-  tenant.transaction(async (tx) => {
-    const repository = pricingRepository(tx);
-    const project = await findProject(tx, projectId);
-    const layout = await findLayout(tx, projectId);
-    const pricing = await repository.findProjectPricing(projectId);
-    if (!project || !layout || !pricing) return null;
-    return computeNumbers({
-      project,
-      ...layout,
-      specs: await listSpecs(tx),
-      currency: await repository.currency(),
-      items: await repository.listItems(),
-      settings: await repository.getSettings(),
-      pricing,
-      pricedOn,
-    });
-  });
+  pricedOn: (company: Company) => string,
+): Promise<{ company: Company; numbers: ProjectNumbers } | null> {
+  const answers = await askProject(db, projectId);
+  const numbers = numbersFrom(answers, pricedOn(answers.company));
+  return numbers && { company: answers.company, numbers };
+}

@@ -3,7 +3,7 @@ import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { defaultPricingSettings } from "./default-settings.ts";
 import { pricingRepository } from "./pricing.repository.ts";
 
-export { computeProject } from "./compute-project.ts";
+export { computeProject, numbersFrom, projectQuestions } from "./compute-project.ts";
 export type { ProjectNumbers } from "./compute.ts";
 export { pricingHandlers } from "./pricing.routes.ts";
 

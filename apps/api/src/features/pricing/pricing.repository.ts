@@ -1,5 +1,6 @@
 import type { PriceItem } from "@cleatwork/calc";
 import type { PricingSettings, ProjectId, ProjectPricing } from "@cleatwork/contracts";
+import { ask, type Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import {
   priceItemFromRow,
@@ -10,16 +11,49 @@ import {
   type PriceItemRow,
 } from "./pricing.rows.ts";
 
+export const priceItemsQuestion = (db: TenantDb): Question<PriceItem[]> => ({
+  from: db.from("price_items"),
+  columns: PRICE_ITEM_COLUMNS,
+  order: "item_key",
+  read: (rows: readonly PriceItemRow[]) => rows.map(priceItemFromRow),
+});
+
+export const settingsQuestion = (db: TenantDb): Question<PricingSettings> => ({
+  from: db.from("pricing_settings"),
+  columns: { document: "document", version: "version" },
+  order: "version",
+  read: ([row]: readonly DocumentRow[]) => settingsFromRow(foundedRow(row)),
+});
+
+/** Null when there is no such project here. */
+export const projectPricingQuestion = (db: TenantDb, projectId: ProjectId): Question<ProjectPricing | null> => ({
+  from: db
+    .from("projects", "p")
+    .leftJoin("project_pricing as x", { "x.organization_id": "p.organization_id", "x.project_id": "p.id" })
+    .where("p.id", projectId),
+  columns: { document: "x.document", version: "x.version" },
+  order: "p.id",
+  read: ([row]: readonly { document: unknown; version: number | null }[]) => (row ? projectPricingFromRow(row) : null),
+});
+
+const PRICE_ITEM_COLUMNS = {
+  item_key: "item_key",
+  description: "description",
+  line_group: "line_group",
+  unit: "unit",
+  unit_price_micro: "unit_price_micro",
+  supplier: "supplier",
+  effective_on: "effective_on",
+  taxable: "taxable",
+} satisfies Readonly<Record<keyof PriceItemRow, string>>;
+
 export const pricingRepository = (db: TenantDb) => ({
   async currency(): Promise<string> {
     const row: { currency: string } = await db.organization().first("currency");
     return row.currency;
   },
 
-  async listItems(): Promise<PriceItem[]> {
-    const rows = (await db.from("price_items").orderBy("item_key")) as PriceItemRow[];
-    return rows.map(priceItemFromRow);
-  },
+  listItems: (): Promise<PriceItem[]> => ask(priceItemsQuestion(db)),
 
   /** The item as it stands, locked. */
   async lockItem(key: string): Promise<PriceItem | null> {
@@ -37,9 +71,7 @@ export const pricingRepository = (db: TenantDb) => ({
     await db.from("price_items").where({ item_key: key }).delete();
   },
 
-  async getSettings(): Promise<PricingSettings> {
-    return settingsFromRow(foundedRow((await db.from("pricing_settings").first()) as DocumentRow | undefined));
-  },
+  getSettings: (): Promise<PricingSettings> => ask(settingsQuestion(db)),
 
   async lockSettings(): Promise<PricingSettings> {
     const row = (await db.from("pricing_settings").forUpdate().first()) as DocumentRow | undefined;
@@ -57,14 +89,8 @@ export const pricingRepository = (db: TenantDb) => ({
   },
 
   /** Null when there is no such project here. */
-  async findProjectPricing(projectId: ProjectId): Promise<ProjectPricing | null> {
-    const row: { document: unknown; version: number | null } | undefined = await db
-      .from("projects", "p")
-      .leftJoin("project_pricing as x", { "x.organization_id": "p.organization_id", "x.project_id": "p.id" })
-      .where("p.id", projectId)
-      .first({ document: "x.document", version: "x.version" });
-    return row ? projectPricingFromRow(row) : null;
-  },
+  findProjectPricing: (projectId: ProjectId): Promise<ProjectPricing | null> =>
+    ask(projectPricingQuestion(db, projectId)),
 
   /** The same, with the project's row locked: two first changes at once wait for each other. */
   async lockProjectPricing(projectId: ProjectId): Promise<ProjectPricing | null> {

@@ -3,9 +3,8 @@ import type { Project, ProjectId } from "@cleatwork/contracts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { projectsRepository } from "./projects.repository.ts";
 
+export { projectQuestion } from "./projects.repository.ts";
 export { projectHandlers } from "./projects.routes.ts";
-
-export const findProject = (db: TenantDb, id: ProjectId) => projectsRepository(db).find(id);
 
 /** Sets how the bid stands, when a quote is issued, accepted or declined. False when the project is not here. */
 export const moveProject = (db: TenantDb, id: ProjectId, state: Project["state"]) =>

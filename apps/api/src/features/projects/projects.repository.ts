@@ -1,4 +1,5 @@
 import type { Project, ProjectId, ProjectItem } from "@cleatwork/contracts";
+import { ask, type Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import {
   projectFromRow,
@@ -8,6 +9,33 @@ import {
   type ProjectRequest,
   type ProjectRow,
 } from "./projects.rows.ts";
+
+export const projectQuestion = (db: TenantDb, id: ProjectId): Question<Project | null> => ({
+  from: db
+    .from("projects", "p")
+    .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
+    .where("p.id", id),
+  columns: PROJECT_COLUMNS,
+  order: "p.id",
+  read: ([row]: readonly ProjectRow[]) => (row ? projectFromRow(row) : null),
+});
+
+const PROJECT_COLUMNS = {
+  id: "p.id",
+  name: "p.name",
+  number: "p.number",
+  client_id: "p.client_id",
+  client_name: "c.name",
+  contact_id: "p.contact_id",
+  site_address: "p.site_address",
+  altitude_m: "p.altitude_m",
+  due_at: "p.due_at",
+  due_zone: "p.due_zone",
+  unit_system: "p.unit_system",
+  state: "p.state",
+  created_at: "p.created_at",
+  version: "p.version",
+} satisfies Readonly<Record<keyof ProjectRow, string>>;
 
 export const projectsRepository = (db: TenantDb) => ({
   /** By bid date, undated last; with the price and state of the latest issued revision. */
@@ -34,14 +62,7 @@ export const projectsRepository = (db: TenantDb) => ({
     return rows.map(projectItemFromRow);
   },
 
-  async find(id: ProjectId): Promise<Project | null> {
-    const row: ProjectRow | undefined = await db
-      .from("projects", "p")
-      .join("clients as c", { "c.organization_id": "p.organization_id", "c.id": "p.client_id" })
-      .where("p.id", id)
-      .first("p.*", { client_name: "c.name" });
-    return row ? projectFromRow(row) : null;
-  },
+  find: (id: ProjectId): Promise<Project | null> => ask(projectQuestion(db, id)),
 
   /** The version and state now, with the row locked; null when there is no such project here. */
   async lock(id: ProjectId): Promise<Pick<Project, "version" | "state"> | null> {

@@ -5,13 +5,12 @@ import { problem } from "../../platform/http/problem.ts";
 import type { Deps, Person } from "../../platform/http/route.ts";
 import { enqueueMail } from "../../platform/mail/outbox.ts";
 import { newToken } from "../../platform/tokens.ts";
-import { getCompany } from "../companies/index.ts";
 import { moveProject } from "../projects/index.ts";
 import type { ProjectNumbers } from "../pricing/index.ts";
 import { quoteMail } from "./mails.ts";
 import { quotesRepository } from "./quotes.repository.ts";
 import { linkExpiry, mayIssue, type MayIssue } from "./quotes.rules.ts";
-import { getQuote, lockQuote, namesOf, numbersOf, pdfName, pdfOf, snapshotOf } from "./quotes.service.ts";
+import { getQuote, lockQuote, namesOf, pdfName, pdfOf, readWithNumbers, snapshotOf } from "./quotes.service.ts";
 import { freeze } from "./snapshot.ts";
 
 interface IssueRequest {
@@ -32,13 +31,13 @@ export async function issueQuote(
   facts: { by: Person; version: number; deps: Deps },
 ): Promise<Quote> {
   const { by, deps } = facts;
-  const [company, quote] = await Promise.all([getCompany(tenant), getQuote(tenant, at)]);
-  const numbers = await numbersOf(tenant, at.projectId, company, deps);
+  const read = await readWithNumbers(tenant, at, deps);
+  const { company, quote, numbers } = read;
   refuse(mayIssue({ emailVerified: by.emailVerified, seen: request, now: factsOf(numbers) }));
 
   const issuedAt = deps.clock.now();
   const revision = (quote.revisions[0]?.number ?? 0) + 1;
-  const snapshot = await snapshotOf(tenant, { company, quote, numbers, by, revision, issuedAt });
+  const snapshot = snapshotOf({ ...read, by, revision, issuedAt });
   if (!snapshot) throw problem("cannot-be-computed", "There is no price yet.");
   const frozen = freeze(snapshot);
   const recipients = request.recipients.map(({ name }) => name);

@@ -191,6 +191,12 @@ describe("the PDF", () => {
     writeFileSync(file, bytes);
     expect(execFileSync("pdftotext", ["-layout", file, "-"], { encoding: "utf8" })).toContain("DRAFT, not issued");
   });
+
+  test("of a draft reads quote, company, client, layout and prices in one statement, after the session", async () => {
+    const { company, params, quote } = await anOpenQuote();
+    const answer = await company.estimator.send("getDraftPdf", { params: { ...params, quoteId: quote.id } });
+    expect(answer.headers.get("x-db-queries")).toBe("2");
+  });
 });
 
 describe("a client behind a link", () => {

@@ -1,32 +1,34 @@
 import type { PersonId, ProjectId, Quote, QuoteDraft, QuoteId, QuoteLinkId, RevisionId } from "@cleatwork/contracts";
 import { fromJson } from "../../platform/db/columns.ts";
+import { ask, type Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { quotesFromRows, type QuoteRow } from "./quotes.rows.ts";
 import type { StoredState } from "./quotes.rules.ts";
 
-export const quotesRepository = (db: TenantDb) => ({
-  /** Every quote of a project with revisions, links, mail and answers: one statement. Null when there is no such project. */
-  async list(projectId: ProjectId): Promise<Quote[] | null> {
-    const rows: (QuoteRow & { time_zone: string })[] = await db
-      .from("projects", "p")
-      .join("organizations as o", "o.id", "p.organization_id")
-      .leftJoin("quotes as q", { "q.organization_id": "p.organization_id", "q.project_id": "p.id" })
-      .leftJoin("quote_revisions as r", { "r.organization_id": "q.organization_id", "r.quote_id": "q.id" })
-      .leftJoin("people as issuer", "issuer.id", "r.issued_by")
-      .leftJoin("quote_responses as a", { "a.organization_id": "r.organization_id", "a.revision_id": "r.id" })
-      .leftJoin("quote_links as l", { "l.organization_id": "r.organization_id", "l.revision_id": "r.id" })
-      .leftJoin("outbox as m", "m.id", "l.mail_id")
-      .where("p.id", projectId)
-      .orderBy([{ column: "q.id" }, { column: "r.number", order: "desc" }, { column: "l.id" }])
-      .select(COLUMNS);
-    if (rows.length === 0) return null;
-    const zone = rows[0]?.time_zone ?? "UTC";
-    return quotesFromRows(
-      rows.filter((row) => row.quote_id !== null),
-      zone,
-      db.now(),
-    );
+/** Every quote of a project with revisions, links, mail and answers. Null when there is no such project. */
+export const quotesQuestion = (db: TenantDb, projectId: ProjectId): Question<Quote[] | null> => ({
+  from: db
+    .from("projects", "p")
+    .join("organizations as o", "o.id", "p.organization_id")
+    .leftJoin("quotes as q", { "q.organization_id": "p.organization_id", "q.project_id": "p.id" })
+    .leftJoin("quote_revisions as r", { "r.organization_id": "q.organization_id", "r.quote_id": "q.id" })
+    .leftJoin("people as issuer", "issuer.id", "r.issued_by")
+    .leftJoin("quote_responses as a", { "a.organization_id": "r.organization_id", "a.revision_id": "r.id" })
+    .leftJoin("quote_links as l", { "l.organization_id": "r.organization_id", "l.revision_id": "r.id" })
+    .leftJoin("outbox as m", "m.id", "l.mail_id")
+    .where("p.id", projectId),
+  columns: COLUMNS,
+  order: "q.id, r.number desc, l.id",
+  read: (rows: readonly (QuoteRow & { time_zone: string })[]) => {
+    const [first] = rows;
+    if (!first) return null;
+    const quoted = rows.filter((row) => row.quote_id !== null);
+    return quotesFromRows(quoted, first.time_zone, db.now());
   },
+});
+
+export const quotesRepository = (db: TenantDb) => ({
+  list: (projectId: ProjectId): Promise<Quote[] | null> => ask(quotesQuestion(db, projectId)),
 
   async find(projectId: ProjectId, id: QuoteId): Promise<Quote | null> {
     return (await this.list(projectId))?.find((quote) => quote.id === id) ?? null;
@@ -222,4 +224,4 @@ const COLUMNS = {
   mail_state: "m.state",
   mail_error: "m.last_error",
   time_zone: "o.time_zone",
-};
+} satisfies Readonly<Record<keyof QuoteRow | "time_zone", string>>;

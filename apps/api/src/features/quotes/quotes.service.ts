@@ -1,14 +1,22 @@
-import type { Company, ProjectId, Quote, QuoteDraft, QuoteId, QuoteLinkId, RevisionId } from "@cleatwork/contracts";
+import type {
+  Address,
+  Company,
+  ProjectId,
+  Quote,
+  QuoteDraft,
+  QuoteId,
+  QuoteLinkId,
+  RevisionId,
+} from "@cleatwork/contracts";
 import { recordAudit } from "../../platform/audit.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { problem } from "../../platform/http/problem.ts";
 import type { Deps, Person } from "../../platform/http/route.ts";
-import { getClient } from "../clients/index.ts";
-import { getCompany } from "../companies/index.ts";
-import { computeProject, type ProjectNumbers } from "../pricing/index.ts";
+import { clientAddressQuestion } from "../clients/index.ts";
+import { computeProject, numbersFrom, projectQuestions, type ProjectNumbers } from "../pricing/index.ts";
 import { firstDraft } from "./draft.ts";
 import { quotePdf } from "./quote-pdf.ts";
-import { quotesRepository } from "./quotes.repository.ts";
+import { quotesQuestion, quotesRepository } from "./quotes.repository.ts";
 import { dayIn, NEXT_STATES, validUntil } from "./quotes.rules.ts";
 import { clientQuoteFrom, type QuoteSnapshot } from "./snapshot.ts";
 
@@ -19,8 +27,9 @@ export async function listQuotes(tenant: TenantDb, projectId: ProjectId): Promis
 }
 
 export async function createQuote(tenant: TenantDb, projectId: ProjectId, by: Person, deps: Deps): Promise<Quote> {
-  const company = await getCompany(tenant);
-  const numbers = await numbersOf(tenant, projectId, company, deps);
+  const computed = await computeProject(tenant, projectId, ({ timeZone }) => dayIn(timeZone, deps.clock.now()));
+  if (!computed) throw problem("not-found", "There is no such project.");
+  const { company, numbers } = computed;
   const id = deps.ids.make("quo");
   const draft = firstDraft({
     systems: numbers.systems,
@@ -65,15 +74,22 @@ export async function getQuote(tenant: TenantDb, at: { projectId: ProjectId; quo
   return quote;
 }
 
-export async function numbersOf(
+/** A quote beside its project's numbers as they are now: one statement, so that all of it is of one moment. */
+export async function readWithNumbers(
   tenant: TenantDb,
-  projectId: ProjectId,
-  company: Company,
+  at: { projectId: ProjectId; quoteId: QuoteId },
   deps: Deps,
-): Promise<ProjectNumbers> {
-  const numbers = await computeProject(tenant, projectId, { pricedOn: dayIn(company.timeZone, deps.clock.now()) });
-  if (!numbers) throw problem("not-found", "There is no such project.");
-  return numbers;
+): Promise<{ company: Company; quote: Quote; numbers: ProjectNumbers; clientAddress: Address }> {
+  const { quotes, clientAddress, ...answers } = await tenant.askTogether({
+    ...projectQuestions(tenant, at.projectId),
+    quotes: quotesQuestion(tenant, at.projectId),
+    clientAddress: clientAddressQuestion(tenant, at.projectId),
+  });
+  const { company } = answers;
+  const quote = quotes?.find(({ id }) => id === at.quoteId);
+  const numbers = numbersFrom(answers, dayIn(company.timeZone, deps.clock.now()));
+  if (!quote || !numbers || !clientAddress) throw problem("not-found", "There is no such quote.");
+  return { company, quote, numbers, clientAddress };
 }
 
 export async function withdrawRevision(
@@ -140,16 +156,10 @@ export async function draftPdf(
   by: Person,
   deps: Deps,
 ) {
-  const [company, quote] = await Promise.all([getCompany(tenant), getQuote(tenant, at)]);
-  const numbers = await numbersOf(tenant, at.projectId, company, deps);
-  const snapshot = await snapshotOf(tenant, {
-    company,
-    quote,
-    numbers,
-    by,
-    revision: (quote.revisions[0]?.number ?? 0) + 1,
-    issuedAt: deps.clock.now(),
-  });
+  const read = await readWithNumbers(tenant, at, deps);
+  const { quote, numbers } = read;
+  const revision = (quote.revisions[0]?.number ?? 0) + 1;
+  const snapshot = snapshotOf({ ...read, by, revision, issuedAt: deps.clock.now() });
   if (!snapshot)
     throw problem("cannot-be-computed", `The layout has to be mended first: ${namesOf(numbers).join("; ")}.`);
   return {
@@ -164,21 +174,18 @@ export const namesOf = (numbers: ProjectNumbers): string[] =>
   numbers.problems.map(({ subject, limit }) => `${subject.name || subject.kind}: ${limit}`);
 
 /** Null while there is no price. */
-export async function snapshotOf(
-  tenant: TenantDb,
-  facts: {
-    company: Company;
-    quote: Pick<Quote, "number" | "draft">;
-    numbers: ProjectNumbers;
-    by: Person;
-    revision: number;
-    issuedAt: Date;
-  },
-): Promise<QuoteSnapshot | null> {
+export function snapshotOf(facts: {
+  company: Company;
+  quote: Pick<Quote, "number" | "draft">;
+  numbers: ProjectNumbers;
+  clientAddress: Address;
+  by: Person;
+  revision: number;
+  issuedAt: Date;
+}): QuoteSnapshot | null {
   const { company, quote, numbers, by } = facts;
   const { project, estimate } = numbers;
   if (!estimate) return null;
-  const client = await getClient(tenant, project.clientId);
   return {
     schema: "cleatwork.quote-snapshot/1",
     quoteNumber: quote.number,
@@ -193,7 +200,7 @@ export async function snapshotOf(
       licenseNumber: company.licenseNumber,
       brandColor: company.brandColor,
     },
-    client: { name: project.clientName, address: client.address },
+    client: { name: project.clientName, address: facts.clientAddress },
     project: { id: project.id, name: project.name, siteAddress: project.siteAddress, unitSystem: project.unitSystem },
     draft: quote.draft,
     layoutSequence: numbers.sequence,

@@ -4,9 +4,8 @@ import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { DEFAULT_SPEC_NAME, defaultConstruction } from "./default-spec.ts";
 import { specsRepository } from "./specs.repository.ts";
 
+export { specsQuestion } from "./specs.repository.ts";
 export { specHandlers } from "./specs.routes.ts";
-
-export const listSpecs = (db: TenantDb) => specsRepository(db).list();
 
 /** The spec a newly founded company starts with. */
 export const writeDefaultSpec = (db: TenantDb, id: SpecId, now: Date) =>

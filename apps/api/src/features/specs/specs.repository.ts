@@ -1,15 +1,17 @@
 import type { Spec, SpecId } from "@cleatwork/contracts";
+import { ask, type Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { rowFromSpec, specFromRow, type SpecRequest, type SpecRow } from "./specs.rows.ts";
 
+export const specsQuestion = (db: TenantDb): Question<Spec[]> => ({
+  from: db.from("specs"),
+  columns: { id: "id", name: "name", construction: "construction", version: "version" },
+  order: "name, id",
+  read: (rows: readonly SpecRow[]) => rows.map(specFromRow),
+});
+
 export const specsRepository = (db: TenantDb) => ({
-  async list(): Promise<Spec[]> {
-    const rows = (await db
-      .from("specs")
-      .select("id", "name", "construction", "version")
-      .orderBy(["name", "id"])) as SpecRow[];
-    return rows.map(specFromRow);
-  },
+  list: (): Promise<Spec[]> => ask(specsQuestion(db)),
 
   async insert(id: SpecId, spec: SpecRequest, now: Date): Promise<void> {
     await db.insert("specs", { id, ...rowFromSpec(spec), version: 1, created_at: now });

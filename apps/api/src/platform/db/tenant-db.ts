@@ -1,6 +1,7 @@
 import type { OrganizationId } from "@cleatwork/contracts";
 import type { Knex } from "knex";
 import type { DbContext } from "./db-context.ts";
+import { askTogether, type Question } from "./question.ts";
 import type { TenantTable } from "./tables.ts";
 import { inTransaction } from "./transaction.ts";
 
@@ -15,6 +16,8 @@ export interface TenantDb {
   /** Join along composite keys: `{ "p.organization_id": "q.organization_id", "p.id": "q.project_id" }`. */
   from(table: TenantTable, alias?: string): Knex.QueryBuilder;
   insert(table: TenantTable, rows: Row | readonly Row[]): Promise<void>;
+  /** Several questions in one statement: one round trip, and all answers of one moment. */
+  askTogether<Q extends Readonly<Record<string, Question<unknown>>>>(questions: Q): ReturnType<typeof askTogether<Q>>;
   /** The company's own row. */
   organization(): Knex.QueryBuilder;
   /** Mail of this company. */
@@ -37,6 +40,7 @@ export function tenantDb(context: DbContext, organizationId: OrganizationId): Te
       const list = Array.isArray(rows) ? (rows as readonly Row[]) : [rows as Row];
       await sql(table).insert(list.map((row) => ({ ...row, organization_id: organizationId })));
     },
+    askTogether: (questions) => askTogether(sql, questions),
     organization: () => sql("organizations").where("organizations.id", organizationId),
     outbox: () => sql("outbox").where("outbox.organization_id", organizationId),
     enqueue: async (row) => {
