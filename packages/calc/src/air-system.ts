@@ -66,6 +66,10 @@ export interface ConstructionSpec {
   readonly transitionAngle_rad: number;
   /** How far flexible duct is left slack: 0 is pulled tight, 0.3 is 30 % too long. Adds loss. */
   readonly flexibleSlack: number;
+  /** Sheet that the job asks for whatever a schedule says, such as "24 ga"; null or absent: the schedule's. */
+  readonly gauge?: string | null | undefined;
+  /** Joints, seams and section lengths of rectangular duct are the gauge schedule's where it names them. */
+  readonly constructionFromSchedule?: boolean | undefined;
 }
 
 export interface DesignConditions {
@@ -158,6 +162,8 @@ export interface AirSegment {
   readonly accessories: readonly AccessoryKind[];
   /** Null: the spec's. */
   readonly insulation: Insulation | null;
+  /** Sheet set for this duct by hand, such as "20 ga"; null or absent: the spec's, then the schedule's. */
+  readonly gauge?: string | null | undefined;
 }
 
 export interface AirSystem {

@@ -10,6 +10,15 @@ export * from "./display/index.ts";
 export { takeOff } from "./takeoff/take-off.ts";
 export { sumTotals } from "./takeoff/totals.ts";
 export { NO_GAUGE, PIECE_GROUPINGS, groupPieces, type PieceGroup, type PieceGrouping } from "./takeoff/group-pieces.ts";
+export * from "./takeoff/gauge-schedule.ts";
+export {
+  HOURS_KINDS,
+  HOURS_PER,
+  HOURS_PLACES,
+  type HoursRow,
+  type ProductivityTable,
+  type WorkCondition,
+} from "./takeoff/productivity.ts";
 export { shippedStandards } from "./takeoff/shipped-standards.ts";
 export { sizeKey } from "./takeoff/count-items.ts";
 export * from "./money.ts";

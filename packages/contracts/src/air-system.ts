@@ -48,6 +48,9 @@ export const insulationSchema: z.ZodType<Insulation, Insulation> = z.discriminat
   z.strictObject({ kind: z.literal("liner"), thickness_m: positiveMetersSchema }),
 ]);
 
+/** "24 ga" or "0.050 in.": a sheet of some metal. Whether the metal has such a sheet, the takeoff says. */
+export const sheetLabel = z.string().trim().min(1).max(20);
+
 export const constructionSpecSchema: z.ZodType<ConstructionSpec, ConstructionSpec> = z.strictObject({
   material: z.enum(MATERIALS),
   pressureClass_pa: pascalsSchema,
@@ -75,6 +78,8 @@ export const constructionSpecSchema: z.ZodType<ConstructionSpec, ConstructionSpe
   }),
   transitionAngle_rad: z.number().positive().max(Math.PI),
   flexibleSlack: z.number().min(0).max(0.5),
+  gauge: sheetLabel.nullable().optional(),
+  constructionFromSchedule: z.boolean().optional(),
 });
 
 export const designSchema: z.ZodType<DesignConditions, DesignConditions> = z.strictObject({
@@ -134,6 +139,7 @@ const airSegmentSchema: z.ZodType<AirSegment, AirSegment> = z.strictObject({
   fitting: z.enum(FITTING_TYPES).nullable(),
   accessories: z.array(z.enum(ACCESSORY_KINDS)).max(20),
   insulation: insulationSchema.nullable(),
+  gauge: sheetLabel.nullable().optional(),
 });
 
 export const airSystemSchema: z.ZodType<AirSystem, AirSystem> = z.strictObject({

@@ -7,6 +7,7 @@ import type { Solution, SystemProblem } from "../network/solution.ts";
 import { buildTree } from "../network/tree.ts";
 import { meters } from "../quantity.ts";
 import { gaugeReader } from "./gauge.ts";
+import { hoursReader } from "./productivity.ts";
 import type { ShopStandards } from "./takeoff.ts";
 
 export interface Frame {
@@ -21,6 +22,7 @@ export interface Frame {
   readonly insulation: readonly Insulation[];
   /** Of the system's metal and pressure class. */
   readonly readGauge: ReturnType<typeof gaugeReader>;
+  readonly readHours: ReturnType<typeof hoursReader>;
 }
 
 export function frameOf(system: AirSystem, solution: Solution, standards: ShopStandards): Frame {
@@ -46,7 +48,8 @@ export function frameOf(system: AirSystem, solution: Solution, standards: ShopSt
       metalSection(section, system.segments[s]!.flexible ? { kind: "none" } : insulation[s]!),
     ),
     insulation,
-    readGauge: gaugeReader(standards.gauges, system.spec),
+    readGauge: gaugeReader({ company: standards.companyGauges, shipped: standards.gauges }, system.spec),
+    readHours: hoursReader(standards.productivity),
   };
 }
 

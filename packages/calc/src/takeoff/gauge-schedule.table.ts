@@ -1,33 +1,23 @@
 /**
- * Gauge by size, pressure class and construction, as shipped. A company replaces it with its own.
+ * Gauge, reinforcement and joint by size, pressure class and construction, as shipped. A company's own stands before it.
  *
- * Rectangular: the lighter gauges need the standard's reinforcement at joints 5 ft apart. Where it asks for a closer
- * spacing, or for stiffened round duct, there is no row: a size beyond its column is told, not guessed.
+ * Rectangular: every spacing that the standard prints. Cells that it leaves blank or calls not designed stay so: a size
+ * beyond its column is told, not guessed. Table 3-2B ends here before the two cells on which copies disagree.
  */
 import type { Material } from "../air-system.ts";
-import { inches, inchesOfWater } from "../quantity.ts";
-import type { GaugeSchedule } from "./takeoff.ts";
+import { feet, inches, inchesOfWater } from "../quantity.ts";
+import type { GaugeChart, GaugeRow, GaugeSchedule, Reinforcement } from "./gauge-schedule.ts";
+import { rectangularReinforcement, SPACINGS_FT } from "./rectangular-reinforcement.table.ts";
 
 /** Largest side or diameter in inches, gauge; for each class in inches of water, as printed. */
 interface PrintedClass {
   readonly class_inwg: number;
-  readonly sizes: readonly (readonly [upTo_in: number, gauge: number])[];
+  /** A ring after the gauge where the duct is stiffened: its angle and how many feet apart. */
+  readonly sizes: readonly (readonly [upTo_in: number, gauge: number, ring?: string])[];
 }
 
 /** The table goes on above its last row without an end; no duct is wider than this. */
 const OPEN_END = 1000;
-
-/** Tables 1-3 to 1-9, gauge in the 5 ft column, joints or reinforcement 5 ft apart. */
-// prettier-ignore
-const rectangularAt5ft: readonly PrintedClass[] = [
-  { class_inwg: 0.5, sizes: [[54, 26], [60, 24], [84, 22], [96, 20], [108, 18]] },
-  { class_inwg: 1, sizes: [[30, 26], [42, 24], [60, 22], [84, 18], [96, 16]] },
-  { class_inwg: 2, sizes: [[26, 26], [30, 24], [36, 22], [48, 20], [60, 18], [72, 16]] },
-  { class_inwg: 3, sizes: [[12, 26], [26, 24], [30, 22], [42, 20], [54, 18], [60, 16]] },
-  { class_inwg: 4, sizes: [[12, 26], [22, 24], [30, 22], [36, 20], [48, 18], [60, 16]] },
-  { class_inwg: 6, sizes: [[8, 26], [12, 24], [24, 22], [28, 20], [36, 18], [42, 16]] },
-  { class_inwg: 10, sizes: [[8, 24], [12, 22], [18, 20], [28, 18], [36, 16]] },
-];
 
 /** Table 3-2A. */
 // prettier-ignore
@@ -43,18 +33,18 @@ const roundSeamPositive: readonly PrintedClass[] = [
   { class_inwg: 10, sizes: [[6, 28], [10, 26], [14, 24], [26, 22], [50, 20], [60, 18], [84, 16]] },
 ];
 
-/** Table 3-2B, unstiffened only. */
+/** Table 3-2B. Rings: A 1 × 1 × 1/8 in. angle, B 1 1/4 × 1 1/4 × 3/16, F 2 × 2 × 1/4; then feet apart. */
 // prettier-ignore
 const roundSpiralNegative: readonly PrintedClass[] = [
   { class_inwg: 2, sizes: [[15, 28], [17, 26], [23, 24], [30, 22], [48, 20], [60, 18], [72, 16]] },
-  { class_inwg: 4, sizes: [[9, 28], [13, 26], [19, 24], [24, 22], [36, 20], [48, 18]] },
-  { class_inwg: 10, sizes: [[11, 26], [14, 24], [22, 22], [26, 20], [36, 18]] },
+  { class_inwg: 4, sizes: [[9, 28], [13, 26], [19, 24], [24, 22], [36, 20], [48, 18], [72, 18, "F6"]] },
+  { class_inwg: 10, sizes: [[11, 26], [14, 24], [22, 22], [26, 20], [36, 18], [42, 18, "F12"], [48, 18, "F6"]] },
 ];
 // prettier-ignore
 const roundSeamNegative: readonly PrintedClass[] = [
-  { class_inwg: 2, sizes: [[10, 28], [13, 26], [17, 24], [20, 22], [26, 20], [34, 18], [42, 16]] },
-  { class_inwg: 4, sizes: [[8, 28], [10, 26], [13, 24], [16, 22], [20, 20], [26, 18], [33, 16]] },
-  { class_inwg: 10, sizes: [[8, 26], [9, 24], [12, 22], [15, 20], [21, 18], [24, 16]] },
+  { class_inwg: 2, sizes: [[10, 28], [13, 26], [17, 24], [20, 22], [26, 20], [34, 18], [42, 16], [48, 18, "A6"], [60, 18, "B4"]] },
+  { class_inwg: 4, sizes: [[8, 28], [10, 26], [13, 24], [16, 22], [20, 20], [26, 18], [33, 16], [36, 20, "A6"], [48, 18, "B6"]] },
+  { class_inwg: 10, sizes: [[8, 26], [9, 24], [12, 22], [15, 20], [21, 18], [24, 16], [26, 18, "A4"], [29, 16, "A4"], [36, 16, "B4"]] },
 ];
 
 /** Table 3-4 by major dimension; the standard has it for duct under pressure. */
@@ -80,53 +70,123 @@ const aluminumRound = {
   seamNegative: [[8, 0.04], [14, 0.04], [26, 0.05], [36, 0.063], [50, 0.071], [60, 0.09]],
 } as const;
 
-type Row = GaugeSchedule["rows"][number];
-type RowKind = Omit<Row, "material" | "pressureClass_pa" | "sizes">;
+type ChartKind = Omit<GaugeChart, "material" | "pressureClass_pa" | "sizes">;
 
-const inGauge = (materials: readonly Material[], kind: RowKind, classes: readonly PrintedClass[]): readonly Row[] =>
+const NOT_REQUIRED: Reinforcement = { kind: "not-required" };
+const BLANK: Reinforcement = { kind: "blank" };
+
+const ring = (mark: string): Reinforcement => ({
+  kind: "required",
+  grade: `ring ${mark.charAt(0)}`,
+  spacing_m: feet(Number(mark.slice(1))),
+});
+
+const inGauge = (
+  materials: readonly Material[],
+  kind: ChartKind,
+  classes: readonly PrintedClass[],
+  unstiffened: Reinforcement,
+): readonly GaugeChart[] =>
   materials.flatMap((material) =>
     classes.map(({ class_inwg, sizes }) => ({
       ...kind,
       material,
       pressureClass_pa: inchesOfWater(class_inwg),
-      sizes: sizes.map(([upTo_in, gauge]) => ({ upTo_m: inches(upTo_in), gauge: `${gauge} ga` })),
+      sizes: sizes.map(([upTo_in, gauge, stiffened]) => ({
+        upTo_m: inches(upTo_in),
+        gauge: `${gauge} ga`,
+        reinforcement: stiffened === undefined ? unstiffened : ring(stiffened),
+      })),
     })),
   );
 
-const inThickness = (kind: RowKind, sizes: readonly (readonly [upTo_in: number, thickness_in: number])[]): Row => ({
+const inThickness = (
+  kind: ChartKind,
+  sizes: readonly (readonly [upTo_in: number, thickness_in: number])[],
+): GaugeChart => ({
   ...kind,
   material: "aluminum",
   pressureClass_pa: inchesOfWater(2),
   sizes: sizes.map(([upTo_in, thickness_in]) => ({
     upTo_m: inches(upTo_in),
     gauge: `${thickness_in.toFixed(3)} in.`,
+    reinforcement: NOT_REQUIRED,
   })),
 });
+
+/** One chart for each class and printed spacing. */
+const rectangular = (material: Material): readonly GaugeChart[] =>
+  rectangularReinforcement.flatMap(({ class_inwg, rows }) =>
+    SPACINGS_FT.map((spacing_ft, column) => ({
+      material,
+      shape: "rectangular" as const,
+      pressureClass_pa: inchesOfWater(class_inwg),
+      spacing_m: feet(spacing_ft),
+      sizes: rows.map(([upTo_in, unreinforced, cells]) =>
+        rectangularRow(upTo_in, unreinforced, cells.split(" ")[column]!, spacing_ft),
+      ),
+    })),
+  );
+
+/**
+ * A printed cell read. Where it is blank or asks for none, the sheet that needs none governs, if there is one.
+ *
+ * The joint by grade is what shops use: A a flat drive, B and C a standing S, D and up a flange; found in two contractors'
+ * shop packets that restate the standard's figures 1-4 and 1-5.
+ */
+function rectangularRow(upTo_in: number, unreinforced: number | null, cell: string, spacing_ft: number): GaugeRow {
+  const upTo_m = inches(upTo_in);
+  const unreinforcedGauge = unreinforced === null ? null : `${unreinforced} ga`;
+  const printed = /^([A-L])(t?)-(\d+)([A-L]?)$/.exec(cell);
+  if (!printed) {
+    if (cell === "ND") return { upTo_m, gauge: null, reinforcement: { kind: "not-designed" }, unreinforcedGauge };
+    if (unreinforcedGauge === null) return { upTo_m, gauge: null, reinforcement: BLANK, unreinforcedGauge };
+    return {
+      upTo_m,
+      gauge: unreinforcedGauge,
+      reinforcement: NOT_REQUIRED,
+      unreinforcedGauge,
+      joint: "slip-and-drive",
+    };
+  }
+  const [, letter = "", rod, gauge, tied] = printed;
+  const grade = rod ? `${letter} with tie rod` : tied ? `${letter}, or ${tied} with tie rod` : letter;
+  return {
+    upTo_m,
+    gauge: `${gauge} ga`,
+    reinforcement: { kind: "required", grade, spacing_m: feet(spacing_ft) },
+    unreinforcedGauge,
+    joint: letter === "A" ? "slip-and-drive" : letter === "B" || letter === "C" ? "standing-s" : "flange",
+  };
+}
 
 /** The standard gives stainless round duct the galvanized gauges. For the rest of these: common practice, no source. */
 const STEELS: readonly Material[] = ["galvanized", "stainless", "black-steel"];
 
+const round = (
+  pressureSign: "positive" | "negative",
+  construction: "spiral" | "longitudinal-seam",
+  classes: readonly PrintedClass[],
+) => inGauge(STEELS, { shape: "round", pressureSign, construction }, classes, NOT_REQUIRED);
+
+/** How the flat sides are stiffened, the table leaves to the one of rectangular duct: blank here. */
+const oval = (construction: "spiral" | "longitudinal-seam" | "fitting", classes: readonly PrintedClass[]) =>
+  inGauge(STEELS, { shape: "flat-oval", pressureSign: "positive", construction }, classes, BLANK);
+
 export const shippedGauges: GaugeSchedule = {
-  name: "Shipped schedule, joints 5 ft apart",
+  name: "Shipped schedule",
   source:
-    "SMACNA, HVAC Duct Construction Standards, Metal and Flexible, 2nd ed. 1995 (open legal copy), tables 1-3 to 1-9, 3-2 to 3-4; stainless and black steel by the galvanized gauges",
+    "SMACNA, HVAC Duct Construction Standards, Metal and Flexible, 2nd ed. 1995 (open legal copy), tables 1-3 to 1-9, 3-2 to 3-4; rectangular stainless and black steel by the galvanized gauges, common practice",
+  standing: "found",
   rows: [
-    ...inGauge(STEELS, { shape: "rectangular" }, rectangularAt5ft),
-    ...inGauge(STEELS, { shape: "round", pressureSign: "positive", construction: "spiral" }, roundSpiralPositive),
-    ...inGauge(
-      STEELS,
-      { shape: "round", pressureSign: "positive", construction: "longitudinal-seam" },
-      roundSeamPositive,
-    ),
-    ...inGauge(STEELS, { shape: "round", pressureSign: "negative", construction: "spiral" }, roundSpiralNegative),
-    ...inGauge(
-      STEELS,
-      { shape: "round", pressureSign: "negative", construction: "longitudinal-seam" },
-      roundSeamNegative,
-    ),
-    ...inGauge(STEELS, { shape: "flat-oval", pressureSign: "positive", construction: "spiral" }, ovalSpiral),
-    ...inGauge(STEELS, { shape: "flat-oval", pressureSign: "positive", construction: "longitudinal-seam" }, ovalSeam),
-    ...inGauge(STEELS, { shape: "flat-oval", pressureSign: "positive", construction: "fitting" }, ovalFitting),
+    ...STEELS.flatMap(rectangular),
+    ...round("positive", "spiral", roundSpiralPositive),
+    ...round("positive", "longitudinal-seam", roundSeamPositive),
+    ...round("negative", "spiral", roundSpiralNegative),
+    ...round("negative", "longitudinal-seam", roundSeamNegative),
+    ...oval("spiral", ovalSpiral),
+    ...oval("longitudinal-seam", ovalSeam),
+    ...oval("fitting", ovalFitting),
     inThickness({ shape: "round", pressureSign: "positive", construction: "spiral" }, aluminumRound.spiralPositive),
     inThickness(
       { shape: "round", pressureSign: "positive", construction: "longitudinal-seam" },

@@ -2,10 +2,19 @@
 import type { ConstructionSpec, Insulation, Section } from "../air-system.ts";
 import { outerPerimeter } from "../geometry/section.ts";
 import { hours, kilograms, meters, squareMeters, type Meters, type SquareMeters } from "../quantity.ts";
-import { longestSide, scheduleShape, straightConstruction, type GaugeQuestion, type gaugeReader } from "./gauge.ts";
-import { areaArithmetic, flexibleArithmetic, weightArithmetic } from "./piece-arithmetic.ts";
+import {
+  longestSide,
+  missingWords,
+  pieceQuestion,
+  scheduleShape,
+  straightConstruction,
+  type GaugeAnswer,
+  type GaugeQuestion,
+  type gaugeReader,
+} from "./gauge.ts";
+import { areaArithmetic, hoursArithmetic, weightArithmetic } from "./piece-arithmetic.ts";
 import type { FittingPlan } from "./fitting-plan.ts";
-import { findSheet, type Sheet } from "./sheet-weights.table.ts";
+import { hoursOf, type hoursReader } from "./productivity.ts";
 import { stretchOut } from "./stretch-out.table.ts";
 import { girth } from "./surface/girth.ts";
 import type { Arithmetic, Piece, ShopStandards } from "./takeoff.ts";
@@ -20,6 +29,9 @@ export interface PieceOrigin {
   readonly spec: ConstructionSpec;
   readonly standards: ShopStandards;
   readonly readGauge: ReturnType<typeof gaugeReader>;
+  readonly readHours: ReturnType<typeof hoursReader>;
+  /** The sheet that the layout sets for this duct, whatever the schedules say. */
+  readonly gaugeOverride: string | null;
   readonly insulation: Insulation;
 }
 
@@ -83,20 +95,28 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
   const { spec, standards, insulation } = origin;
   const { section, netArea } = metal;
   const part = metal.kind === "straight" ? "straight" : "fitting";
-  const { gauges, productivity, blankAllowance } = standards;
+  const { productivity, blankAllowance } = standards;
 
-  const gauge = origin.readGauge({
-    shape: scheduleShape(metal.gaugeSection),
-    size_m: longestSide(metal.gaugeSection),
-    construction: metal.construction,
+  const answer = origin.readGauge(pieceQuestion(metal.gaugeSection, metal.construction, spec), {
+    piece: origin.gaugeOverride,
+    spec: spec.gauge ?? null,
   });
   // A label that no sheet of the metal answers to is as good as none: no weight is made up for it.
-  const sheet = gauge === null ? null : findSheet(spec.material, gauge);
+  const { gauge, sheet } = answer;
 
   const blankArea = squareMeters(netArea * (1 + blankAllowance[part]));
   const weight = kilograms(netArea * (sheet?.weight_kg_m2 ?? 0));
-  const shopHours = hours(weight * productivity.shop_h_per_kg[part]);
-  const fieldHours = hours(weight * productivity.field_h_per_kg[part] * productivity.conditionFactor);
+  const work = {
+    kind: metal.kind,
+    shape: scheduleShape(metal.gaugeSection),
+    material: spec.material,
+    size_m: longestSide(metal.gaugeSection),
+  };
+  const shopRow = sheet ? origin.readHours({ place: "shop", ...work }) : null;
+  const fieldRow = sheet ? origin.readHours({ place: "field", ...work }) : null;
+  const measure = { weight, length: metal.length };
+  const shopHours = hoursOf(shopRow, measure, productivity.conditionFactor);
+  const fieldHours = hoursOf(fieldRow, measure, productivity.conditionFactor);
   const outer = outerPerimeter(section);
   const outerArea = squareMeters(section.shape === "annular" ? (netArea * outer) / girth(section) : netArea);
   const wrapShare = insulation.kind === "wrap" ? 1 + stretchOut(section, insulation.thickness_m) / outer : 0;
@@ -116,19 +136,9 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     standards,
   });
   if (gauge !== null && sheet) {
-    for (const line of weightArithmetic({
-      part,
-      netArea,
-      gauge,
-      spec,
-      sheet,
-      weight,
-      shopHours,
-      fieldHours,
-      standards,
-    })) {
-      arithmetic.push(line);
-    }
+    arithmetic.push(weightArithmetic({ netArea, gauge, spec, sheet, weight }));
+    if (shopRow) arithmetic.push(hoursArithmetic(shopRow, measure, productivity, shopHours));
+    if (fieldRow) arithmetic.push(hoursArithmetic(fieldRow, measure, productivity, fieldHours));
   }
 
   return {
@@ -145,11 +155,15 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     angle_rad: metal.angle_rad,
     length_m: metal.length,
     material: spec.material,
-    gauge: sheet ? gauge : null,
+    gauge,
     sheetThickness_m: sheet?.thickness_m ?? null,
-    gaugeSource: gaugeSource(gauges.name, gauge, sheet),
-    joint: jointOf(section, spec),
-    seam: seamOf(section, spec, part),
+    gaugeSource: gaugeSource(answer),
+    gaugeDecider: answer.decider,
+    scheduledGauge: answer.scheduled,
+    reinforcement: answer.reinforcement,
+    otherReinforcement: answer.otherReinforcement,
+    joint: jointOf(section, spec, answer),
+    seam: seamOf(section, spec, part, answer),
     jointCount: section.shape === "annular" ? 2 : 1,
     netArea_m2: netArea,
     blankArea_m2: blankArea,
@@ -180,6 +194,10 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   gauge: piece.gauge,
   sheetThickness_m: piece.sheetThickness_m,
   gaugeSource: piece.gaugeSource,
+  gaugeDecider: piece.gaugeDecider,
+  scheduledGauge: piece.scheduledGauge,
+  reinforcement: piece.reinforcement,
+  otherReinforcement: piece.otherReinforcement,
   joint: piece.joint,
   seam: piece.seam,
   jointCount: piece.jointCount,
@@ -193,10 +211,8 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   arithmetic: piece.arithmetic,
 });
 
-function gaugeSource(schedule: string, gauge: string | null, sheet: Sheet | null): string {
-  if (gauge === null) return `${schedule}: no row for this size, pressure class and metal`;
-  return sheet ? schedule : `${schedule}: ${gauge}, for which no sheet weight is known`;
-}
+const gaugeSource = ({ source, missing }: GaugeAnswer): string =>
+  missing === null ? source : `${source}: ${missingWords(missing)}`;
 
 const RECTANGULAR_JOINTS = {
   "slip-and-drive": "slip and drive",
@@ -206,20 +222,40 @@ const RECTANGULAR_JOINTS = {
 const ROUND_JOINTS = { "slip-coupling": "slip coupling", flange: "flange" } as const;
 const RECTANGULAR_SEAMS = { "corner-lock": "corner lock", "button-lock": "button lock" } as const;
 
-const jointOf = (section: Section, spec: ConstructionSpec): string =>
-  section.shape === "rectangular" ? RECTANGULAR_JOINTS[spec.rectangularJoint] : ROUND_JOINTS[spec.roundJoint];
+const jointOf = (section: Section, spec: ConstructionSpec, scheduled: Pick<GaugeAnswer, "joint">): string => {
+  if (section.shape !== "rectangular") return ROUND_JOINTS[spec.roundJoint];
+  const joint = spec.constructionFromSchedule ? scheduled.joint : null;
+  return joint === null ? RECTANGULAR_JOINTS[spec.rectangularJoint] : (wordOf(RECTANGULAR_JOINTS, joint) ?? joint);
+};
 
-function seamOf(section: Section, spec: ConstructionSpec, part: "straight" | "fitting"): string {
-  if (section.shape === "rectangular") return RECTANGULAR_SEAMS[spec.rectangularSeam];
+function seamOf(
+  section: Section,
+  spec: ConstructionSpec,
+  part: "straight" | "fitting",
+  scheduled: Pick<GaugeAnswer, "seam">,
+): string {
+  if (section.shape === "rectangular") {
+    const seam = spec.constructionFromSchedule ? scheduled.seam : null;
+    return seam === null ? RECTANGULAR_SEAMS[spec.rectangularSeam] : (wordOf(RECTANGULAR_SEAMS, seam) ?? seam);
+  }
   return spec.roundConstruction === "spiral" && part === "straight" ? "spiral" : "longitudinal";
 }
 
+const wordOf = (words: Readonly<Record<string, string>>, key: string): string | undefined => words[key];
+
 /** Bought by the length; it comes insulated and is not cut from sheet. */
 export function flexiblePiece(origin: PieceOrigin, mark: string, section: Section, straight: Meters): Piece {
-  const { flexibleSlack } = origin.spec;
   const { productivity } = origin.standards;
-  const length = meters(straight * (1 + flexibleSlack));
-  const fieldHours = hours(length * productivity.flexible_h_per_m * productivity.conditionFactor);
+  const length = meters(straight * (1 + origin.spec.flexibleSlack));
+  const row = origin.readHours({
+    place: "field",
+    kind: "flexible",
+    shape: scheduleShape(section),
+    material: "flexible",
+    size_m: longestSide(section),
+  });
+  const measure = { weight: kilograms(0), length };
+  const fieldHours = hoursOf(row, measure, productivity.conditionFactor);
   return {
     mark,
     systemId: origin.systemId,
@@ -237,6 +273,10 @@ export function flexiblePiece(origin: PieceOrigin, mark: string, section: Sectio
     gauge: null,
     sheetThickness_m: null,
     gaugeSource: "",
+    gaugeDecider: null,
+    scheduledGauge: null,
+    reinforcement: { kind: "not-required" },
+    otherReinforcement: null,
     joint: "band and tape",
     seam: "",
     jointCount: 1,
@@ -247,6 +287,6 @@ export function flexiblePiece(origin: PieceOrigin, mark: string, section: Sectio
     linerArea_m2: squareMeters(0),
     shopHours_h: hours(0),
     fieldHours_h: fieldHours,
-    arithmetic: [flexibleArithmetic({ straight, flexibleSlack, fieldHours, productivity })],
+    arithmetic: row ? [hoursArithmetic(row, measure, productivity, fieldHours)] : [],
   };
 }

@@ -2,8 +2,9 @@
 import type { ConstructionSpec } from "../air-system.ts";
 import type { Hours, Kilograms, Meters, SquareMeters } from "../quantity.ts";
 import { sheetTable, type Sheet } from "./sheet-weights.table.ts";
+import { hoursBasis, type HoursRow, type ProductivityTable } from "./productivity.ts";
 import { stretchOutTable } from "./stretch-out.table.ts";
-import type { Arithmetic, ProductivityTable, ShopStandards } from "./takeoff.ts";
+import type { Arithmetic, ShopStandards } from "./takeoff.ts";
 
 const SHEET_BASIS = `${sheetTable.source}; ${sheetTable.basis}`;
 
@@ -57,68 +58,40 @@ export function areaArithmetic(areas: {
   return lines;
 }
 
-export function weightArithmetic(piece: {
-  readonly part: "straight" | "fitting";
+export const weightArithmetic = (piece: {
   readonly netArea: SquareMeters;
   readonly gauge: string;
   readonly spec: ConstructionSpec;
   readonly sheet: Sheet;
   readonly weight: Kilograms;
-  readonly shopHours: Hours;
-  readonly fieldHours: Hours;
-  readonly standards: ShopStandards;
-}): Arithmetic[] {
-  const { part, weight, sheet, standards } = piece;
-  const { productivity } = standards;
-  return [
-    {
-      quantity: "weight",
-      terms: [
-        { label: "net area", value: piece.netArea, unit: "m²" },
-        { label: `${piece.gauge} ${piece.spec.material}`, value: sheet.weight_kg_m2, unit: "kg/m²" },
-      ],
-      result: weight,
-      unit: "kg",
-      basis: SHEET_BASIS,
-    },
-    {
-      quantity: "shop-hours",
-      terms: [
-        { label: "weight", value: weight, unit: "kg" },
-        { label: "hours", value: productivity.shop_h_per_kg[part], unit: "h/kg" },
-      ],
-      result: piece.shopHours,
-      unit: "h",
-      basis: productivity.source,
-    },
-    {
-      quantity: "field-hours",
-      terms: [
-        { label: "weight", value: weight, unit: "kg" },
-        { label: "hours", value: productivity.field_h_per_kg[part], unit: "h/kg" },
-        { label: "conditions", value: productivity.conditionFactor, unit: "×" },
-      ],
-      result: piece.fieldHours,
-      unit: "h",
-      basis: productivity.source,
-    },
-  ];
-}
-
-export const flexibleArithmetic = (piece: {
-  readonly straight: Meters;
-  readonly flexibleSlack: number;
-  readonly fieldHours: Hours;
-  readonly productivity: ProductivityTable;
 }): Arithmetic => ({
-  quantity: "field-hours",
+  quantity: "weight",
   terms: [
-    { label: "center line", value: piece.straight, unit: "m" },
-    { label: "slack", value: 1 + piece.flexibleSlack, unit: "×" },
-    { label: "hours", value: piece.productivity.flexible_h_per_m, unit: "h/m" },
-    { label: "conditions", value: piece.productivity.conditionFactor, unit: "×" },
+    { label: "net area", value: piece.netArea, unit: "m²" },
+    { label: `${piece.gauge} ${piece.spec.material}`, value: piece.sheet.weight_kg_m2, unit: "kg/m²" },
   ],
-  result: piece.fieldHours,
-  unit: "h",
-  basis: piece.productivity.source,
+  result: piece.weight,
+  unit: "kg",
+  basis: SHEET_BASIS,
 });
+
+export function hoursArithmetic(
+  row: HoursRow,
+  measure: { readonly weight: Kilograms; readonly length: Meters },
+  { name, conditionFactor }: ProductivityTable,
+  result: Hours,
+): Arithmetic {
+  const { label, value, unit, hoursUnit } = hoursBasis(row, measure);
+  const terms = [
+    { label, value, unit },
+    { label: "hours", value: row.hours_h, unit: hoursUnit },
+  ];
+  if (row.place === "field") terms.push({ label: "conditions", value: conditionFactor, unit: "×" });
+  return {
+    quantity: row.place === "shop" ? "shop-hours" : "field-hours",
+    terms,
+    result,
+    unit: "h",
+    basis: `${name}, ${row.standing}${row.note === "" ? "" : `: ${row.note}`}`,
+  };
+}

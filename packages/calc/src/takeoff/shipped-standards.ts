@@ -11,6 +11,7 @@ import type { ShopStandards } from "./takeoff.ts";
  */
 export const shippedStandards: ShopStandards = {
   gauges: shippedGauges,
+  companyGauges: null,
   productivity: shippedProductivity,
   blankAllowance: { straight: 0.07, fitting: 0.12 },
   allowanceSource: "common practice: 1 1/4 in. a corner seam, 1 in. a slip or drive edge; no single source",

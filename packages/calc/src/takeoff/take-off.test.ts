@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import type { Section } from "../air-system.ts";
+import type { AirSystem, Section } from "../air-system.ts";
 import {
   aRun,
   aSystem,
@@ -220,6 +220,7 @@ describe("fittings", () => {
     expect(takeoff.pieces.some(({ segmentId, kind }) => segmentId === "to-corner" && kind === "straight")).toBe(false);
     expect(takeoff.findings.map(({ code, segmentId }) => [code, segmentId])).toEqual([
       ["fittings-fill-segment", "to-corner"],
+      ["joint-below-reinforcement", "to-end"],
     ]);
   });
 });
@@ -379,7 +380,7 @@ describe("counted things", () => {
     );
     expect(count(takeoff, "volume-damper:24x12")).toBe(1);
     expect(count(takeoff, "grille-24x12")).toBe(1);
-    expect(takeoff.findings.map(({ code }) => code)).toEqual(["accessory-needs-review"]);
+    expect(takeoff.findings.map(({ code }) => code)).toEqual(["accessory-needs-review", "joint-below-reinforcement"]);
   });
 });
 
@@ -438,5 +439,62 @@ describe("a whole building", () => {
       const own = takeoff.pieces.filter((piece) => piece.segmentId === segmentId);
       expect(straightLength(own)).toBeLessThanOrEqual(meters(length + 1e-6));
     }
+  });
+});
+
+describe("what is decided before the schedule", () => {
+  const gaugesOf = (system: AirSystem) =>
+    takeoffOf(system).pieces.map(({ gauge, gaugeDecider }) => [gauge, gaugeDecider]);
+
+  it("a spec's sheet is used for every piece, and each says so", () => {
+    const system = aRun(rectangular(12, 12), 3, { gauge: "22 ga" });
+    expect(gaugesOf(system)).toContainEqual(["22 ga", "spec"]);
+    expect(takeoffOf(system).pieces[0]).toMatchObject({
+      scheduledGauge: "26 ga",
+      gaugeSource: "asked for by the spec",
+    });
+  });
+
+  it("a duct's own sheet goes before the spec's", () => {
+    const system = aRun(rectangular(12, 12), 3, { gauge: "22 ga" });
+    const own = { ...system, segments: system.segments.map((segment) => ({ ...segment, gauge: "18 ga" })) };
+    expect(gaugesOf(own)).toContainEqual(["18 ga", "piece"]);
+  });
+
+  it("sheet lighter than the schedule's is pointed out", () => {
+    const { findings } = takeoffOf(aRun(rectangular(40, 12), 3, { gauge: "26 ga", rectangularJoint: "flange" }));
+    expect(findings.map(({ code, severity }) => [code, severity])).toEqual([["gauge-lighter-than-schedule", "warn"]]);
+  });
+
+  it("a spec that leaves joints to the schedule gets those of its grade", () => {
+    const system = aRun(rectangular(54, 18), 3, { constructionFromSchedule: true });
+    expect(
+      takeoffOf(system)
+        .pieces.filter(({ kind }) => kind === "straight")
+        .map(({ joint }) => joint),
+    ).toContain("flange");
+    expect(takeoffOf(system).findings.map(({ code }) => code)).not.toContain("joint-below-reinforcement");
+  });
+
+  it("a schedule that says how long pieces are made has them cut so, where the spec leaves it", () => {
+    const rows = shippedStandards.gauges.rows.map((chart) => ({
+      ...chart,
+      sizes: chart.sizes.map((size) => ({ ...size, sectionLength_m: inches(40) })),
+    }));
+    const standards = { ...shippedStandards, gauges: { ...shippedStandards.gauges, rows } };
+    const lengthOf = (system: AirSystem) => takeoffOf(system, standards).pieces[0]?.length_m;
+    expect(lengthOf(aRun(rectangular(24, 12), 10, { constructionFromSchedule: true }))).toBeCloseTo(inches(40), 9);
+    expect(lengthOf(aRun(rectangular(24, 12), 10))).toBeCloseTo(inches(60), 9);
+  });
+
+  it("hours that the table does not hold are nothing, and are told", () => {
+    const { productivity } = shippedStandards;
+    const rows = productivity.rows.filter(({ place }) => place === "field");
+    const { findings, totals } = takeoffOf(aRun(round(10), 10), {
+      ...shippedStandards,
+      productivity: { ...productivity, rows },
+    });
+    expect(totals.shopHours_h).toBe(0);
+    expect(findings.map(({ code, severity }) => [code, severity])).toEqual([["hours-not-in-table", "warn"]]);
   });
 });

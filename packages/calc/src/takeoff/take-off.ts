@@ -1,4 +1,5 @@
 /** The metal stage: a solved system in, pieces to make and things to count out. */
+import type { Section } from "../air-system.ts";
 import { isElbow } from "../fittings/infer.ts";
 import type { Solution } from "../network/solution.ts";
 import { KILOGRAMS_PER_POUND, meters, type Meters } from "../quantity.ts";
@@ -7,6 +8,8 @@ import { cutStraight } from "./cut-straight.ts";
 import { frameOf, type Frame } from "./frame.ts";
 import { heavyPiece } from "./making.table.ts";
 import { fittingPiece, flexiblePiece, marked, straightPiece, type PieceOrigin } from "./make-piece.ts";
+import { checkJoints, isLighterThanScheduled, missingHours } from "./schedule-findings.ts";
+import { NO_OVERRIDES, pieceQuestion, straightConstruction } from "./gauge.ts";
 import { fittingMark, straightMark } from "./marks.ts";
 import type { FittingPlans } from "./fitting-plan.ts";
 import { planFittings } from "./plan-fittings.ts";
@@ -42,6 +45,7 @@ export function takeOff({ system, standards }: TakeoffInput, solution: Solution)
   }
 
   const madeElbows = plans.of.map((list) => list.filter(({ type }) => isElbow(type)).length);
+  checkJoints(frame, pieces, findings);
   items.push(...countHangers(frame, madeElbows), ...countDevices(frame));
   return { systemId: system.id, pieces, items, totals: totalsOf(pieces, items), findings };
 }
@@ -61,6 +65,8 @@ function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: Takeof
     spec,
     standards,
     readGauge: frame.readGauge,
+    readHours: frame.readHours,
+    gaugeOverride: segment.gauge ?? null,
     insulation: segment.flexible ? { kind: "none" } : frame.insulation[s]!,
   };
 
@@ -76,7 +82,8 @@ function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: Takeof
     return pieces;
   }
   const shape = section.shape === "annular" ? "round" : section.shape === "flat-oval" ? "flatOval" : section.shape;
-  const sectionLength = spec.sectionLength_m[shape];
+  const sectionLength =
+    (spec.constructionFromSchedule ? scheduledLength(frame, section) : null) ?? spec.sectionLength_m[shape];
   const { whole, rest } = cutStraight(straight, sectionLength);
   if (whole > 0) {
     const first = straightPiece(origin, straightMark(number, 0), section, sectionLength);
@@ -86,6 +93,10 @@ function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: Takeof
   if (rest > 0) pieces.push(straightPiece(origin, straightMark(number, whole), section, rest));
   return pieces;
 }
+
+/** How long the schedule has straight pieces of this size made; null where it does not say. */
+const scheduledLength = ({ readGauge, system: { spec } }: Frame, section: Section): Meters | null =>
+  readGauge(pieceQuestion(section, straightConstruction(section, spec), spec), NO_OVERRIDES).sectionLength_m;
 
 /** What fittings leave of a segment. Where they need more than there is, no straight is left and the estimator is told. */
 function straightLength(frame: Frame, plans: FittingPlans, s: number, findings: TakeoffFinding[]): Meters {
@@ -110,7 +121,7 @@ const nameOf = ({ system }: Frame, s: number): string => {
 };
 
 function checkSegment(frame: Frame, s: number, pieces: readonly Piece[], findings: TakeoffFinding[]): void {
-  const { system, standards } = frame;
+  const { system } = frame;
   const segmentId = system.segments[s]!.id;
   const add = (code: TakeoffFinding["code"], severity: TakeoffFinding["severity"], message: string) =>
     findings.push({
@@ -126,7 +137,24 @@ function checkSegment(frame: Frame, s: number, pieces: readonly Piece[], finding
     add(
       "gauge-not-in-schedule",
       "stop",
-      `${ungauged.map(({ mark }) => mark).join(", ")} beyond "${standards.gauges.name}" for this size, pressure class and metal; counted without weight or hours`,
+      `${ungauged.map(({ mark }) => mark).join(", ")} not in the schedule (${ungauged[0]!.gaugeSource}); counted without weight or hours`,
+    );
+  }
+  const lighter = pieces.filter(isLighterThanScheduled);
+  if (lighter.length > 0) {
+    const { gauge, scheduledGauge, gaugeSource } = lighter[0]!;
+    add(
+      "gauge-lighter-than-schedule",
+      "warn",
+      `${lighter.map(({ mark }) => mark).join(", ")} in ${gauge ?? ""}, ${gaugeSource}; the schedule asks for ${scheduledGauge ?? ""}`,
+    );
+  }
+  const { shop_h, field_h } = missingHours(pieces);
+  if (shop_h.length + field_h.length > 0) {
+    add(
+      "hours-not-in-table",
+      "warn",
+      `"${frame.standards.productivity.name}" has no shop hours for ${shop_h.join(", ") || "none"}, no field hours for ${field_h.join(", ") || "none"} of its pieces: they count as nothing`,
     );
   }
   const heavy = pieces.filter(({ weight_kg }) => weight_kg > heavyPiece.weight_lb * KILOGRAMS_PER_POUND);

@@ -1,5 +1,8 @@
 /** What `takeOff` answers: pieces with their arithmetic, and the quantities that are not pieces. Plain JSON. */
-import type { AccessoryKind, AirSystem, FittingType, Material, Section } from "../air-system.ts";
+import type { AirSystem, FittingType, Material, Section } from "../air-system.ts";
+import type { GaugeDecider } from "./gauge.ts";
+import type { GaugeSchedule, Reinforcement } from "./gauge-schedule.ts";
+import type { ProductivityTable } from "./productivity.ts";
 import type { Hours, Kilograms, Meters, SquareMeters } from "../quantity.ts";
 
 export const PIECE_KINDS = ["straight", "flexible", "elbow", "transition", "branch", "end-cap"] as const;
@@ -38,6 +41,13 @@ export interface Piece {
   readonly gauge: string | null;
   readonly sheetThickness_m: Meters | null;
   readonly gaugeSource: string;
+  /** Who decided the gauge; null where there is none. */
+  readonly gaugeDecider: GaugeDecider | null;
+  /** What the schedule asks for; differs from the gauge where something before it decided. */
+  readonly scheduledGauge: string | null;
+  /** Of the longer side; the shorter has its own in rectangular duct. */
+  readonly reinforcement: Reinforcement;
+  readonly otherReinforcement: Reinforcement | null;
   readonly joint: string;
   readonly seam: string;
   readonly jointCount: number;
@@ -70,7 +80,14 @@ export interface CountedItem {
 
 export interface TakeoffFinding {
   readonly id: string;
-  readonly code: "gauge-not-in-schedule" | "accessory-needs-review" | "piece-too-heavy" | "fittings-fill-segment";
+  readonly code:
+    | "gauge-not-in-schedule"
+    | "gauge-lighter-than-schedule"
+    | "joint-below-reinforcement"
+    | "hours-not-in-table"
+    | "accessory-needs-review"
+    | "piece-too-heavy"
+    | "fittings-fill-segment";
   readonly severity: "stop" | "warn" | "note";
   readonly segmentId: string;
   readonly message: string;
@@ -96,45 +113,11 @@ export interface Takeoff {
   readonly findings: readonly TakeoffFinding[];
 }
 
-/** A row of a gauge schedule: sizes up to and including `upTo_m` (longest side or diameter). */
-export interface GaugeRow {
-  readonly upTo_m: Meters;
-  readonly gauge: string;
-}
-
-/** Company-owned; shipped with sourced defaults. */
-export interface GaugeSchedule {
-  readonly name: string;
-  readonly source: string;
-  readonly rows: readonly {
-    readonly material: Material;
-    readonly shape: "round" | "rectangular" | "flat-oval";
-    /** Largest absolute pressure class these rows hold for. */
-    readonly pressureClass_pa: number;
-    /** Absent: for duct under pressure and under suction alike. Suction needs heavier round duct. */
-    readonly pressureSign?: "positive" | "negative";
-    /** Absent: however it is made. */
-    readonly construction?: "spiral" | "longitudinal-seam" | "fitting";
-    readonly sizes: readonly GaugeRow[];
-  }[];
-}
-
-export interface ProductivityTable {
-  readonly name: string;
-  readonly source: string;
-  /** Hours per kilogram of net metal, by kind. */
-  readonly shop_h_per_kg: { readonly straight: number; readonly fitting: number };
-  readonly field_h_per_kg: { readonly straight: number; readonly fitting: number };
-  readonly flexible_h_per_m: number;
-  readonly hanger_h_each: number;
-  readonly device_h_each: number;
-  readonly accessory_h_each: Readonly<Record<AccessoryKind, number>>;
-  /** Multiplies field hours: height, congestion, occupied building, overtime. */
-  readonly conditionFactor: number;
-}
-
 export interface ShopStandards {
+  /** The shipped schedule. */
   readonly gauges: GaugeSchedule;
+  /** The company's own charts; for a metal and shape that it has any of, these alone count. */
+  readonly companyGauges: GaugeSchedule | null;
   readonly productivity: ProductivityTable;
   /** Share of the net area added for seams, joints and laps, as bought sheet. */
   readonly blankAllowance: { readonly straight: number; readonly fitting: number };
