@@ -3,7 +3,6 @@ import type { AccessoryKind, Material } from "../air-system.ts";
 import type { Hours, Kilograms, Meters } from "../quantity.ts";
 import { hours } from "../quantity.ts";
 import type { ScheduleShape, Standing } from "./gauge-schedule.ts";
-import type { PieceKind } from "./takeoff.ts";
 
 export const HOURS_PLACES = ["shop", "field"] as const;
 export type HoursPlace = (typeof HOURS_PLACES)[number];
@@ -54,7 +53,8 @@ export interface ProductivityTable {
 
 export interface HoursQuestion {
   readonly place: HoursPlace;
-  readonly kind: PieceKind;
+  /** A piece's kind; one that no row names goes by the rows of any fitting. */
+  readonly kind: string;
   readonly shape: ScheduleShape;
   readonly material: Material | "flexible";
   readonly size_m: Meters;
