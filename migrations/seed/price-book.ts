@@ -25,6 +25,8 @@ const SUBCONTRACTS: readonly Row[] = [["wrap", "Insulation wrap, 1 1/2 in., in p
 const ACCESSORIES: readonly Row[] = [
   ["volume-damper", "Volume damper, locking", "ea", 41.5, 26],
   ["fire-damper", "Fire damper, 1 1/2 h, with sleeve", "ea", 412, 26],
+  ["smoke-damper", "Smoke damper, with actuator", "ea", 685, 26],
+  ["screen", "Wire screen, framed", "ea", 34, 26],
   ["access-door", "Access door", "ea", 68.5, 26],
   ["flexible-connector", "Flexible connector at the unit", "ea", 96, 26],
 ];

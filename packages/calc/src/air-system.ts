@@ -36,6 +36,17 @@ export type Insulation =
   | { readonly kind: "wrap"; readonly thickness_m: Meters }
   | { readonly kind: "liner"; readonly thickness_m: Meters };
 
+export const RECTANGULAR_ELBOWS = ["radius", "radius-splitters", "square-throat-vanes", "square-throat"] as const;
+export type RectangularElbow = (typeof RECTANGULAR_ELBOWS)[number];
+export const ROUND_ELBOWS = ["smooth", "gored", "mitered"] as const;
+export type RoundElbow = (typeof ROUND_ELBOWS)[number];
+export const SPLITTER_COUNTS = [1, 2, 3] as const;
+export type SplitterCount = (typeof SPLITTER_COUNTS)[number];
+export const RECTANGULAR_BRANCHES = ["straight-tap", "shoe-tap"] as const;
+export type RectangularBranch = (typeof RECTANGULAR_BRANCHES)[number];
+export const ROUND_BRANCHES = ["straight-tap", "conical-tap", "saddle-tap"] as const;
+export type RoundBranch = (typeof ROUND_BRANCHES)[number];
+
 /** What a company writes once and reuses: how duct of a system is built. */
 export interface ConstructionSpec {
   readonly material: Material;
@@ -53,14 +64,16 @@ export interface ConstructionSpec {
   /** Drawing sizes are the clear inside or the sheet metal. Differs only where there is liner. */
   readonly sizesAre: "clear-inside" | "sheet-metal";
   readonly elbow: {
-    readonly rectangular: "radius" | "square-throat-vanes" | "square-throat";
-    readonly round: "smooth" | "gored";
+    readonly rectangular: RectangularElbow;
+    readonly round: RoundElbow;
     /** Center-line radius over width (rectangular) or diameter (round). */
     readonly radiusRatio: number;
+    /** Splitters in each radius elbow that has them; one where it is not said. */
+    readonly splitterCount?: SplitterCount | undefined;
   };
   readonly branch: {
-    readonly rectangular: "straight-tap" | "shoe-tap";
-    readonly round: "straight-tap" | "conical-tap";
+    readonly rectangular: RectangularBranch;
+    readonly round: RoundBranch;
   };
   /** Total angle of a transition. */
   readonly transitionAngle_rad: number;
@@ -125,24 +138,54 @@ export interface AirNode {
 
 export const FITTING_TYPES = [
   "elbow-radius",
+  "elbow-radius-splitters",
   "elbow-square-throat",
   "elbow-square-throat-vanes",
   "elbow-smooth",
   "elbow-gored",
+  "elbow-mitered",
+  /** Two equal elbows that turn away and back. */
+  "offset",
   "tap-straight",
+  /** Rectangular, with an entry at 45°. */
   "tap-shoe",
   "tap-conical",
+  /** Round, on a plate bent to the main. */
+  "tap-saddle",
   "tee",
   "wye",
   "cross",
   "transition",
+  /** Rectangular, round, flat oval or annular into another of them. */
   "shape-transition",
+  "entry-bellmouth",
+  "entry-flush",
+  "entry-projecting",
+  "exit-open",
+  "plenum",
   "end-cap",
   "none",
 ] as const;
 export type FittingType = (typeof FITTING_TYPES)[number];
 
-export const ACCESSORY_KINDS = ["volume-damper", "fire-damper", "flexible-connector", "access-door"] as const;
+/** Where a duct begins or ends in a room, outdoors or in a box. */
+export const MOUTH_TYPES = [
+  "entry-bellmouth",
+  "entry-flush",
+  "entry-projecting",
+  "exit-open",
+  "plenum",
+] as const satisfies readonly FittingType[];
+export type MouthType = (typeof MOUTH_TYPES)[number];
+
+export const ACCESSORY_KINDS = [
+  "volume-damper",
+  "fire-damper",
+  "smoke-damper",
+  "flexible-connector",
+  "access-door",
+  "screen",
+] as const;
 export type AccessoryKind = (typeof ACCESSORY_KINDS)[number];
 
 export interface AirSegment {
@@ -160,6 +203,10 @@ export interface AirSegment {
   /** Null: inferred from geometry. The fitting at the end nearer the equipment. */
   readonly fitting: FittingType | null;
   readonly accessories: readonly AccessoryKind[];
+  /** How far the blade of its volume damper is turned from open; nothing is open. */
+  readonly damperAngle_rad?: number | null | undefined;
+  /** Outlets only: the form of the duct's end, whose loss is added. Nothing, and no pressure of its own: a plain open end. */
+  readonly mouth?: MouthType | null | undefined;
   /** Null: the spec's. */
   readonly insulation: Insulation | null;
   /** Sheet set for this duct by hand, such as "20 ga"; null or absent: the spec's, then the schedule's. */

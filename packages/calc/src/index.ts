@@ -5,6 +5,7 @@ export * from "./network/solution.ts";
 export * from "./takeoff/takeoff.ts";
 export * from "./pricing/estimate.ts";
 export { solve } from "./network/solve.ts";
+export { FITTING_INPUTS, REFERENCE_SECTIONS, type FittingInputName, type ReferenceSection } from "./fittings/laws.ts";
 export { shippedPractice, type PracticeCoefficients } from "./fittings/practice.table.ts";
 export * from "./display/index.ts";
 export { takeOff } from "./takeoff/take-off.ts";

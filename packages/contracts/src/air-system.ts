@@ -5,9 +5,15 @@ import {
   DUCT_CLASSES,
   FITTING_TYPES,
   MATERIALS,
+  MOUTH_TYPES,
   NODE_ROLES,
+  RECTANGULAR_BRANCHES,
+  RECTANGULAR_ELBOWS,
+  ROUND_BRANCHES,
+  ROUND_ELBOWS,
   SEAL_CLASSES,
   SERVICES,
+  SPLITTER_COUNTS,
   type AirNode,
   type AirSegment,
   type AirSystem,
@@ -68,13 +74,14 @@ export const constructionSpecSchema: z.ZodType<ConstructionSpec, ConstructionSpe
   hangerSpacing_m: z.strictObject({ rectangular: positiveMetersSchema, round: positiveMetersSchema }),
   sizesAre: z.enum(["clear-inside", "sheet-metal"]),
   elbow: z.strictObject({
-    rectangular: z.enum(["radius", "square-throat-vanes", "square-throat"]),
-    round: z.enum(["smooth", "gored"]),
+    rectangular: z.enum(RECTANGULAR_ELBOWS),
+    round: z.enum(ROUND_ELBOWS),
     radiusRatio: z.number().min(0.5).max(5),
+    splitterCount: z.literal(SPLITTER_COUNTS).optional(),
   }),
   branch: z.strictObject({
-    rectangular: z.enum(["straight-tap", "shoe-tap"]),
-    round: z.enum(["straight-tap", "conical-tap"]),
+    rectangular: z.enum(RECTANGULAR_BRANCHES),
+    round: z.enum(ROUND_BRANCHES),
   }),
   transitionAngle_rad: z.number().positive().max(Math.PI),
   flexibleSlack: z.number().min(0).max(0.5),
@@ -127,6 +134,15 @@ const airNodeSchema: z.ZodType<AirNode, AirNode> = z.strictObject({
   spaceName: text(80),
 });
 
+/** From open; the same bound as the table of throttled dampers. */
+export const damperAngleSchema = z
+  .number()
+  .min(0)
+  .max(Math.PI / 2)
+  .nullable()
+  .optional();
+export const mouthSchema = z.enum(MOUTH_TYPES).nullable().optional();
+
 const airSegmentSchema: z.ZodType<AirSegment, AirSegment> = z.strictObject({
   id: text(64),
   name: text(80),
@@ -138,6 +154,8 @@ const airSegmentSchema: z.ZodType<AirSegment, AirSegment> = z.strictObject({
   flexible: z.boolean(),
   fitting: z.enum(FITTING_TYPES).nullable(),
   accessories: z.array(z.enum(ACCESSORY_KINDS)).max(20),
+  damperAngle_rad: damperAngleSchema,
+  mouth: mouthSchema,
   insulation: insulationSchema.nullable(),
   gauge: sheetLabel.nullable().optional(),
 });

@@ -1,7 +1,16 @@
 /** The layout document on the wire: flat records by id, and the changes that edit them. */
 import { ACCESSORY_KINDS, DUCT_CLASSES, FITTING_TYPES, NODE_ROLES, SERVICES } from "@cleatwork/calc";
 import { z } from "zod";
-import { designSchema, insulationSchema, limitsSchema, sectionSchema, sheetLabel, sizingSchema } from "./air-system.ts";
+import {
+  damperAngleSchema,
+  designSchema,
+  insulationSchema,
+  limitsSchema,
+  mouthSchema,
+  sectionSchema,
+  sheetLabel,
+  sizingSchema,
+} from "./air-system.ts";
 import { drawingId, levelId, nodeId, personId, recordId, segmentId, specId, systemId } from "./ids.ts";
 import { airflowSchema, metersSchema, notNegativePascalsSchema, positiveMetersSchema } from "./quantity.ts";
 
@@ -72,6 +81,8 @@ export const segmentRecordSchema = z.strictObject({
   flexible: z.boolean(),
   fitting: z.enum(FITTING_TYPES).nullable(),
   accessories: z.array(z.enum(ACCESSORY_KINDS)).max(20),
+  damperAngle_rad: damperAngleSchema,
+  mouth: mouthSchema,
   insulation: insulationSchema.nullable(),
   /** Sheet set for this duct, whatever the schedules say. */
   gauge: sheetLabel.nullable().optional(),

@@ -1,31 +1,23 @@
 /** Which fitting the geometry calls for. The estimator's own choice comes before, see network/solve-fittings.ts. */
-import type { ConstructionSpec, FittingType, Section } from "../air-system.ts";
+import { MOUTH_TYPES, type ConstructionSpec, type FittingType, type MouthType, type Section } from "../air-system.ts";
 
 /** Under this a bend is how it was drawn, not an elbow. */
 export const SMALLEST_TURN_COSINE = Math.cos((10 * Math.PI) / 180);
 /** A leg that leaves at less than 67.5° leans along the main: a wye rather than a tap or tee. */
 const WYE_OVER_COSINE = Math.cos((67.5 * Math.PI) / 180);
 
-export const elbowType = (section: Section, { elbow }: ConstructionSpec): FittingType => {
-  if (section.shape !== "rectangular") return elbow.round === "gored" ? "elbow-gored" : "elbow-smooth";
-  switch (elbow.rectangular) {
-    case "radius":
-      return "elbow-radius";
-    case "square-throat":
-      return "elbow-square-throat";
-    case "square-throat-vanes":
-      return "elbow-square-throat-vanes";
-  }
-};
+export const elbowType = (section: Section, { elbow }: ConstructionSpec): FittingType =>
+  section.shape === "rectangular" ? `elbow-${elbow.rectangular}` : `elbow-${elbow.round}`;
 
 export const tapType = (section: Section, { branch }: ConstructionSpec): FittingType =>
-  section.shape === "rectangular"
-    ? branch.rectangular === "shoe-tap"
-      ? "tap-shoe"
-      : "tap-straight"
-    : branch.round === "conical-tap"
-      ? "tap-conical"
-      : "tap-straight";
+  TAPS[section.shape === "rectangular" ? branch.rectangular : branch.round];
+
+const TAPS = {
+  "straight-tap": "tap-straight",
+  "shoe-tap": "tap-shoe",
+  "conical-tap": "tap-conical",
+  "saddle-tap": "tap-saddle",
+} as const satisfies Record<ConstructionSpec["branch"]["rectangular" | "round"], FittingType>;
 
 /** A branch off a duct that runs on. */
 export const branchType = (
@@ -42,6 +34,7 @@ export const splitType = (legCount: number, leastTurnCosine: number): FittingTyp
 export const transitionType = (upstream: Section, downstream: Section): FittingType =>
   upstream.shape === downstream.shape ? "transition" : "shape-transition";
 
+export const isMouth = (type: FittingType): type is MouthType => MOUTH_TYPES.some((mouth) => mouth === type);
 export const isElbow = (type: FittingType): boolean => type.startsWith("elbow-");
 export const isTransition = (type: FittingType): boolean => type === "transition" || type === "shape-transition";
 export const isJunction = (type: FittingType): boolean =>

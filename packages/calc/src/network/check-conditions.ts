@@ -3,8 +3,13 @@ import {
   AIR_SYSTEM_SCHEMA,
   DUCT_CLASSES,
   MATERIALS,
+  RECTANGULAR_BRANCHES,
+  RECTANGULAR_ELBOWS,
+  ROUND_BRANCHES,
+  ROUND_ELBOWS,
   SEAL_CLASSES,
   SERVICES,
+  SPLITTER_COUNTS,
   type AirSystem,
   type Insulation,
 } from "../air-system.ts";
@@ -45,10 +50,13 @@ export function checkConditions(system: AirSystem, problems: SystemProblem[]): v
 
   checkOneOf("spec.material", spec.material, MATERIALS);
   checkOneOf("spec.sealClass", spec.sealClass, SEAL_CLASSES);
-  checkOneOf("spec.elbow.rectangular", spec.elbow.rectangular, ["radius", "square-throat-vanes", "square-throat"]);
-  checkOneOf("spec.elbow.round", spec.elbow.round, ["smooth", "gored"]);
-  checkOneOf("spec.branch.rectangular", spec.branch.rectangular, ["straight-tap", "shoe-tap"]);
-  checkOneOf("spec.branch.round", spec.branch.round, ["straight-tap", "conical-tap"]);
+  checkOneOf("spec.elbow.rectangular", spec.elbow.rectangular, RECTANGULAR_ELBOWS);
+  checkOneOf("spec.elbow.round", spec.elbow.round, ROUND_ELBOWS);
+  checkOneOf("spec.branch.rectangular", spec.branch.rectangular, RECTANGULAR_BRANCHES);
+  checkOneOf("spec.branch.round", spec.branch.round, ROUND_BRANCHES);
+  if (!isSplitterCount(spec.elbow.splitterCount)) {
+    refuse("spec.elbow.splitterCount", spec.elbow.splitterCount, `one of ${SPLITTER_COUNTS.join(", ")}`);
+  }
   check("spec.elbow.radiusRatio", spec.elbow.radiusRatio, ranges.radiusRatio);
   check("spec.transitionAngle_rad", spec.transitionAngle_rad, ranges.transitionAngle);
   check("spec.flexibleSlack", spec.flexibleSlack, ranges.flexibleSlack);
@@ -63,6 +71,9 @@ export function checkConditions(system: AirSystem, problems: SystemProblem[]): v
     check(`levels.${level.id}.elevation_m`, level.elevation_m, ranges.position);
   }
 }
+
+const isSplitterCount = (count: number | undefined): boolean =>
+  count === undefined || SPLITTER_COUNTS.some((accepted) => accepted === count);
 
 const INSULATION_KINDS: readonly Insulation["kind"][] = ["none", "wrap", "liner"];
 

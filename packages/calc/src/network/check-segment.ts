@@ -3,6 +3,7 @@ import {
   ACCESSORY_KINDS,
   DUCT_CLASSES,
   FITTING_TYPES,
+  MOUTH_TYPES,
   type AirSegment,
   type ConstructionSpec,
   type Section,
@@ -22,11 +23,19 @@ export function isSegmentSound(segment: AirSegment, spec: ConstructionSpec): boo
     (segment.insulation === null || isInsulation(segment.insulation)) &&
     isDuctClass(segment.ductClass) &&
     (segment.fitting === null || FITTING_TYPES.includes(segment.fitting)) &&
+    isDamperAngle(segment.damperAngle_rad) &&
+    isMouth(segment.mouth) &&
     (segment.accessories.length === 0 || segment.accessories.every((kind) => ACCESSORY_KINDS.includes(kind)))
   );
 }
 
 const isDuctClass = (value: string): boolean => value === "main" || value === "branch" || value === "runout";
+
+const isDamperAngle = (angle: AirSegment["damperAngle_rad"]): boolean =>
+  angle === undefined || angle === null || isIn(ranges.damperAngle, angle);
+
+const isMouth = (mouth: AirSegment["mouth"]): boolean =>
+  mouth === undefined || mouth === null || MOUTH_TYPES.includes(mouth);
 
 /** Sides in range, and air left inside liner of `lining` on both sides together. */
 function isSectionSound(section: Section, lining: number): boolean {
@@ -147,6 +156,12 @@ export function problemsOfSegment(segment: AirSegment, spec: ConstructionSpec): 
   }
   if (segment.fitting !== null && !FITTING_TYPES.includes(segment.fitting)) {
     add("value-out-of-range", "fitting", segment.fitting, `one of ${FITTING_TYPES.join(", ")}`);
+  }
+  if (!isDamperAngle(segment.damperAngle_rad)) {
+    add("value-out-of-range", "damperAngle_rad", segment.damperAngle_rad, ranges.damperAngle.words);
+  }
+  if (!isMouth(segment.mouth)) {
+    add("value-out-of-range", "mouth", segment.mouth, `one of ${MOUTH_TYPES.join(", ")}`);
   }
   segment.accessories.forEach((kind, index) => {
     if (!ACCESSORY_KINDS.includes(kind)) {

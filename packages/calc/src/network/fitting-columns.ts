@@ -1,18 +1,14 @@
 /** The fittings of all segments as columns, in the order of the segments; records are written from them at the end. */
 import type { AirSystem, FittingType } from "../air-system.ts";
-import { RADIUS_ELBOW_SOURCE, SMOOTH_ELBOW_SOURCE, SQUARE_THROAT_SOURCE } from "../fittings/elbow.ts";
-import { ENDS_SOURCE } from "../fittings/ends.ts";
-import { CONVERGING_SOURCE, DIVERGING_SOURCE } from "../fittings/junction.ts";
-import { PRACTICE_SOURCE } from "../fittings/practice.table.ts";
-import { CONTRACTION_SOURCE, EXPANSION_SOURCE } from "../fittings/transition.ts";
+import { MOST_INPUTS, fittingLaws, lawAt, type FittingLawName } from "../fittings/laws.ts";
 import { pascals } from "../quantity.ts";
 import { plainRecord, type Draft } from "./plain-record.ts";
 import type { Sections } from "./sections.ts";
 import type { SolvedFitting } from "./solution.ts";
 import { NONE } from "./tree-shape.ts";
 
-/** Passing a branch, a change of size, an elbow: no segment has more. */
-const MOST_FITTINGS = 3;
+/** Passing a branch, a change of size, an elbow, a mouth at the far end: no segment has more. */
+const MOST_FITTINGS = 4;
 
 export interface FittingColumns {
   /** Fittings of segment s are those from start[s] up to start[s + 1]. */
@@ -20,8 +16,14 @@ export interface FittingColumns {
   readonly type: FittingType[];
   readonly isChosen: Uint8Array;
   readonly madeHere: Uint8Array;
-  /** Place in the list of sources. */
-  readonly source: Uint8Array;
+  /** At the end farther from the equipment. */
+  readonly isFarEnd: Uint8Array;
+  /** Read at the edge of its table. */
+  readonly isClamped: Uint8Array;
+  /** Place in the list of laws. */
+  readonly law: Uint8Array;
+  /** What was looked up, in the order that the law names. */
+  readonly input: Float64Array;
   /** Segment whose section is on the equipment's side; NONE at the equipment. */
   readonly upstream: Int32Array;
   readonly angle: Float64Array;
@@ -29,53 +31,27 @@ export interface FittingColumns {
   readonly velocityPressure: Float64Array;
 }
 
-export const fittingColumns = (segmentCount: number): FittingColumns => ({
-  start: new Int32Array(segmentCount + 1),
-  type: new Array<FittingType>(MOST_FITTINGS * segmentCount),
-  isChosen: new Uint8Array(MOST_FITTINGS * segmentCount),
-  madeHere: new Uint8Array(MOST_FITTINGS * segmentCount),
-  source: new Uint8Array(MOST_FITTINGS * segmentCount),
-  upstream: new Int32Array(MOST_FITTINGS * segmentCount),
-  angle: new Float64Array(MOST_FITTINGS * segmentCount),
-  lossCoefficient: new Float64Array(MOST_FITTINGS * segmentCount),
-  velocityPressure: new Float64Array(MOST_FITTINGS * segmentCount),
-});
-
-const SOURCES = [
-  SMOOTH_ELBOW_SOURCE,
-  RADIUS_ELBOW_SOURCE,
-  SQUARE_THROAT_SOURCE,
-  CONTRACTION_SOURCE,
-  EXPANSION_SOURCE,
-  DIVERGING_SOURCE,
-  CONVERGING_SOURCE,
-  ENDS_SOURCE,
-  PRACTICE_SOURCE,
-  `Smooth elbow times a factor: ${PRACTICE_SOURCE}`,
-  `Idelchik's straight tap times a factor: ${PRACTICE_SOURCE}`,
-  "No air passes an end cap",
-] as const;
-
-/** Places in the list above. */
-export const from = {
-  smoothElbow: 0,
-  radiusElbow: 1,
-  squareThroat: 2,
-  contraction: 3,
-  expansion: 4,
-  diverging: 5,
-  converging: 6,
-  ends: 7,
-  practice: 8,
-  goredFactor: 9,
-  easedTapFactor: 10,
-  endCap: 11,
-} as const;
-export type FittingSource = (typeof from)[keyof typeof from];
+export function fittingColumns(segmentCount: number): FittingColumns {
+  const room = MOST_FITTINGS * segmentCount;
+  return {
+    start: new Int32Array(segmentCount + 1),
+    type: new Array<FittingType>(room),
+    isChosen: new Uint8Array(room),
+    madeHere: new Uint8Array(room),
+    isFarEnd: new Uint8Array(room),
+    isClamped: new Uint8Array(room),
+    law: new Uint8Array(room),
+    input: new Float64Array(MOST_INPUTS * room),
+    upstream: new Int32Array(room),
+    angle: new Float64Array(room),
+    lossCoefficient: new Float64Array(room),
+    velocityPressure: new Float64Array(room),
+  };
+}
 
 /**
  * Adds a fitting to segment s, which must be the last one that has any; answers its place, where the caller then writes
- * angle, coefficient and velocity pressure.
+ * what it loses.
  */
 export function openFitting(
   columns: FittingColumns,
@@ -84,15 +60,22 @@ export function openFitting(
   isChosen: boolean,
   madeHere: boolean,
   upstream: number,
-  source: FittingSource,
 ): number {
   const at = columns.start[s + 1]!++;
   columns.type[at] = type;
   columns.isChosen[at] = isChosen ? 1 : 0;
   columns.madeHere[at] = madeHere ? 1 : 0;
-  columns.source[at] = source;
   columns.upstream[at] = upstream;
   return at;
+}
+
+/** The law of a fitting and what it was looked up by. */
+export function writeLaw(columns: FittingColumns, at: number, law: FittingLawName, a = 0, b = 0, c = 0): void {
+  columns.law[at] = lawAt[law];
+  const first = MOST_INPUTS * at;
+  columns.input[first] = a;
+  columns.input[first + 1] = b;
+  columns.input[first + 2] = c;
 }
 
 const NO_FITTINGS: readonly SolvedFitting[] = [];
@@ -108,8 +91,11 @@ export function fittingsOf(
   const start = columns.start[s]!;
   const count = columns.start[s + 1]! - start;
   if (count === 0) return NO_FITTINGS;
-  const nodeId = system.segments[s]!.fromNodeId;
-  for (let f = 0; f < count; f++) scratch[f] = new FittingRecord(sections, columns, start + f, nodeId);
+  const { fromNodeId, toNodeId } = system.segments[s]!;
+  for (let f = 0; f < count; f++) {
+    const nodeId = columns.isFarEnd[start + f] === 1 ? toNodeId : fromNodeId;
+    scratch[f] = new FittingRecord(sections, columns, start + f, nodeId);
+  }
   // A copy rather than a literal, for the reason told in plain-record.ts.
   return scratch.slice(0, count);
 }
@@ -122,14 +108,18 @@ const FittingRecord = plainRecord(function (
   nodeId: string,
 ) {
   const upstream = columns.upstream[at]!;
+  const law = fittingLaws[columns.law[at]!]!;
   this.type = columns.type[at]!;
   this.basis = columns.isChosen[at] === 1 ? "chosen" : "inferred";
   this.nodeId = nodeId;
   this.angle_rad = columns.angle[at]!;
   this.upstreamSection = upstream === NONE ? null : section[upstream]!;
   this.lossCoefficient = columns.lossCoefficient[at]!;
+  this.reference = law.reference;
   this.velocityPressure_pa = pascals(columns.velocityPressure[at]!);
   this.loss_pa = pascals(columns.lossCoefficient[at]! * columns.velocityPressure[at]!);
-  this.source = SOURCES[columns.source[at]!]!;
+  this.source = law.source;
+  this.inputs = law.inputs.map((name, place) => ({ name, value: columns.input[MOST_INPUTS * at + place]! }));
+  this.clamped = columns.isClamped[at] === 1;
   this.madeHere = columns.madeHere[at] === 1;
 });

@@ -28,12 +28,16 @@ export interface FittingContext {
   readonly fittings: FittingColumns;
 }
 
-/** A coefficient was read at the edge of its table. */
+/** The coefficient of the fitting at this place was read at the edge of its table. */
 export function markOutOfTable(
   context: FittingContext,
+  at: number,
   s: number,
-  measured: { value: number; limit: number; limitSource: string },
+  { value, limit, limitSource }: { value: number; limit: number; limitSource: string },
 ): void {
+  context.fittings.isClamped[at] = 1;
   const subject = { kind: "segment", id: context.system.segments[s]!.id } as const;
-  addFinding(context.findings, s, "table-range-exceeded", subject, { ...measured, unit: "1" });
+  const fitting = context.fittings.type[at]!.replaceAll("-", " ");
+  const measured = { value, limit, unit: "1", limitSource: `${fitting}: ${limitSource}` };
+  addFinding(context.findings, s, "table-range-exceeded", subject, measured);
 }

@@ -12,7 +12,7 @@ import {
   splitLegCoefficient,
   type JunctionLeg,
 } from "../fittings/junction.ts";
-import { from, openFitting } from "./fitting-columns.ts";
+import { openFitting, writeLaw } from "./fitting-columns.ts";
 import { markOutOfTable, type FittingContext } from "./fitting-context.ts";
 import { drawnTurn } from "./lose-elbow.ts";
 
@@ -21,19 +21,20 @@ export function putPassage(context: FittingContext, s: number, before: number): 
   const { system, sections, sums, airflow, friction, joints, diverges, fittings } = context;
   const branch = sums.fullest[before]!;
   const type = junctionType(context, branch, before, system.segments[branch]!.fitting);
-  const coefficient = diverges
-    ? divergingMainCoefficient({
-        areaRatio: sums.branchArea[before]! / sections.area[before]!,
-        flowRatio: sums.branchFlow[before]! / airflow[before]!,
-      })
-    : convergingLegCoefficient(airflow[s]! / airflow[before]!, sums.momentum[before]!);
-  const source = diverges ? from.diverging : from.converging;
-  const angle = angleOfCosine(legCosine(joints, branch));
-  const pressure = friction.velocityPressure[before]!;
-  const at = openFitting(fittings, s, type, false, false, before, source);
-  fittings.angle[at] = angle;
-  fittings.lossCoefficient[at] = coefficient;
-  fittings.velocityPressure[at] = pressure;
+  const at = openFitting(fittings, s, type, false, false, before);
+  fittings.angle[at] = angleOfCosine(legCosine(joints, branch));
+  fittings.velocityPressure[at] = friction.velocityPressure[before]!;
+  if (diverges) {
+    const areaRatio = sums.branchArea[before]! / sections.area[before]!;
+    const flowRatio = sums.branchFlow[before]! / airflow[before]!;
+    writeLaw(fittings, at, "divergingMain", areaRatio, flowRatio);
+    fittings.lossCoefficient[at] = divergingMainCoefficient({ areaRatio, flowRatio });
+    return;
+  }
+  const flowRatio = airflow[s]! / airflow[before]!;
+  const momentum = sums.momentum[before]!;
+  writeLaw(fittings, at, "convergingMain", flowRatio, momentum);
+  fittings.lossCoefficient[at] = convergingLegCoefficient(flowRatio, momentum);
 }
 
 /** The loss of air into a branch, or into one leg of a split; and back out of them in a return. */
@@ -45,30 +46,38 @@ export function putJunction(context: FittingContext, s: number, before: number, 
   // A tap chosen where nothing branches turns as drawn, or at a right angle.
   const turnsAsDrawn = kind === leg.only || kind === leg.run;
   const angle = turnsAsDrawn ? drawnTurn(context, s) : angleOfCosine(legCosine(joints, s));
-  const turn: JunctionLeg = {
-    turnCosine: turnsAsDrawn ? Math.cos(angle) : legCosine(joints, s),
-    areaRatio: sections.area[s]! / sections.area[before]!,
-    flowRatio: airflow[s]! / airflow[before]!,
-  };
-  if (turn.areaRatio > 1) {
-    const limitSource = diverges ? DIVERGING_SOURCE : CONVERGING_SOURCE;
-    markOutOfTable(context, s, { value: turn.areaRatio, limit: 1, limitSource });
-  }
-
-  const straight = diverges ? divergingLoss(turn, isSplit) : convergingLoss(turn, isSplit, sums.momentum[before]!);
-  const isEased = (type === "tap-shoe" || type === "tap-conical") && straight > 0;
-  const coefficient = isEased ? straight * practice.easedTapOverStraight : straight;
-  const source = isEased ? from.easedTapFactor : diverges ? from.diverging : from.converging;
-
   // One piece serves both sides of a cross and both legs of a tee: the fuller leg makes it.
   const isShared = isSplit || type === "cross";
   const madeHere = !isShared || sums.fullest[before] === s;
-  const pressure = friction.velocityPressure[before]!;
-  const at = openFitting(fittings, s, type, chosen !== null, madeHere, before, source);
+  const at = openFitting(fittings, s, type, chosen !== null, madeHere, before);
   fittings.angle[at] = angle;
-  fittings.lossCoefficient[at] = coefficient;
-  fittings.velocityPressure[at] = pressure;
+  fittings.velocityPressure[at] = friction.velocityPressure[before]!;
+
+  const areaRatio = sections.area[s]! / sections.area[before]!;
+  if (areaRatio > 1) {
+    const limitSource = diverges ? DIVERGING_SOURCE : CONVERGING_SOURCE;
+    markOutOfTable(context, at, s, { value: areaRatio, limit: 1, limitSource });
+  }
+  const turn: JunctionLeg = {
+    turnCosine: turnsAsDrawn ? Math.cos(angle) : legCosine(joints, s),
+    // A branch larger than its main is read as one of the main's own size.
+    areaRatio: Math.min(1, areaRatio),
+    flowRatio: airflow[s]! / airflow[before]!,
+  };
+  const momentum = sums.momentum[before]!;
+  const straight = diverges ? divergingLoss(turn, isSplit) : convergingLoss(turn, isSplit, momentum);
+  const ease = straight > 0 ? easeOf(type, practice.easedTapOverStraight) : 1;
+  fittings.lossCoefficient[at] = straight * ease;
+
+  if (ease !== 1) writeLaw(fittings, at, "easedTap", turn.areaRatio, turn.flowRatio, ease);
+  else if (diverges) {
+    writeLaw(fittings, at, "divergingBranch", turn.areaRatio, turn.flowRatio, turn.flowRatio / turn.areaRatio);
+  } else writeLaw(fittings, at, "convergingBranch", turn.areaRatio, turn.flowRatio, momentum);
 }
+
+/** What an entry at a slant or a cone makes of a straight tap's loss. A saddle changes how it is fixed, not the air. */
+const easeOf = (type: FittingType, eased: { readonly shoe: number; readonly conical: number }): number =>
+  type === "tap-shoe" ? eased.shoe : type === "tap-conical" ? eased.conical : 1;
 
 const divergingLoss = (turn: JunctionLeg, isSplit: boolean): number =>
   isSplit ? splitLegCoefficient(turn) : divergingBranchCoefficient(turn);

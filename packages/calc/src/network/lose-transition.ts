@@ -2,12 +2,12 @@ import type { FittingType } from "../air-system.ts";
 import { transitionType } from "../fittings/infer.ts";
 import { contractionCoefficient, expansionCoefficient } from "../fittings/transition.ts";
 import { squareMeters } from "../quantity.ts";
-import { from, openFitting } from "./fitting-columns.ts";
+import { openFitting, writeLaw } from "./fitting-columns.ts";
 import type { FittingContext } from "./fitting-context.ts";
 
 /** The change of size comes after a junction, so it carries this segment's air in both areas. */
 export function putTransition(context: FittingContext, s: number, before: number, chosen: FittingType | null): void {
-  const { sections, friction, transitionForm, practice, diverges, fittings } = context;
+  const { system, sections, friction, transitionForm, practice, diverges, fittings } = context;
   const type = chosen ?? transitionType(sections.section[before]!, sections.section[s]!);
   const areaBefore = squareMeters(sections.area[before]!);
   const areaHere = squareMeters(sections.area[s]!);
@@ -18,11 +18,11 @@ export function putTransition(context: FittingContext, s: number, before: number
   const bySize = contracts ? contractionCoefficient(transitionForm, step) : expansionCoefficient(transitionForm, step);
   const isPractice = type === "shape-transition" && bySize < practice.shapeChange;
   const coefficient = isPractice ? practice.shapeChange : bySize;
-  const source = isPractice ? from.practice : contracts ? from.contraction : from.expansion;
 
   const widening = areaHere / step.smaller;
-  const pressure = friction.velocityPressure[s]! * widening * widening;
-  const at = openFitting(fittings, s, type, chosen !== null, true, before, source);
+  const at = openFitting(fittings, s, type, chosen !== null, true, before);
   fittings.lossCoefficient[at] = coefficient;
-  fittings.velocityPressure[at] = pressure;
+  fittings.velocityPressure[at] = friction.velocityPressure[s]! * widening * widening;
+  const law = isPractice ? "shapeChange" : contracts ? "contraction" : "expansion";
+  writeLaw(fittings, at, law, step.smaller / step.larger, system.spec.transitionAngle_rad, practice.shapeChange);
 }

@@ -38,7 +38,10 @@ interface OutletNeeds {
   readonly required: Float64Array;
 }
 
-/** An outlet that says no pressure of its own is an open end: it takes one velocity pressure of its duct. */
+/**
+ * An outlet that says no pressure of its own is an open end: it takes one velocity pressure of its duct, unless its segment
+ * has a mouth, whose loss is among the fittings.
+ */
 function outletNeeds(
   system: AirSystem,
   { outlets, into }: Tree,
@@ -51,7 +54,8 @@ function outletNeeds(
   for (let o = 0; o < outlets.length; o++) {
     const last = into[outlets[o]!]!;
     const typed = system.nodes[outlets[o]!]!.requiredPressure_pa;
-    outletPressure[o] = typed ?? openEnd * velocityPressure[last]!;
+    const hasMouth = (system.segments[last]!.mouth ?? null) !== null;
+    outletPressure[o] = typed ?? (hasMouth ? 0 : openEnd * velocityPressure[last]!);
     required[o] = frictionTo[last]! + dynamicTo[last]! + outletPressure[o]!;
   }
   return { outletPressure, required };

@@ -27,6 +27,7 @@ export const ranges = {
   radiusRatio: within(0.5, 5, "from 0.5 to 5"),
   transitionAngle: over(0, Math.PI, "more than 0 and at most π rad"),
   flexibleSlack: within(0, 0.5, "from 0 to 0.5"),
+  damperAngle: within(0, Math.PI / 2, "from 0 to π/2 rad"),
   pressureClass: within(-25_000, 25_000, "from −25,000 to 25,000 Pa"),
   insulationThickness: over(0, 0.5, "more than 0 and at most 0.5 m"),
 } satisfies Record<string, Range>;

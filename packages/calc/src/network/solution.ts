@@ -1,4 +1,5 @@
 /** What `solve` answers: plain JSON, one entry for each segment and node, in the order of the air system. */
+import type { FittingInputName, ReferenceSection } from "../fittings/laws.ts";
 import type { AccessoryKind, FittingType, Section } from "../air-system.ts";
 import type {
   CubicMetersPerSecond,
@@ -13,7 +14,14 @@ import type {
 
 export type FlowRegime = "laminar" | "transitional" | "turbulent";
 
-/** A fitting, as inferred or chosen, at the end of a segment nearer the equipment (or at its outlet end for caps). */
+/** What a coefficient was looked up by. */
+export interface FittingInput {
+  readonly name: FittingInputName;
+  /** A ratio, a count, or an angle in radians. */
+  readonly value: number;
+}
+
+/** A fitting, as inferred or chosen, at the end of a segment nearer the equipment or, for a mouth, at its outlet. */
 export interface SolvedFitting {
   readonly type: FittingType;
   /** Chosen by the estimator, or inferred from geometry. */
@@ -24,11 +32,15 @@ export interface SolvedFitting {
   /** The section on the equipment's side of the fitting; null for a fitting at the equipment itself. */
   readonly upstreamSection: Section | null;
   readonly lossCoefficient: number;
-  /** The velocity pressure that the coefficient goes with. */
+  /** Whose velocity pressure the coefficient goes with, and that pressure. */
+  readonly reference: ReferenceSection;
   readonly velocityPressure_pa: Pascals;
   readonly loss_pa: Pascals;
   /** Where the coefficient comes from, in a few words. */
   readonly source: string;
+  readonly inputs: readonly FittingInput[];
+  /** An input lay outside the table, and the nearest row was read. */
+  readonly clamped: boolean;
   /**
    * The piece is made for this segment. False where a segment only feels the loss of a piece that is counted elsewhere: the
    * main running past a tap, the second leg of a tee.
@@ -36,12 +48,14 @@ export interface SolvedFitting {
   readonly madeHere: boolean;
 }
 
-/** A damper or the like in the segment, open. */
+/** A damper or the like in the segment, on its own velocity pressure. */
 export interface SolvedAccessory {
   readonly kind: AccessoryKind;
   readonly lossCoefficient: number;
   readonly loss_pa: Pascals;
   readonly source: string;
+  readonly inputs: readonly FittingInput[];
+  readonly clamped: boolean;
 }
 
 export interface SolvedSegment {

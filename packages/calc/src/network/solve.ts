@@ -78,7 +78,7 @@ export function solve(
     findings,
     fittings,
   });
-  const accessories = findAccessories(system, sections, friction, practice);
+  const accessories = findAccessories(system, sections, friction, practice, findings);
 
   const losses = sumLosses(system, tree, course, friction, fittings, accessories);
   const leakage = findLeakage(system, sections, traits, course, friction, losses);

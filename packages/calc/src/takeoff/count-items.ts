@@ -105,8 +105,10 @@ const seamLength = ({ kind, section, length_m }: Piece): number =>
 const ACCESSORY_NAMES: Readonly<Record<AccessoryKind, string>> = {
   "volume-damper": "Volume damper",
   "fire-damper": "Fire damper",
+  "smoke-damper": "Smoke damper",
   "flexible-connector": "Flexible connector",
   "access-door": "Access door",
+  screen: "Screen",
 };
 
 /** Whole inches where they are, else tenths: how the price book names a size. */

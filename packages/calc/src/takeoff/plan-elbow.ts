@@ -8,6 +8,7 @@ import {
   goredElbowSurface,
   radiusElbowSurface,
   radiusElbowTangent,
+  splitterSurface,
   squareElbowSurface,
   squareElbowTangent,
   vaneCount,
@@ -43,12 +44,12 @@ export function planElbow(
     if (before !== null) plans.far[before]! += tangent;
   };
 
-  if (type === "elbow-square-throat" || type === "elbow-square-throat-vanes") {
+  if (type === "elbow-square-throat" || type === "elbow-square-throat-vanes" || type === "elbow-mitered") {
     const tangent = squareElbowTangent(angle, planeSide);
     takeOut(tangent);
     const walls = squareElbowSurface(section, angle, planeSide);
     const terms = [around, { label: "center line through the corner", value: 2 * tangent, unit: "m" }];
-    if (type === "elbow-square-throat") {
+    if (type !== "elbow-square-throat-vanes") {
       return { ...base, length: meters(2 * tangent), netArea: walls, netTerms: terms, netBasis: GEOMETRY };
     }
     const vanes = vaneSurface({ planeSide, acrossSide, angle });
@@ -62,6 +63,21 @@ export function planElbow(
   }
 
   takeOut(radiusElbowTangent(angle, centerRadius));
+  if (type === "elbow-radius-splitters") {
+    const { splitterCount = 1 } = frame.system.spec.elbow;
+    const walls = radiusElbowSurface(section, angle, centerRadius);
+    const splitters = splitterSurface({ planeSide, acrossSide, angle, centerRadius }, splitterCount);
+    return {
+      ...base,
+      length: meters(angle * centerRadius),
+      netArea: squareMeters(walls + splitters),
+      netTerms: [
+        { label: "two cheeks, throat and heel", value: walls, unit: "m²" },
+        { label: splitterCount === 1 ? "1 splitter" : `${splitterCount} splitters`, value: splitters, unit: "m²" },
+      ],
+      netBasis: `${GEOMETRY}; splitters in a geometric row from throat to heel`,
+    };
+  }
   if (type === "elbow-gored") {
     const pieces = gorePieces(angle, radiusRatio);
     const netArea = goredElbowSurface(section, angle, centerRadius, pieces);
@@ -86,5 +102,40 @@ export function planElbow(
       { label: "center-line radius", value: centerRadius, unit: "m" },
     ],
     netBasis: GEOMETRY,
+  };
+}
+
+/** Two radius elbows end to end, one turning away and one back. */
+export function planOffset(
+  frame: Frame,
+  plans: FittingPlans,
+  s: number,
+  { type, angle_rad }: SolvedFitting,
+): FittingPlan {
+  const section = frame.metal[s]!;
+  const angle = radians(angle_rad);
+  const { planeSide } = sidesInBend(frame, s, section);
+  const centerRadius = meters(frame.system.spec.elbow.radiusRatio * planeSide);
+  const tangent = radiusElbowTangent(angle, centerRadius);
+  plans.near[s]! += 3 * tangent;
+  const before = segmentBefore(frame, s);
+  if (before !== null) plans.far[before]! += tangent;
+  const one = radiusElbowSurface(section, angle, centerRadius);
+  return {
+    segment: s,
+    type,
+    kind: "elbow",
+    section,
+    otherSection: null,
+    angle,
+    gaugeSection: section,
+    length: meters(2 * angle * centerRadius),
+    netArea: squareMeters(2 * one),
+    netTerms: [
+      { label: "girth", value: girth(section), unit: "m" },
+      { label: "angle of each turn", value: angle, unit: "rad" },
+      { label: "center-line radius", value: centerRadius, unit: "m" },
+    ],
+    netBasis: `${GEOMETRY}; two radius elbows`,
   };
 }

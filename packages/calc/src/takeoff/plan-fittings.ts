@@ -5,13 +5,13 @@
  * of the straight where its length along that line is known: an elbow its tangent on both sides, a transition its length,
  * a tap half of its main and its collar, a junction body half of itself along the main.
  */
-import { isElbow, isTransition } from "../fittings/infer.ts";
+import { isElbow, isMouth, isTransition } from "../fittings/infer.ts";
 import type { SolvedFitting } from "../network/solution.ts";
 import { radians } from "../quantity.ts";
 import { GEOMETRY, larger, type FittingPlan, type FittingPlans } from "./fitting-plan.ts";
 import { segmentBefore, type Frame } from "./frame.ts";
 import { makingTable } from "./making.table.ts";
-import { planElbow } from "./plan-elbow.ts";
+import { planElbow, planOffset } from "./plan-elbow.ts";
 import { planJunction } from "./plan-junction.ts";
 import { capSurface } from "./surface/body.ts";
 import { girth } from "./surface/girth.ts";
@@ -24,7 +24,8 @@ export function planFittings(frame: Frame): FittingPlans {
   for (let s = 0; s < count; s++) {
     const { fittings } = frame.solution.segments[s]!;
     for (const fitting of fittings) {
-      if (fitting.madeHere && fitting.type !== "none") {
+      // Bellmouths and plenums are bought with the equipment or added by hand.
+      if (fitting.madeHere && fitting.type !== "none" && !isMouth(fitting.type)) {
         of[s]!.push(planFitting(frame, plans, s, fitting));
       }
     }
@@ -33,6 +34,7 @@ export function planFittings(frame: Frame): FittingPlans {
 }
 
 function planFitting(frame: Frame, plans: FittingPlans, s: number, fitting: SolvedFitting): FittingPlan {
+  if (fitting.type === "offset") return planOffset(frame, plans, s, fitting);
   if (isElbow(fitting.type)) return planElbow(frame, plans, s, fitting);
   if (isTransition(fitting.type)) return planTransition(frame, plans, s, fitting);
   if (fitting.type === "end-cap") return planCap(frame, s, fitting);

@@ -97,7 +97,14 @@ export const shippedProductivity: ProductivityTable = {
   rows: [...SHOP, ...FIELD],
   hanger_h_each: 0.35,
   device_h_each: 0.8,
-  accessory_h_each: { "volume-damper": 0.4, "fire-damper": 2.5, "flexible-connector": 1.5, "access-door": 0.7 },
+  accessory_h_each: {
+    "volume-damper": 0.4,
+    "fire-damper": 2.5,
+    "smoke-damper": 3,
+    "flexible-connector": 1.5,
+    "access-door": 0.7,
+    screen: 0.3,
+  },
   conditions: CONDITIONS,
   conditionFactor: 1,
 };

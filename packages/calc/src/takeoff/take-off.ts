@@ -165,7 +165,7 @@ function checkSegment(frame: Frame, s: number, pieces: readonly Piece[], finding
       `${heavy.map(({ mark }) => mark).join(", ")} over ${heavyPiece.weight_lb} lb: lift with gear`,
     );
   }
-  if (system.segments[s]!.accessories.includes("fire-damper")) {
+  if (system.segments[s]!.accessories.some((kind) => kind === "fire-damper" || kind === "smoke-damper")) {
     add("accessory-needs-review", "warn", "fire damper: rating, sleeve and access by the design's engineer");
   }
 }

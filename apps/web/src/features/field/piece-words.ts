@@ -29,6 +29,7 @@ const branchNames: Readonly<Record<string, string>> = {
   "tap-straight": "Straight tap",
   "tap-shoe": "Shoe tap",
   "tap-conical": "Conical tap",
+  "tap-saddle": "Saddle tap",
   tee: "Tee",
   wye: "Wye",
   cross: "Cross",

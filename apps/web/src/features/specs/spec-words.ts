@@ -46,16 +46,22 @@ export const specChoices = {
   }),
   elbowRectangular: choices<ConstructionSpec["elbow"]["rectangular"]>({
     radius: "Radius",
+    "radius-splitters": "Radius, with splitters",
     "square-throat-vanes": "Square throat, with vanes",
     "square-throat": "Square throat, no vanes",
   }),
-  elbowRound: choices<ConstructionSpec["elbow"]["round"]>({ smooth: "Smooth", gored: "Gored" }),
+  elbowRound: choices<ConstructionSpec["elbow"]["round"]>({
+    smooth: "Smooth",
+    gored: "Gored",
+    mitered: "Mitered",
+  }),
   branchRectangular: choices<ConstructionSpec["branch"]["rectangular"]>({
     "straight-tap": "Straight tap",
-    "shoe-tap": "Shoe tap",
+    "shoe-tap": "Shoe tap, 45° entry",
   }),
   branchRound: choices<ConstructionSpec["branch"]["round"]>({
     "straight-tap": "Straight tap",
     "conical-tap": "Conical tap",
+    "saddle-tap": "Saddle tap",
   }),
 } as const;

@@ -40,6 +40,23 @@ export function radiusElbowParts(elbow: {
   };
 }
 
+/**
+ * Splitters of a radius elbow: arcs of the bend's own angle, as high as the duct, that divide it in passages of one curve
+ * ratio. Radius of splitter i is throat · (heel / throat)^(i / (n + 1)).
+ *
+ * Source   geometry
+ */
+export function splitterSurface(
+  elbow: { planeSide: Meters; acrossSide: Meters; angle: Radians; centerRadius: Meters },
+  splitterCount: number,
+): SquareMeters {
+  const throat = elbow.centerRadius - elbow.planeSide / 2;
+  const heel = throat + elbow.planeSide;
+  let arcs = 0;
+  for (let i = 1; i <= splitterCount; i++) arcs += throat * (heel / throat) ** (i / (splitterCount + 1));
+  return squareMeters(throat > 0 ? elbow.angle * arcs * elbow.acrossSide : 0);
+}
+
 /** Center-line length of a square-throat elbow: its legs to the corner and on. W/2 tan(θ/2) + leg on each side. */
 export const squareElbowTangent = (angle: Radians, planeSide: Meters): Meters =>
   meters((planeSide / 2) * halfTangent(angle) + makingTable.squareThroatLeg);
