@@ -19,3 +19,26 @@ test("the people page says when someone signed in last", async () => {
   const seen = people.find(({ role }) => role === "owner")?.lastSeenAt ?? "";
   expect(Number.isNaN(Date.parse(seen))).toBe(false);
 });
+
+const asOwner = { body: { role: "owner" } } as const;
+const asEstimator = { body: { role: "estimator" } } as const;
+
+test("the last owner can be neither removed nor given another role", async () => {
+  const { owner } = await foundCompany();
+  const params = { personId: owner.id };
+  expect((await owner.refused("changeRole", { params, ...asEstimator })).status).toBe(409);
+  expect((await owner.refused("removePerson", { params })).status).toBe(409);
+  await owner.ok("listPeople");
+});
+
+test("two owners who take the role from each other at once leave one of them", async () => {
+  const { owner, estimator } = await foundCompany();
+  await owner.ok("changeRole", { params: { personId: estimator.id }, ...asOwner });
+  const answers = await Promise.all([
+    owner.send("changeRole", { params: { personId: estimator.id }, ...asEstimator }),
+    estimator.send("changeRole", { params: { personId: owner.id }, ...asEstimator }),
+  ]);
+  expect(answers.filter(({ status }) => status < 400)).toHaveLength(1);
+  const { people } = await owner.ok("listPeople");
+  expect(people.filter(({ role }) => role === "owner")).toHaveLength(1);
+});
