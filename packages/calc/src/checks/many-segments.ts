@@ -17,9 +17,14 @@ const TAPS_ON_A_ZONE = 8;
 
 /**
  * A riser with a floor at each landing; on each floor a main with zone branches to one side, on each branch taps to outlets.
- * All four shapes; a runout in three is flexible. Sizes are typed, or all left to the rule.
+ * All four shapes; a runout in three is flexible. Sizes are typed, or all left to the rule. Floors are alike, as in most
+ * buildings, unless no two outlets shall have the same airflow.
  */
-export function benchSystem(segmentCount: number, sizes: "typed" | "by-rule" = "typed"): AirSystem {
+export function benchSystem(
+  segmentCount: number,
+  sizes: "typed" | "by-rule" = "typed",
+  floors: "alike" | "all-different" = "alike",
+): AirSystem {
   const nodes: AirNode[] = [];
   const segments: AirSegment[] = [];
 
@@ -46,7 +51,7 @@ export function benchSystem(segmentCount: number, sizes: "typed" | "by-rule" = "
   };
   const addOutlet = (from: AirNode, x: number, y: number, z: number) => {
     const turn = segments.length % 3;
-    const airflow = 120 + 20 * (segments.length % 7);
+    const airflow = 120 + 20 * (segments.length % 7) + (floors === "alike" ? 0 : segments.length / segmentCount);
     const section = turn === 1 ? annularOf(12, 4) : roundOf(8 + (segments.length % 2));
     addSegment(from, addNode("outlet", x, y, z, airflow), "runout", section, turn === 0);
   };

@@ -9,12 +9,14 @@ export interface SolveRatio {
   /** Medians. */
   readonly colebrook_ms: number;
   readonly solveTyped_ms: number;
-  readonly solveByRule_ms: number;
-  readonly typedOverColebrook: number;
-  readonly byRuleOverColebrook: number;
+  readonly overColebrook: Readonly<Record<SolveKind, number>>;
   /** The same ratios of the fastest tenth of each: what is left when the machine has other work to do. */
-  readonly undisturbed: { readonly typedOverColebrook: number; readonly byRuleOverColebrook: number };
+  readonly undisturbed: Readonly<Record<SolveKind, number>>;
 }
+
+/** Sizes typed, floors alike; no two floors alike; sizes by the rule; and typed with every record of the answer written. */
+const KINDS = ["typed", "allDifferent", "byRule", "written"] as const;
+export type SolveKind = (typeof KINDS)[number];
 
 interface Turns {
   readonly segmentCount: number;
@@ -26,16 +28,21 @@ interface Turns {
 }
 
 export function measureSolveRatio(turns: Turns): SolveRatio {
-  const typed = takeTurns(benchSystem(turns.segmentCount, "typed"), turns);
-  const byRule = takeTurns(benchSystem(turns.segmentCount, "by-rule"), turns);
+  const { segmentCount } = turns;
+  const timings: Record<SolveKind, Timings> = {
+    typed: takeTurns(benchSystem(segmentCount), turns, solveOnce),
+    allDifferent: takeTurns(benchSystem(segmentCount, "typed", "all-different"), turns, solveOnce),
+    byRule: takeTurns(benchSystem(segmentCount, "by-rule"), turns, solveOnce),
+    written: takeTurns(benchSystem(segmentCount), turns, solveAndWrite),
+  };
+  const ratiosAt = (share: number) =>
+    Object.fromEntries(KINDS.map((kind) => [kind, ratioAt(share, timings[kind])])) as Record<SolveKind, number>;
   return {
-    segmentCount: turns.segmentCount,
-    colebrook_ms: quantile(typed.bare, 0.5),
-    solveTyped_ms: quantile(typed.solving, 0.5),
-    solveByRule_ms: quantile(byRule.solving, 0.5),
-    typedOverColebrook: ratioAt(0.5, typed),
-    byRuleOverColebrook: ratioAt(0.5, byRule),
-    undisturbed: { typedOverColebrook: ratioAt(0.1, typed), byRuleOverColebrook: ratioAt(0.1, byRule) },
+    segmentCount,
+    colebrook_ms: quantile(timings.typed.bare, 0.5),
+    solveTyped_ms: quantile(timings.typed.solving, 0.5),
+    overColebrook: ratiosAt(0.5),
+    undisturbed: ratiosAt(0.1),
   };
 }
 
@@ -45,7 +52,7 @@ interface Timings {
 }
 
 /** Bare evaluations and a solve of the same system, one after the other, again and again. */
-function takeTurns(system: AirSystem, { warmUp, rounds, now }: Turns): Timings {
+function takeTurns(system: AirSystem, { warmUp, rounds, now }: Turns, work: (system: AirSystem) => number): Timings {
   const inputs = frictionInputs(system);
   const bare: number[] = [];
   const solving: number[] = [];
@@ -53,7 +60,7 @@ function takeTurns(system: AirSystem, { warmUp, rounds, now }: Turns): Timings {
     const start = now();
     evaluateBare(inputs);
     const between = now();
-    solveOnce(system);
+    work(system);
     const end = now();
     if (round < warmUp) continue;
     bare.push(between - start);
@@ -92,6 +99,12 @@ function solveOnce(system: AirSystem): number {
   const answer = solve(system);
   if (!answer.ok) throw new Error("The timed system stopped being solvable");
   return answer.value.requiredPressure_pa;
+}
+
+function solveAndWrite(system: AirSystem): number {
+  const answer = solve(system);
+  if (!answer.ok) throw new Error("The timed system stopped being solvable");
+  return answer.value.segments.length + answer.value.paths.length;
 }
 
 const quantile = (values: readonly number[], share: number): number =>

@@ -2,7 +2,8 @@
 import type { AirSystem, Section } from "../air-system.ts";
 import { velocityPressure as pressureOfVelocity } from "../air/velocity-pressure.ts";
 import { slackFactor } from "../friction/flexible.ts";
-import { darcyFrictionFactor } from "../friction/friction-factor.ts";
+import { TURBULENT_FROM_REYNOLDS, darcyFrictionFactor } from "../friction/friction-factor.ts";
+import { turbulentFactor, turbulentFactors } from "../friction/turbulent-factors.ts";
 import { meters, metersPerSecond, type KilogramsPerCubicMeter, type PascalSeconds } from "../quantity.ts";
 import type { Sections } from "./sections.ts";
 import type { Traits } from "./traits.ts";
@@ -65,8 +66,12 @@ function fillFactors(
   relativeRoughness: Float64Array,
   factor: Float64Array,
 ): void {
+  const known = turbulentFactors();
   for (let s = 0; s < factor.length; s++) {
-    factor[s] = darcyFrictionFactor(section[s]!, reynoldsNumber[s]!, relativeRoughness[s]!);
+    factor[s] =
+      reynoldsNumber[s]! >= TURBULENT_FROM_REYNOLDS
+        ? turbulentFactor(known, reynoldsNumber[s]!, relativeRoughness[s]!)
+        : darcyFrictionFactor(section[s]!, reynoldsNumber[s]!, relativeRoughness[s]!);
   }
 }
 

@@ -73,13 +73,27 @@ export function findIdNear(index: IdIndex, id: string, guess: number): number {
   return guess >= 0 && guess < records.length && records[guess]!.id === id ? guess : findId(index, id);
 }
 
-/** Ids differ in their last letters, whether counted or drawn by chance; those that do not are found by the Map. */
-const LETTERS_HASHED = 8;
-
+/**
+ * Ids differ in their last letters, whether counted or drawn by chance; those that do not are found by the Map. Written out
+ * letter by letter because the engine then reads a string three times as fast as in a loop.
+ */
 function hash(id: string): number {
-  let value = id.length;
-  for (let i = Math.max(0, id.length - LETTERS_HASHED); i < id.length; i++) {
-    value = (Math.imul(value, 31) + id.charCodeAt(i)) | 0;
-  }
-  return value ^ (value >>> 15);
+  const n = id.length;
+  const letters =
+    n < 6
+      ? shortHash(id)
+      : id.charCodeAt(n - 1) +
+        (id.charCodeAt(n - 2) << 5) +
+        (id.charCodeAt(n - 3) << 10) +
+        (id.charCodeAt(n - 4) << 15) +
+        (id.charCodeAt(n - 5) << 20) +
+        (id.charCodeAt(n - 6) << 25);
+  const mixed = Math.imul(letters, 0x9e3779b1);
+  return mixed ^ (mixed >>> 15);
+}
+
+function shortHash(id: string): number {
+  let letters = id.length;
+  for (let i = 0; i < id.length; i++) letters = (letters << 5) + id.charCodeAt(i);
+  return letters;
 }

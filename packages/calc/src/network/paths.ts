@@ -9,40 +9,20 @@ import type { Losses } from "./losses.ts";
 import type { Friction } from "./friction.ts";
 import { NONE, type Tree } from "./tree.ts";
 
-export interface Paths {
-  readonly paths: readonly SolvedPath[];
-  readonly governingOutletNodeId: string;
-  readonly requiredPressure: number;
-}
-
-/** Paths in the order of the outlets. The governing path needs the most pressure; of equals, the first. */
-export function tracePaths(
-  system: AirSystem,
-  tree: Tree,
-  friction: Friction,
-  losses: Losses,
-  findings: FindingList,
-): Paths {
-  const { outlets } = tree;
-  const needs = outletNeeds(system, tree, friction, losses);
-  const governing = indexOfMost(needs.required);
-  const most = needs.required[governing]!;
-  const paths = new Array<SolvedPath>(outlets.length);
-  fillPaths(system, tree, losses, needs, most, paths);
-  reportShort(system, tree, needs.required, findings);
-  return { paths, governingOutletNodeId: system.nodes[outlets[governing]!]!.id, requiredPressure: most };
-}
-
-interface OutletNeeds {
+/** What each outlet needs at the equipment, in the order of the outlets. */
+export interface OutletNeeds {
   readonly outletPressure: Float64Array;
+  /** Losses on the way, and what the outlet itself takes. */
   readonly required: Float64Array;
+  /** The outlet whose path needs the most pressure; of equals, the first. */
+  readonly governing: number;
 }
 
 /**
  * An outlet that says no pressure of its own is an open end: it takes one velocity pressure of its duct, unless its segment
  * has a mouth, whose loss is among the fittings.
  */
-function outletNeeds(
+export function findNeeds(
   system: AirSystem,
   { outlets, into }: Tree,
   { velocityPressure }: Friction,
@@ -58,7 +38,7 @@ function outletNeeds(
     outletPressure[o] = typed ?? (hasMouth ? 0 : openEnd * velocityPressure[last]!);
     required[o] = frictionTo[last]! + dynamicTo[last]! + outletPressure[o]!;
   }
-  return { outletPressure, required };
+  return { outletPressure, required, governing: indexOfMost(required) };
 }
 
 function indexOfMost(values: Float64Array): number {
@@ -67,15 +47,15 @@ function indexOfMost(values: Float64Array): number {
   return most;
 }
 
-/** Walks the tree once with the way so far at hand, and copies it at each outlet. */
-function fillPaths(
+/** Paths in the order of the outlets. Walks the tree once with the way so far at hand, and copies it at each outlet. */
+export function writePaths(
   { nodes, segments, design }: AirSystem,
   { outlets, into, order, depth }: Tree,
   losses: Losses,
   needs: OutletNeeds,
-  most: number,
-  paths: SolvedPath[],
-): void {
+): readonly SolvedPath[] {
+  const most = needs.required[needs.governing]!;
+  const paths = new Array<SolvedPath>(outlets.length);
   const outletAfter = new Int32Array(order.length).fill(NONE);
   for (let o = 0; o < outlets.length; o++) outletAfter[into[outlets[o]!]!] = o;
 
@@ -97,6 +77,7 @@ function fillPaths(
       most,
     );
   }
+  return paths;
 }
 
 const PathRecord = plainRecord(function (
@@ -121,7 +102,12 @@ const PathRecord = plainRecord(function (
   this.throttle_pa = pascals(most - required[outlet]!);
 });
 
-function reportShort({ nodes, design }: AirSystem, tree: Tree, required: Float64Array, findings: FindingList): void {
+export function reportShort(
+  { nodes, design }: AirSystem,
+  tree: Tree,
+  { required }: OutletNeeds,
+  findings: FindingList,
+): void {
   const { outlets, into } = tree;
   const limit = design.availablePressure_pa;
   for (let o = 0; o < outlets.length; o++) {

@@ -1,6 +1,5 @@
 /** The section of every segment, as typed or by the rule, and the measures that follow from it alone. */
 import type { AirSystem, Section } from "../air-system.ts";
-import { equivalentDiameter } from "../geometry/equivalent-diameter.ts";
 import { hydraulicDiameter, sectionArea, wettedPerimeter } from "../geometry/section.ts";
 import { meters, squareMeters } from "../quantity.ts";
 import type { SizingTables } from "../sizing/size-rule.ts";
@@ -13,7 +12,6 @@ export interface Sections {
   readonly area: Float64Array;
   readonly perimeter: Float64Array;
   readonly hydraulicDiameter: Float64Array;
-  readonly equivalentDiameter: Float64Array;
 }
 
 export function chooseSections(
@@ -35,12 +33,10 @@ function measure(section: readonly Section[]): Sections {
   const area = new Float64Array(section.length);
   const perimeter = new Float64Array(section.length);
   const hydraulic = new Float64Array(section.length);
-  const equivalent = new Float64Array(section.length);
   fillAreas(section, area);
   fillPerimeters(section, perimeter);
   fillHydraulicDiameters(area, perimeter, hydraulic);
-  fillEquivalentDiameters(section, area, perimeter, hydraulic, equivalent);
-  return { section, area, perimeter, hydraulicDiameter: hydraulic, equivalentDiameter: equivalent };
+  return { section, area, perimeter, hydraulicDiameter: hydraulic };
 }
 
 // A short loop for each measure: the engine compiles a short loop whole, and then makes no number objects on the way.
@@ -56,18 +52,5 @@ function fillPerimeters(section: readonly Section[], perimeter: Float64Array): v
 function fillHydraulicDiameters(area: Float64Array, perimeter: Float64Array, diameter: Float64Array): void {
   for (let s = 0; s < area.length; s++) {
     diameter[s] = hydraulicDiameter(squareMeters(area[s]!), meters(perimeter[s]!));
-  }
-}
-
-function fillEquivalentDiameters(
-  section: readonly Section[],
-  area: Float64Array,
-  perimeter: Float64Array,
-  hydraulic: Float64Array,
-  diameter: Float64Array,
-): void {
-  for (let s = 0; s < area.length; s++) {
-    const areaOf = squareMeters(area[s]!);
-    diameter[s] = equivalentDiameter(section[s]!, areaOf, meters(perimeter[s]!), meters(hydraulic[s]!));
   }
 }

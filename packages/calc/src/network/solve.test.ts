@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { benchSystem } from "../checks/many-segments.ts";
 import { meters, pascals } from "../quantity.ts";
 import {
   aSystem,
@@ -13,6 +14,7 @@ import {
   round,
 } from "../testing/air-system-builder.ts";
 import { findingIds, segmentOf, solved } from "../testing/answers.ts";
+import { solve } from "./solve.ts";
 
 /** Unit, tee, a near outlet to the side, a far outlet straight on. */
 const branched = (rest: Parameters<typeof aSystem>[2] = {}) =>
@@ -233,5 +235,24 @@ describe("flexible duct", () => {
     const spec = { ...ordinary.spec, flexibleSlack: 0.5 };
     const solution = solved(oneDuct(round(0.2), 0.1, { flexible: true, length: 1, system: { spec } }));
     expect(findingIds(solution)).toEqual(["table-range-exceeded:unit-out"]);
+  });
+});
+
+describe("the answer", () => {
+  it("is plain data: the same after JSON and after a structured clone, records included", () => {
+    const answer = solve(benchSystem(40));
+    if (!answer.ok) throw new Error("the system is sound");
+    const cloned = structuredClone(answer.value);
+    expect(cloned.segments).toHaveLength(40);
+    expect(cloned.paths.length).toBeGreaterThan(5);
+    expect(JSON.parse(JSON.stringify(answer.value))).toEqual(JSON.parse(JSON.stringify(cloned)));
+    expect(cloned).toEqual({ ...answer.value });
+  });
+
+  it("hands out the same records each time they are read", () => {
+    const answer = solve(benchSystem(40));
+    if (!answer.ok) throw new Error("the system is sound");
+    expect(answer.value.segments).toBe(answer.value.segments);
+    expect(answer.value.paths).toBe(answer.value.paths);
   });
 });

@@ -19,9 +19,9 @@ import { fittingColumns } from "./fitting-columns.ts";
 import { addUpFlows } from "./flows.ts";
 import { findFriction } from "./friction.ts";
 import { findLeakage, sumLosses } from "./losses.ts";
-import { tracePaths } from "./paths.ts";
+import { findNeeds, reportShort, writePaths } from "./paths.ts";
 import { chooseSections } from "./sections.ts";
-import type { Solution, SystemProblem } from "./solution.ts";
+import type { Solution, SolvedPath, SolvedSegment, SystemProblem } from "./solution.ts";
 import { readTraits } from "./traits.ts";
 import { buildTree } from "./tree.ts";
 import { writeSegments } from "./write-segments.ts";
@@ -31,6 +31,8 @@ import { writeSegments } from "./write-segments.ts";
  *
  * Segments carry the air of the outlets beyond them. Leakage is told beside it and added to what the equipment moves; it
  * does not change the flow in a segment. Total pressure is accounted throughout, friction on the hydraulic diameter.
+ *
+ * The answer is plain data, also for JSON and structured clones; `segments` and `paths` are written on first reading.
  *
  * Range    one pass each way over the segments: cost is linear in them
  * Problem  every code of `SystemProblem`, all at once
@@ -84,15 +86,23 @@ export function solve(
   const leakage = findLeakage(system, sections, traits, course, friction, losses);
   const columns = { system, course, flows, sections, traits, friction, fittings, accessories, losses, leakage };
   checkDesign(columns, findings);
-  const { paths, governingOutletNodeId, requiredPressure } = tracePaths(system, tree, friction, losses, findings);
+  const needs = findNeeds(system, tree, friction, losses);
+  reportShort(system, tree, needs, findings);
 
+  // Records cost as much as the physics, and most readers want few of them: written when they are first asked for.
+  let segments: readonly SolvedSegment[] | null = null;
+  let paths: readonly SolvedPath[] | null = null;
   return ok({
     systemId: system.id,
     air: { density_kg_m3: density, viscosity_pa_s: viscosity },
-    segments: writeSegments(columns),
-    paths,
-    governingOutletNodeId,
-    requiredPressure_pa: pascals(requiredPressure),
+    get segments() {
+      return (segments ??= writeSegments(columns));
+    },
+    get paths() {
+      return (paths ??= writePaths(system, tree, losses, needs));
+    },
+    governingOutletNodeId: system.nodes[tree.outlets[needs.governing]!]!.id,
+    requiredPressure_pa: pascals(needs.required[needs.governing]!),
     availablePressure_pa: design.availablePressure_pa,
     outletAirflow_m3s: cubicMetersPerSecond(totalAirflow(system, tree.outlets)),
     leakage_m3s: cubicMetersPerSecond(totalOf(leakage)),

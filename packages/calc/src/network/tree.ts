@@ -86,6 +86,7 @@ function readSegments(system: AirSystem, ends: Ends, problems: SystemProblem[]):
   if (nodeIndex.hasDuplicates) reportDuplicates(nodes.map(nodeSubject), problems);
   if (indexIds(segments).hasDuplicates) reportDuplicates(segments.map(segmentSubject), problems);
 
+  // As runs are drawn: on from where the last segment ended, or, after an outlet, off the node that it left.
   let tailGuess = equipment;
   let headGuess = 0;
   for (let s = 0; s < segments.length; s++) {
@@ -94,7 +95,7 @@ function readSegments(system: AirSystem, ends: Ends, problems: SystemProblem[]):
 
     const tail = findIdNear(nodeIndex, segment.fromNodeId, tailGuess);
     const head = findIdNear(nodeIndex, segment.toNodeId, headGuess);
-    tailGuess = head;
+    tailGuess = head !== NOT_FOUND && nodes[head]!.role === "outlet" ? tail : head;
     headGuess = head + 1;
     from[s] = tail;
     to[s] = head;

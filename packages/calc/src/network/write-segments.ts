@@ -1,6 +1,7 @@
 /** The columns of the air stage, written out as one record for each segment. */
 import type { AirSystem } from "../air-system.ts";
 import { flowRegime } from "../friction/friction-factor.ts";
+import { equivalentDiameter } from "../geometry/equivalent-diameter.ts";
 import { cubicMetersPerSecond, meters, metersPerSecond, pascals, pascalsPerMeter, squareMeters } from "../quantity.ts";
 import type { Course } from "./course.ts";
 import { fittingsOf, type FittingColumns } from "./fitting-columns.ts";
@@ -48,6 +49,7 @@ const SegmentRecord = plainRecord(function (
 ) {
   const { sections, friction, losses } = columns;
   const segment = columns.system.segments[s]!;
+  const perimeter = meters(sections.perimeter[s]!);
   this.segmentId = segment.id;
   this.section = sections.section[s]!;
   this.sized = segment.section === null ? "by-rule" : "typed";
@@ -55,7 +57,7 @@ const SegmentRecord = plainRecord(function (
   this.length_m = meters(columns.course.length[s]!);
   this.area_m2 = squareMeters(sections.area[s]!);
   this.hydraulicDiameter_m = meters(sections.hydraulicDiameter[s]!);
-  this.equivalentDiameter_m = meters(sections.equivalentDiameter[s]!);
+  this.equivalentDiameter_m = equivalentDiameter(this.section, this.area_m2, perimeter, this.hydraulicDiameter_m);
   this.meanVelocity_m_s = metersPerSecond(friction.velocity[s]!);
   this.velocityPressure_pa = pascals(friction.velocityPressure[s]!);
   this.reynoldsNumber = friction.reynoldsNumber[s]!;
