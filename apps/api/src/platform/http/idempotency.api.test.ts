@@ -35,7 +35,9 @@ test("a request that is sent again while it runs is told so, and done once", asy
   const { begun, work, end } = slowWork();
   const running = onlyOnce(once, work);
   await begun;
-  await expect(onlyOnce(once, () => Promise.resolve({ by: "the second" }))).rejects.toMatchObject({ code: "still-running" });
+  await expect(onlyOnce(once, () => Promise.resolve({ by: "the second" }))).rejects.toMatchObject({
+    code: "still-running",
+  });
   end();
   expect(await running).toEqual({ by: "the first" });
   expect(await onlyOnce(once, () => Promise.resolve({ by: "the second" }))).toEqual({ by: "the first" });
