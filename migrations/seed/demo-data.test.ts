@@ -1,4 +1,4 @@
-import { feet, inches, meters } from "@cleatwork/calc";
+import { feet, inches, meters, NO_COMPANY_STANDARDS } from "@cleatwork/calc";
 import type { LayoutRecord, LevelRecord } from "@cleatwork/contracts";
 import { checkLayout, computeNumbers, createLayout } from "@cleatwork/layout";
 import { describe, expect, test } from "vitest";
@@ -45,6 +45,7 @@ function numbersOf(project: DemoProject) {
       conditionFactor: 1,
       version: 1,
     },
+    standards: NO_COMPANY_STANDARDS,
     pricing: { rates: null, conditionFactor: null, conditionReason: "", adds: [], version: 1 },
     pricedOn: TODAY.toISOString().slice(0, 10),
   });

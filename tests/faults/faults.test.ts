@@ -1,5 +1,6 @@
 /** What must not be lost when a part fails: the real product, its parts ended without warning. */
 import { startWholeStack, throwawayFolder, type WholeStack } from "@cleatwork/local-stack/stack";
+import { NO_COMPANY_STANDARDS } from "@cleatwork/calc";
 import { computeNumbers } from "@cleatwork/layout";
 import { ApiClient } from "@cleatwork/migrations/seed/api-client";
 import type { CompanySlug, ProjectId, SegmentRecord } from "@cleatwork/contracts";
@@ -86,6 +87,7 @@ describe("the mail server is down", () => {
       currency: book.currency,
       items: book.items,
       settings,
+      standards: NO_COMPANY_STANDARDS,
       pricing,
       pricedOn: new Date().toISOString().slice(0, 10),
     });

@@ -12,6 +12,7 @@ import { pricingHandlers } from "./features/pricing/index.ts";
 import { projectHandlers } from "./features/projects/index.ts";
 import { quoteHandlers } from "./features/quotes/index.ts";
 import { specHandlers } from "./features/specs/index.ts";
+import { standardsHandlers } from "./features/standards/index.ts";
 import { sendProblems } from "./platform/http/errors.ts";
 import { mount, type AnyHandler } from "./platform/http/mount.ts";
 import { openApiDocument } from "./platform/http/openapi.ts";
@@ -30,6 +31,7 @@ const handlers = {
   ...clientHandlers,
   ...projectHandlers,
   ...specHandlers,
+  ...standardsHandlers,
   ...layoutHandlers,
   ...pricingHandlers,
   ...quoteHandlers,

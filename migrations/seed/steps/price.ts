@@ -1,4 +1,5 @@
 import type { ProjectId } from "@cleatwork/contracts";
+import { NO_COMPANY_STANDARDS } from "@cleatwork/calc";
 import { computeNumbers } from "@cleatwork/layout";
 import type { People } from "./people.ts";
 
@@ -23,6 +24,7 @@ export async function priceAsTheBrowserWould(
     currency: book.currency,
     items: book.items,
     settings,
+    standards: NO_COMPANY_STANDARDS,
     pricing,
     pricedOn: new Date().toISOString().slice(0, 10),
   });

@@ -20,6 +20,13 @@ export {
   type ProductivityTable,
   type WorkCondition,
 } from "./takeoff/productivity.ts";
+export {
+  NO_COMPANY_STANDARDS,
+  standardsOf,
+  type CompanyHours,
+  type CompanyStandards,
+} from "./takeoff/company-standards.ts";
+export { sheetLabels } from "./takeoff/sheet-weights.table.ts";
 export { shippedStandards } from "./takeoff/shipped-standards.ts";
 export { sizeKey } from "./takeoff/count-items.ts";
 export * from "./money.ts";

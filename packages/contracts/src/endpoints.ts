@@ -8,6 +8,7 @@ import { pricingEndpoints } from "./pricing.ts";
 import { projectEndpoints } from "./projects.ts";
 import { quoteEndpoints } from "./quotes.ts";
 import { specEndpoints } from "./specs.ts";
+import { standardsEndpoints } from "./standards.ts";
 
 export const endpoints = {
   ...peopleEndpoints,
@@ -15,6 +16,7 @@ export const endpoints = {
   ...clientEndpoints,
   ...projectEndpoints,
   ...specEndpoints,
+  ...standardsEndpoints,
   ...layoutEndpoints,
   ...pricingEndpoints,
   ...quoteEndpoints,

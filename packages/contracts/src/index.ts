@@ -13,6 +13,7 @@ export * from "./companies.ts";
 export * from "./clients.ts";
 export * from "./projects.ts";
 export * from "./specs.ts";
+export * from "./standards.ts";
 export * from "./pricing.ts";
 export * from "./quotes.ts";
 export * from "./field.ts";

@@ -16,6 +16,7 @@ const estimating = [
   "drawings.write",
   "specs.read",
   "specs.write",
+  "standards.read",
   "layouts.read",
   "layouts.write",
   "prices.read",
@@ -25,7 +26,7 @@ const estimating = [
   "quotes.issue",
   "mail.read",
 ] as const;
-const owning = ["company.write", "people.manage", "prices.write", "audit.read"] as const;
+const owning = ["company.write", "people.manage", "prices.write", "standards.write", "audit.read"] as const;
 
 export type Permission = (typeof everyone)[number] | (typeof estimating)[number] | (typeof owning)[number];
 

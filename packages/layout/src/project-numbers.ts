@@ -1,14 +1,14 @@
 /** From a project's documents to its numbers: air, takeoff, estimate. The browser's worker and the server run this. */
 import {
   price,
-  shippedStandards,
   solve,
+  standardsOf,
   takeOff,
   type AirSystem,
+  type CompanyStandards,
   type Estimate,
   type Meters,
   type PriceItem,
-  type ShopStandards,
   type Solution,
   type SystemProblem,
   type Takeoff,
@@ -24,6 +24,8 @@ export interface PricingDocuments {
   readonly currency: string;
   readonly items: readonly PriceItem[];
   readonly settings: PricingSettings;
+  /** The company's own schedules, in force on the day. */
+  readonly standards: CompanyStandards;
   readonly pricing: ProjectPricing;
   /** The day the prices are read for, YYYY-MM-DD. */
   readonly pricedOn: string;
@@ -42,7 +44,7 @@ export function computeNumbers(documents: PricingDocuments): Numbers {
   const { settings, pricing } = documents;
   const layout = createLayout(documents.records);
   const systems = airSystemsFrom(layout, { specs: documents.specs, altitude_m: documents.altitude_m });
-  const standards = withCondition(shippedStandards, pricing.conditionFactor ?? settings.conditionFactor);
+  const standards = standardsOf(documents.standards, pricing.conditionFactor ?? settings.conditionFactor);
 
   const solutions: Solution[] = [];
   const takeoffs: Takeoff[] = [];
@@ -72,8 +74,3 @@ export function computeNumbers(documents: PricingDocuments): Numbers {
         });
   return { systems, solutions, takeoffs, estimate, problems };
 }
-
-const withCondition = (standards: ShopStandards, conditionFactor: number): ShopStandards => ({
-  ...standards,
-  productivity: { ...standards.productivity, conditionFactor },
-});

@@ -29,11 +29,11 @@ export interface GaugeRow {
   readonly gauge: string | null;
   readonly reinforcement: Reinforcement;
   /** Sheet from which this side needs no reinforcement; null or absent: not known. */
-  readonly unreinforcedGauge?: string | null;
+  readonly unreinforcedGauge?: string | null | undefined;
   /** How it is joined, seamed and cut, where the schedule says so; used by specs that leave it to the schedule. */
-  readonly joint?: string | null;
-  readonly seam?: string | null;
-  readonly sectionLength_m?: Meters | null;
+  readonly joint?: string | null | undefined;
+  readonly seam?: string | null | undefined;
+  readonly sectionLength_m?: Meters | null | undefined;
 }
 
 /** One chart: a metal, a shape, a pressure class. */
@@ -43,11 +43,11 @@ export interface GaugeChart {
   /** Largest absolute pressure class these rows hold for. */
   readonly pressureClass_pa: number;
   /** Absent: for duct under pressure and under suction alike. Suction needs heavier round duct. */
-  readonly pressureSign?: "positive" | "negative";
+  readonly pressureSign?: "positive" | "negative" | undefined;
   /** Absent: however it is made. */
-  readonly construction?: Construction;
+  readonly construction?: Construction | undefined;
   /** Joints or reinforcement at most this far apart; absent: at any spacing. */
-  readonly spacing_m?: Meters;
+  readonly spacing_m?: Meters | undefined;
   readonly sizes: readonly GaugeRow[];
 }
 

@@ -97,3 +97,6 @@ export const sheetTable = {
 /** Null where the table has no such sheet of that metal. */
 export const findSheet = (material: Material, label: string): Sheet | null =>
   sheetTable.metals[material].get(label) ?? null;
+
+/** Labels of the sheets that a metal is sold in, thinnest first: what a schedule may ask for. */
+export const sheetLabels = (material: Material): readonly string[] => [...sheetTable.metals[material].keys()];

@@ -1,4 +1,4 @@
-import type { PriceItem } from "@cleatwork/calc";
+import { NO_COMPANY_STANDARDS, type PriceItem } from "@cleatwork/calc";
 import { computeNumbers } from "@cleatwork/layout";
 import { randomUUID } from "node:crypto";
 import { describe, expect, test } from "vitest";
@@ -68,6 +68,7 @@ describe("a project’s numbers", () => {
       currency: book.currency,
       items: book.items,
       settings,
+      standards: NO_COMPANY_STANDARDS,
       pricing,
       pricedOn: PRICED_ON,
     });

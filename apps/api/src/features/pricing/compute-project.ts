@@ -4,6 +4,7 @@ import { companyQuestion } from "../companies/index.ts";
 import { layoutQuestion } from "../layouts/index.ts";
 import { projectQuestion } from "../projects/index.ts";
 import { specsQuestion } from "../specs/index.ts";
+import { standardsOn, standardsQuestion } from "../standards/index.ts";
 import { computeNumbers, type ProjectNumbers } from "./compute.ts";
 import { priceItemsQuestion, projectPricingQuestion, settingsQuestion } from "./pricing.repository.ts";
 
@@ -13,6 +14,7 @@ export const projectQuestions = (db: TenantDb, projectId: ProjectId) => ({
   project: projectQuestion(db, projectId),
   layout: layoutQuestion(db, projectId),
   specs: specsQuestion(db),
+  standards: standardsQuestion(db),
   items: priceItemsQuestion(db),
   settings: settingsQuestion(db),
   pricing: projectPricingQuestion(db, projectId),
@@ -27,7 +29,9 @@ export function numbersFrom(answers: ProjectAnswers, pricedOn: string): ProjectN
   const { company, project, layout, pricing, ...documents } = answers;
   if (!project || !layout || !pricing) return null;
   const { specs, items, settings } = documents;
-  return computeNumbers({ project, ...layout, specs, items, settings, currency: company.currency, pricing, pricedOn });
+  const standards = standardsOn(documents.standards, pricedOn);
+  const { currency } = company;
+  return computeNumbers({ project, ...layout, specs, standards, items, settings, currency, pricing, pricedOn });
 }
 
 /** A project's numbers from what is stored now, with the company they are for; null when there is no such project here. */

@@ -9,6 +9,7 @@ export const TENANT_TABLES = [
   "projects",
   "drawings",
   "specs",
+  "standards",
   "layouts",
   "layout_records",
   "layout_changes",

@@ -27,7 +27,8 @@ export function WorkspaceProvider({
   children: ReactNode;
 }) {
   const session = useSession();
-  const [project, layoutRead, specs, book, settings, pricing] = useSuspenseQueries({
+  const pricedOn = dayIn(session.company.timeZone, new Date());
+  const [project, layoutRead, specs, book, settings, pricing, standards] = useSuspenseQueries({
     queries: [
       projectQueries.detail(company, projectId),
       workspaceQueries.layout(company, projectId),
@@ -35,6 +36,7 @@ export function WorkspaceProvider({
       workspaceQueries.priceBook(company),
       workspaceQueries.settings(company),
       workspaceQueries.pricing(company, projectId),
+      workspaceQueries.standards(company, pricedOn),
     ],
   });
 
@@ -70,10 +72,11 @@ export function WorkspaceProvider({
       currency: book.data.currency,
       items: book.data.items,
       settings: settings.data,
+      standards: standards.data.document,
       pricing: pricing.data,
-      pricedOn: dayIn(session.company.timeZone, new Date()),
+      pricedOn,
     }),
-    [layout, specs.data, project.data.altitude_m, book.data, settings.data, pricing.data, session.company.timeZone],
+    [layout, specs.data, project.data.altitude_m, book.data, settings.data, standards.data, pricing.data, pricedOn],
   );
   const numbers = useNumbers(documents);
   const selection = useSelection();

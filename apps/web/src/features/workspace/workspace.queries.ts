@@ -26,6 +26,12 @@ export const workspaceQueries = {
       queryKey: [company, "prices", "settings"],
       queryFn: ({ signal }) => api(endpoints.getPricingSettings, { params: { company }, signal }),
     }),
+  /** The company's own schedules, in force on the day. */
+  standards: (company: CompanySlug, on: string) =>
+    queryOptions({
+      queryKey: [company, "standards", "on", on],
+      queryFn: ({ signal }) => api(endpoints.getStandards, { params: { company }, query: { on }, signal }),
+    }),
   pricing: (company: CompanySlug, projectId: ProjectId) =>
     queryOptions({
       queryKey: [company, "projects", projectId, "pricing"],

@@ -1,0 +1,3 @@
+/** The door of standards. */
+export { standardsHandlers } from "./standards.routes.ts";
+export { standardsOn, standardsQuestion } from "./standards.repository.ts";

@@ -1,0 +1,99 @@
+/** Which values of the schedules changed, in words: for the history and for the audit trail. */
+import {
+  METERS_PER_INCH,
+  PASCALS_PER_INCH_OF_WATER,
+  type CompanyHours,
+  type CompanyStandards,
+  type GaugeChart,
+  type GaugeRow,
+  type GaugeSchedule,
+  type HoursRow,
+} from "@cleatwork/calc";
+import { chartKey, type StandardsChange } from "@cleatwork/contracts";
+
+type Values = Readonly<Record<string, string>>;
+
+/** Subject → field → value. Two documents compare as two such maps; order and layout of the document do not count. */
+type Facts = Map<string, Values>;
+
+export function standardsChanges(before: CompanyStandards, after: CompanyStandards): StandardsChange[] {
+  const [old, now] = [factsOf(before), factsOf(after)];
+  const changes: StandardsChange[] = [];
+  for (const subject of new Set([...old.keys(), ...now.keys()])) {
+    const [was, is] = [old.get(subject) ?? {}, now.get(subject) ?? {}];
+    for (const field of new Set([...Object.keys(was), ...Object.keys(is)]))
+      if (was[field] !== is[field])
+        changes.push({ subject, field, before: was[field] ?? null, after: is[field] ?? null });
+  }
+  return changes;
+}
+
+const factsOf = ({ gauges, hours, ratioTolerance }: CompanyStandards): Facts =>
+  new Map<string, Values>([
+    ["Totals check", { "how far from our history": `${Number((100 * ratioTolerance).toFixed(1))} %` }],
+    ...(gauges ? gaugeFacts(gauges) : []),
+    ...(hours ? hoursFacts(hours) : []),
+  ]);
+
+const gaugeFacts = ({ name, source, standing, rows }: GaugeSchedule): [string, Values][] => [
+  ["Gauge schedule", { name, source, standing }],
+  ...rows.flatMap((chart) =>
+    chart.sizes.map((size): [string, Values] => [
+      `${chartWords(chart)}, up to ${lengthWords(size.upTo_m)}`,
+      rowValues(size),
+    ]),
+  ),
+];
+
+/** Told apart as the contract tells charts apart, so that no two share a subject. */
+function chartWords(chart: GaugeChart): string {
+  const { material, shape, pressureClass_pa, pressureSign, construction, spacing_m } = chart;
+  const [, , , sign = "any", made = "any"] = chartKey(chart).split(" ");
+  return [
+    `${material} ${shape}`,
+    `${Number((pressureClass_pa / PASCALS_PER_INCH_OF_WATER).toFixed(3))} in. w.g. (${pressureClass_pa.toFixed(0)} Pa)`,
+    ...(pressureSign ? [sign] : []),
+    ...(construction ? [made] : []),
+    ...(spacing_m === undefined ? [] : [`joints ${lengthWords(spacing_m)} apart`]),
+  ].join(", ");
+}
+
+const rowValues = ({ gauge, reinforcement, joint, seam, sectionLength_m, unreinforcedGauge }: GaugeRow): Values => ({
+  gauge: gauge ?? "none",
+  reinforcement:
+    reinforcement.kind === "required"
+      ? `${reinforcement.grade}${reinforcement.spacing_m === null ? "" : ` every ${lengthWords(reinforcement.spacing_m)}`}`
+      : reinforcement.kind.replace("-", " "),
+  ...(unreinforcedGauge ? { "without reinforcement from": unreinforcedGauge } : {}),
+  ...(joint ? { joint } : {}),
+  ...(seam ? { seam } : {}),
+  ...(sectionLength_m ? { "section length": lengthWords(sectionLength_m) } : {}),
+});
+
+const hoursFacts = (hours: CompanyHours): [string, Values][] => [
+  ["Hours", { name: hours.name, source: hours.source }],
+  ["Hours each", { hanger: hoursWords(hours.hanger_h_each), device: hoursWords(hours.device_h_each) }],
+  [
+    "Accessories",
+    Object.fromEntries(Object.entries(hours.accessory_h_each).map(([kind, value]) => [kind, hoursWords(value)])),
+  ],
+  ...hours.rows.map((row): [string, Values] => [
+    hoursSubject(row),
+    { [`hours by ${row.per}`]: `${hoursWords(row.hours_h)}/${UNITS[row.per]}`, standing: row.standing, note: row.note },
+  ]),
+  ...hours.conditions.map(({ name, factor, standing }): [string, Values] => [
+    `Condition: ${name}`,
+    { factor: `× ${factor}`, standing },
+  ]),
+];
+
+const UNITS = { weight: "kg", length: "m", piece: "ea" } as const;
+
+const hoursSubject = ({ place, kind, shape, material, upTo_m }: HoursRow): string =>
+  `Hours in the ${place}: ${[kind, shape, material].filter((word) => word !== null).join(" ")}, ${
+    upTo_m === null ? "any size" : `up to ${lengthWords(upTo_m)}`
+  }`;
+
+const lengthWords = (length_m: number): string =>
+  `${Number((length_m / METERS_PER_INCH).toFixed(2))} in. (${(1000 * length_m).toFixed(0)} mm)`;
+const hoursWords = (hours_h: number): string => `${Number(hours_h.toFixed(5))} h`;
