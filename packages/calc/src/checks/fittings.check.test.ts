@@ -11,20 +11,25 @@ import {
   divergingBranchCoefficient,
   divergingMainCoefficient,
   joiningMomentum,
+  splitLegCoefficient,
 } from "../fittings/junction.ts";
+import { splitterCurveRatio, splitterElbowCoefficient } from "../fittings/splitter-elbow.ts";
 import { shippedPractice } from "../fittings/practice.table.ts";
 import { contractionCoefficient, expansionCoefficient, transitionForm } from "../fittings/transition.ts";
 import { radians, squareMeters } from "../quantity.ts";
 import { expectWithin } from "./expect-within.ts";
 import {
   bendAngle,
+  goredFewerPrinted,
   goredPrinted,
+  miteredPrinted,
+  oneSplitterPrinted,
   radiusPrinted,
   smoothByLibrary,
   smoothPrinted,
   squareThroatPrinted,
 } from "./rows/elbow.rows.ts";
-import { junctionRows } from "./rows/junction.rows.ts";
+import { junctionRows, straightTapPrinted, wyePoint } from "./rows/junction.rows.ts";
 import { contractionPrinted, expansionByLibrary, expansionPrinted, sharpContraction } from "./rows/transition.rows.ts";
 
 const degrees = (value: number) => radians((value * Math.PI) / 180);
@@ -50,6 +55,30 @@ describe("elbows", () => {
   it("gored lie near a printed duct table", () => {
     for (const [radiusRatio, published] of goredPrinted.rows) {
       expectWithin(smooth(radiusRatio) * shippedPractice.goredOverSmooth.pieces5, published, goredPrinted, radiusRatio);
+    }
+  });
+
+  it("gored of fewer pieces lie near it too", () => {
+    const { pieces3, pieces4 } = shippedPractice.goredOverSmooth;
+    for (const [pieces, radiusRatio, published] of goredFewerPrinted.rows) {
+      const ours = smooth(radiusRatio) * (pieces === 3 ? pieces3 : pieces4);
+      expectWithin(ours, published, goredFewerPrinted, [pieces, radiusRatio]);
+    }
+  });
+
+  it("mitered and round agree with the printed table", () => {
+    for (const [angle, published] of miteredPrinted.rows) {
+      const ours = squareThroatElbowCoefficient({ angle: degrees(angle), sideRatio: 1 });
+      expectWithin(ours, published, miteredPrinted, angle);
+    }
+  });
+
+  it("with a splitter agree with printed rows of a square duct, and with their curve ratio", () => {
+    for (const [radiusRatio, curveRatio, published] of oneSplitterPrinted.rows) {
+      const elbow = { angle: RIGHT_ANGLE, radiusRatio, splitterCount: 1 };
+      expectWithin(splitterElbowCoefficient(elbow), published, oneSplitterPrinted, radiusRatio);
+      const tolerance = { absoluteTolerance: oneSplitterPrinted.curveRatioTolerance };
+      expectWithin(splitterCurveRatio(elbow), curveRatio, tolerance, radiusRatio);
     }
   });
 
@@ -107,6 +136,20 @@ describe("transitions", () => {
 });
 
 describe("junctions", () => {
+  it("that split agree with a point that a design guide read off for a wye", () => {
+    const { angle, areaRatio, flowRatio, printed } = wyePoint;
+    const ours = splitLegCoefficient({ turnCosine: Math.cos(degrees(angle)), areaRatio, flowRatio });
+    expectWithin(ours, printed, wyePoint, wyePoint);
+  });
+
+  it("at a straight tap lose as much as a recalled duct table, or somewhat more", () => {
+    for (const [velocityRatio, flowRatio, published] of straightTapPrinted.rows) {
+      const ours = divergingBranchCoefficient({ turnCosine: 0, areaRatio: flowRatio / velocityRatio, flowRatio });
+      expect(ours / published, `${velocityRatio}, ${flowRatio}`).toBeGreaterThan(straightTapPrinted.ratioFrom);
+      expect(ours / published, `${velocityRatio}, ${flowRatio}`).toBeLessThan(straightTapPrinted.ratioTo);
+    }
+  });
+
   it("agree with the handbook's closed forms in all four coefficients", () => {
     expect(junctionRows.rows.length).toBeGreaterThan(40);
     for (const row of junctionRows.rows) {

@@ -148,3 +148,60 @@ export const bendAngle = {
     [180, 1.4],
   ],
 } as const;
+
+export const goredFewerPrinted = {
+  source: "SMACNA HVAC Systems Duct Design, 4th ed., table A-7 B, three and four pieces; ASHRAE CD3-12",
+  standing: "found",
+  columns: "pieces, r/D, C",
+  relativeTolerance: 0.31,
+  why: "one factor of common practice stands for a row that rises from 1.3 to 2.4 times the smooth elbow",
+  rows: [
+    [3, 0.75, 0.54],
+    [3, 1.0, 0.42],
+    [3, 1.5, 0.34],
+    [3, 2.0, 0.33],
+    [4, 0.75, 0.5],
+    [4, 1.0, 0.37],
+    [4, 1.5, 0.27],
+    [4, 2.0, 0.24],
+  ],
+} as const;
+
+export const miteredPrinted = {
+  source: "SMACNA HVAC Systems Duct Design, 4th ed., table A-7 C, round, after Idelchik",
+  standing: "found",
+  columns: "angle in degrees, C",
+  absoluteTolerance: 0.006,
+  relativeTolerance: 0.03,
+  why: "half of the last printed digit; factor 1.2 at a right angle is printed to two digits",
+  rows: [
+    [20, 0.08],
+    [30, 0.16],
+    [45, 0.34],
+    [60, 0.55],
+    [75, 0.81],
+    [90, 1.2],
+  ],
+} as const;
+
+export const oneSplitterPrinted = {
+  source: "ASHRAE Handbook Fundamentals 2005 (SI), CR3-3, at H/W 1",
+  standing: "found",
+  columns: "r/W, curve ratio, C",
+  absoluteTolerance: 0.005,
+  relativeTolerance: 0.1,
+  why: "half of the last printed digit and a tenth: the print is not of our formula, and at r/W 0.55 it has an end effect more",
+  curveRatioTolerance: 0.0011,
+  rows: [
+    [0.55, 0.218, 0.43],
+    [0.6, 0.302, 0.25],
+    [0.65, 0.361, 0.18],
+    [0.7, 0.408, 0.14],
+    [0.75, 0.447, 0.11],
+    [0.8, 0.48, 0.09],
+    [0.85, 0.509, 0.08],
+    [0.9, 0.535, 0.06],
+    [0.95, 0.557, 0.05],
+    [1.0, 0.577, 0.05],
+  ],
+} as const;

@@ -55,3 +55,34 @@ export const junctionRows = {
     [90, 1.0, 0.9, 1.086, 0.1944, null, null],
   ],
 } as const;
+
+/** One leg of a wye whose legs leave at 45° to either side. */
+export const wyePoint = {
+  source: "SMACNA HVAC Systems Duct Design 1990, ch. 8 example, 90° diverging wye, table 14-14 W, by interpolation",
+  standing: "found",
+  absoluteTolerance: 0.02,
+  why: "read between rows by its author, printed to two digits",
+  angle: 45,
+  areaRatio: 0.5,
+  flowRatio: 0.25,
+  printed: 0.44,
+} as const;
+
+/** Straight tap of a round branch on a rectangular main. */
+export const straightTapPrinted = {
+  source: "SMACNA HVAC Systems Duct Design 1990, table 14-14, rectangular main to round branch",
+  standing: "memory",
+  columns: "Vb/Vc, Qb/Qc, C",
+  ratioFrom: 0.85,
+  ratioTo: 1.8,
+  why: "the handbook's general form errs to the safe side, the more so the faster the branch: duct taps measured lower",
+  rows: [
+    [0.4, 0.1, 1.01],
+    [0.6, 0.2, 1.1],
+    [0.8, 0.2, 1.31],
+    [1.0, 0.3, 1.2],
+    [1.2, 0.3, 1.45],
+    [1.4, 0.4, 1.51],
+    [1.8, 0.5, 2.06],
+  ],
+} as const;
