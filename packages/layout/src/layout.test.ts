@@ -211,6 +211,18 @@ describe("split", () => {
     );
   });
 
+  it("leaves the damper in the first part and the end at the outlet in the second", () => {
+    const fields = { accessories: ["volume-damper" as const], damperAngle_rad: 0.5, mouth: "entry-flush" as const };
+    const drawn = done(layout, setSegments(layout, { ids: [second.id], fields, label: "Damper" }));
+    const after = done(drawn, splitSegment(drawn, { segmentId: second.id, share: 0.5 }, ids));
+    const [added] = listOf(after, "segment").filter(({ id }) => !layout.records.has(id));
+    expect(find(after, "segment", second.id)).toMatchObject({ ...fields, mouth: null });
+    expect(added).toMatchObject({ accessories: [], damperAngle_rad: null, mouth: "entry-flush" });
+
+    const joined = done(after, joinAtNode(after, { nodeId: added?.fromNodeId ?? "" }));
+    expect(find(joined, "segment", second.id)).toEqual(find(drawn, "segment", second.id));
+  });
+
   it("is undone by taking the joint out", () => {
     const after = done(layout, splitSegment(layout, { segmentId: second.id, share: 0.5 }, ids));
     const joint = listOf(after, "node").find(({ id }) => !layout.records.has(id)) as NodeRecord;

@@ -20,8 +20,14 @@ export function findFittings(context: FittingContext): void {
     const { fitting, mouth } = segments[s]!;
     if (fitting !== null) putChosen(context, s, before[s]!, fitting);
     else if (before[s] !== NONE) putInferred(context, s, before[s]!);
-    if (mouth !== undefined && mouth !== null) putMouthAtOutlet(context, s, mouth);
+    if (mouth !== undefined && mouth !== null && isLast(context, s)) putMouthAtOutlet(context, s, mouth);
   }
+}
+
+/** No duct goes on from its far end. */
+function isLast({ tree }: FittingContext, s: number): boolean {
+  const end = tree.to[s]!;
+  return tree.childStart[end] === tree.childStart[end + 1];
 }
 
 function putInferred(context: FittingContext, s: number, before: number): void {

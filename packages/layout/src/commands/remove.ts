@@ -1,4 +1,5 @@
 /** Takes ducts out, with what hangs on them. */
+import type { SegmentRecord } from "@cleatwork/contracts";
 import type { Layout } from "../layout.ts";
 import { indexOf, subtreeOf, type LayoutIndex } from "../layout-index.ts";
 import { changed, changeSet, need, refuse, removed, type CommandResult } from "./command.ts";
@@ -44,8 +45,11 @@ export function joinAtNode(
       ? ((before.length_m + after.length_m) as typeof before.length_m)
       : null;
   return changeSet("Take joint out", [
-    changed(before, { ...before, toNodeId: after.toNodeId, length_m: length }),
+    changed(before, { ...before, ...endOf(after), toNodeId: after.toNodeId, length_m: length }),
     removed(after),
     removed(node.value),
   ]);
 }
+
+/** How a duct ends at its outlet, where it says so. */
+const endOf = ({ mouth }: SegmentRecord): Pick<SegmentRecord, "mouth"> => (mouth ? { mouth } : {});

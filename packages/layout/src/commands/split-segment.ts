@@ -45,10 +45,18 @@ export function splitSegment(
     length_m: part(segment.length_m && segment.length_m * (1 - share)),
     fitting: null,
     accessories: [],
+    ...(segment.damperAngle_rad ? { damperAngle_rad: null } : {}),
   };
+  // The damper stays in the first part, the end at the outlet goes with the second.
+  const withoutMouth = segment.mouth ? { mouth: null } : {};
   return changeSet("Split", [
     added(joint),
-    changed(segment, { ...segment, toNodeId: joint.id, length_m: part(segment.length_m && segment.length_m * share) }),
+    changed(segment, {
+      ...segment,
+      ...withoutMouth,
+      toNodeId: joint.id,
+      length_m: part(segment.length_m && segment.length_m * share),
+    }),
     added(second),
   ]);
 }

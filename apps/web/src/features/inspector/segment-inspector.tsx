@@ -1,7 +1,6 @@
 import {
   ACCESSORY_KINDS,
   DUCT_CLASSES,
-  FITTING_TYPES,
   formatLength,
   formatSize,
   meters,
@@ -9,15 +8,15 @@ import {
   parseSize,
   type AccessoryKind,
   type DuctClass,
-  type FittingType,
 } from "@cleatwork/calc";
 import type { SegmentRecord } from "@cleatwork/contracts";
-import { lengthOfSegment, setLength, setSegments } from "@cleatwork/layout";
+import { find, lengthOfSegment, setLength, setSegments } from "@cleatwork/layout";
 import { CheckField, SelectField } from "../../ui/controls.tsx";
 import { useWorkspace } from "../workspace/index.ts";
+import { DamperField, FittingField, MouthField } from "./fitting-fields.tsx";
 import { SegmentResults } from "./segment-results.tsx";
 import { anyText, TypedField } from "./typed-field.tsx";
-import { accessoryNames, classNames as ductClassNames, fittingNames } from "./words.ts";
+import { accessoryNames, classNames as ductClassNames } from "./words.ts";
 
 /** One duct, or many at once: a field that is set is set on all of them, as one step of undo. */
 export function SegmentInspector({ segments }: { segments: readonly SegmentRecord[] }) {
@@ -83,17 +82,10 @@ export function SegmentInspector({ segments }: { segments: readonly SegmentRecor
 
           choices={DUCT_CLASSES.map((value) => ({ value, label: ductClassNames[value] }))}
         />
-        <SelectField
-          label="Fitting at its start"
-          value={first.fitting ?? ""}
-          hint={first.fitting ? "Chosen." : "Inferred from the drawing."}
-          onChange={(event) => set("Fitting", { fitting: (event.target.value || null) as FittingType | null })}
-
-          choices={[
-            { value: "", label: "Inferred" },
-            ...FITTING_TYPES.map((value) => ({ value, label: fittingNames[value] })),
-          ]}
-        />
+        <FittingField first={first} set={set} />
+        {segments.every(({ toNodeId }) => find(layout, "node", toNodeId)?.role === "outlet") && (
+          <MouthField first={first} set={set} />
+        )}
         <CheckField
           label="Flexible"
           checked={first.flexible}
@@ -112,6 +104,9 @@ export function SegmentInspector({ segments }: { segments: readonly SegmentRecor
             />
           ))}
         </fieldset>
+        {segments.every(({ accessories }) => accessories.includes("volume-damper")) && (
+          <DamperField segments={segments} set={set} />
+        )}
       </fieldset>
       {segments.length === 1 && <SegmentResults segment={first} />}
     </div>

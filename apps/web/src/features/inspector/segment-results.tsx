@@ -8,13 +8,15 @@ import {
   decimal,
   pascals,
   type Shown,
+  type SolvedAccessory,
+  type SolvedFitting,
 } from "@cleatwork/calc";
 import type { SegmentRecord } from "@cleatwork/contracts";
 import { find } from "@cleatwork/layout";
 import { Figure } from "../../ui/figure.tsx";
 import { classNames } from "../../lib/class-names.ts";
 import { useWorkspace } from "../workspace/index.ts";
-import { fittingNames } from "./words.ts";
+import { accessoryNames, fittingInputNames, fittingNames, referenceNames } from "./words.ts";
 
 /** What the air does in this duct, and how the pressure is spent. */
 export function SegmentResults({ segment }: { segment: SegmentRecord }) {
@@ -61,7 +63,16 @@ export function SegmentResults({ segment }: { segment: SegmentRecord }) {
               label={fittingNames[fitting.type]}
               shown={formatPressureChange(pascals(0 - fitting.loss_pa), units)}
               aside={`${decimal(fitting.lossCoefficient, 2)} × ${formatPressure(fitting.velocityPressure_pa, units).value}`}
-              title={fitting.source}
+              title={lookedUp(fitting)}
+            />
+          ))}
+          {solved.accessories.map((accessory, position) => (
+            <Row
+              key={`accessory ${position}`}
+              label={accessoryNames[accessory.kind]}
+              shown={formatPressureChange(pascals(0 - accessory.loss_pa), units)}
+              aside={`${decimal(accessory.lossCoefficient, 2)} × ${formatPressure(solved.velocityPressure_pa, units).value}`}
+              title={lookedUp(accessory)}
             />
           ))}
           <Row label="Straight duct" shown={formatPressureChange(pascals(0 - solved.frictionLoss_pa), units)} />
@@ -70,6 +81,14 @@ export function SegmentResults({ segment }: { segment: SegmentRecord }) {
       </section>
     </div>
   );
+}
+
+/** Source of a coefficient and what it was looked up by, in one breath. */
+function lookedUp(loss: SolvedFitting | SolvedAccessory): string {
+  const inputs = loss.inputs.map(({ name, value }) => `${fittingInputNames[name]} ${Number(value.toPrecision(3))}`);
+  const reference = "reference" in loss ? `on the velocity pressure of ${referenceNames[loss.reference]}` : "";
+  const edge = loss.clamped ? "read at the edge of its table" : "";
+  return [loss.source, inputs.join(", "), reference, edge].filter((part) => part !== "").join("; ");
 }
 
 function Row({

@@ -5,7 +5,7 @@ import {
   parseLength,
   parseThickness,
 } from "@cleatwork/calc/display/index";
-import { inches, meters, type Meters, type Pascals } from "@cleatwork/calc";
+import { SPLITTER_COUNTS, inches, meters, type Meters, type Pascals } from "@cleatwork/calc";
 import { endpoints, specRequest, type Spec } from "@cleatwork/contracts";
 import { useQueryClient } from "@tanstack/react-query";
 import type { ReactNode } from "react";
@@ -184,9 +184,11 @@ function Round() {
 }
 
 function Fittings() {
+  const elbow = useWatch<Values, "construction.elbow">({ name: "construction.elbow" });
   return (
     <Part title="Fittings, where the layout does not say otherwise">
       <Select name="construction.elbow.rectangular" label="Rectangular elbow" choices={specChoices.elbowRectangular} />
+      {elbow.rectangular === "radius-splitters" && <Splitters />}
       <Select name="construction.elbow.round" label="Round elbow" choices={specChoices.elbowRound} />
       <Quantity<number>
         name="construction.elbow.radiusRatio"
@@ -213,6 +215,24 @@ function Fittings() {
         {...percent}
       />
     </Part>
+  );
+}
+
+/** A number in the spec, a choice on the screen. */
+function Splitters() {
+  const { setValue } = useFormContext<Values>();
+  const count = useWatch<Values, "construction.elbow.splitterCount">({ name: "construction.elbow.splitterCount" });
+  return (
+    <SelectField
+      label="Splitters in an elbow"
+      value={String(count ?? 1)}
+      onChange={(event) => {
+        const chosen = SPLITTER_COUNTS.find((accepted) => String(accepted) === event.target.value);
+        setValue("construction.elbow.splitterCount", chosen, { shouldDirty: true });
+      }}
+      choices={specChoices.splitterCount}
+      hint="They stand closer toward the throat, so that every passage bends alike."
+    />
   );
 }
 

@@ -1,4 +1,4 @@
-import type { ConstructionSpec, Material, SealClass } from "@cleatwork/calc";
+import type { ConstructionSpec, Material, SealClass, SplitterCount } from "@cleatwork/calc";
 import type { Choice } from "../../ui/controls.tsx";
 
 const choices = <V extends string>(words: Record<V, string>): readonly Choice[] =>
@@ -50,6 +50,7 @@ export const specChoices = {
     "square-throat-vanes": "Square throat, with vanes",
     "square-throat": "Square throat, no vanes",
   }),
+  splitterCount: choices<`${SplitterCount}`>({ 1: "One", 2: "Two", 3: "Three" }),
   elbowRound: choices<ConstructionSpec["elbow"]["round"]>({
     smooth: "Smooth",
     gored: "Gored",
