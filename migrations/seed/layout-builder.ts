@@ -138,6 +138,7 @@ function segment(row: DuctRow, systemId: SystemId, ends: { from: NodeId; to: Nod
     fromNodeId: ends.from,
     toNodeId: ends.to,
     ordinal: ends.ordinal,
+    number: row.no,
     ductClass: row.duct,
     section: sectionFrom(row.size),
     length_m: row.length_ft === undefined ? null : feet(row.length_ft),

@@ -108,10 +108,18 @@ export interface SizingRule {
   readonly maximumHeight_m: Meters | null;
 }
 
+/** The drawing that a level was measured from, as its title block says. */
+export interface SheetReference {
+  readonly sheetNumber: string;
+  readonly revision: string;
+}
+
 export interface Level {
   readonly id: string;
   readonly name: string;
   readonly elevation_m: Meters;
+  /** Null or absent: drawn without a sheet under it. */
+  readonly sheet?: SheetReference | null | undefined;
 }
 
 export const NODE_ROLES = ["equipment", "junction", "outlet"] as const;
@@ -191,6 +199,8 @@ export type AccessoryKind = (typeof ACCESSORY_KINDS)[number];
 export interface AirSegment {
   readonly id: string;
   readonly name: string;
+  /** What its marks begin with, for as long as it lives. Null or absent: the lowest that no other segment has. */
+  readonly number?: number | null | undefined;
   /** The end nearer the equipment, whichever way the air goes. */
   readonly fromNodeId: string;
   readonly toNodeId: string;

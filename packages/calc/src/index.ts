@@ -28,6 +28,7 @@ export {
 } from "./takeoff/company-standards.ts";
 export { sheetLabels } from "./takeoff/sheet-weights.table.ts";
 export { shippedStandards } from "./takeoff/shipped-standards.ts";
+export { markNumbers } from "./takeoff/marks.ts";
 export { sizeKey } from "./takeoff/count-items.ts";
 export * from "./money.ts";
 export { price } from "./pricing/price.ts";

@@ -118,6 +118,10 @@ const levelSchema: z.ZodType<Level, Level> = z.strictObject({
   id: text(64),
   name: text(80),
   elevation_m: metersSchema,
+  sheet: z
+    .strictObject({ sheetNumber: text(40), revision: text(20) })
+    .nullable()
+    .optional(),
 });
 
 const airNodeSchema: z.ZodType<AirNode, AirNode> = z.strictObject({
@@ -143,9 +147,13 @@ export const damperAngleSchema = z
   .optional();
 export const mouthSchema = z.enum(MOUTH_TYPES).nullable().optional();
 
+/** Of a segment, as its marks begin. */
+export const markNumber = z.int().min(1).max(1_000_000);
+
 const airSegmentSchema: z.ZodType<AirSegment, AirSegment> = z.strictObject({
   id: text(64),
   name: text(80),
+  number: markNumber.nullable().optional(),
   fromNodeId: text(64),
   toNodeId: text(64),
   ductClass: z.enum(DUCT_CLASSES),

@@ -6,6 +6,7 @@ import {
   designSchema,
   insulationSchema,
   limitsSchema,
+  markNumber,
   mouthSchema,
   sectionSchema,
   sheetLabel,
@@ -74,6 +75,8 @@ export const segmentRecordSchema = z.strictObject({
   toNodeId: nodeId,
   /** Order among the children of a node, as the estimator arranged them. */
   ordinal: z.number().min(0),
+  /** What the marks of its pieces begin with: given once, never changed, so that metal keeps its name. */
+  number: markNumber.optional(),
   ductClass: z.enum(DUCT_CLASSES),
   section: sectionSchema.nullable(),
   /** Null: from the positions of the nodes. */

@@ -10,11 +10,20 @@ import {
   type Level,
   type Meters,
 } from "@cleatwork/calc";
-import type { NodeRecord, SegmentRecord, SpecId, SystemRecord } from "@cleatwork/contracts";
+import type { DrawingId, NodeRecord, SegmentRecord, SpecId, SystemRecord } from "@cleatwork/contracts";
 import { listOf, type Layout } from "./layout.ts";
 import { indexOf, treeOf, type LayoutIndex } from "./layout-index.ts";
 
+/** What a title block says of a drawing. */
+export interface MeasuredDrawing {
+  readonly id: DrawingId;
+  readonly sheetNumber: string;
+  readonly revision: string;
+}
+
 export interface AirSystemContext {
+  /** Of the project; without them pieces do not know their sheet. */
+  readonly drawings?: readonly MeasuredDrawing[] | undefined;
   readonly specs: readonly { readonly id: SpecId; readonly construction: ConstructionSpec }[];
   /** Of the site; a system's own design conditions keep the rest. */
   readonly altitude_m: Meters;
@@ -27,7 +36,7 @@ export function airSystemsFrom(
   index: LayoutIndex = indexOf(layout),
 ): AirSystem[] {
   const specs = new Map(context.specs.map(({ id, construction }) => [id, construction]));
-  const levels = levelsOf(layout);
+  const levels = levelsOf(layout, context.drawings ?? []);
   return systemsInOrder(layout).flatMap((system) => {
     const spec = specs.get(system.specId);
     return spec ? [airSystem(system, spec, levels, index, context.altitude_m)] : [];
@@ -41,8 +50,15 @@ export const systemsInOrder = (layout: Layout): SystemRecord[] =>
       SERVICES.indexOf(a.service) - SERVICES.indexOf(b.service) || a.tag.localeCompare(b.tag, "en", { numeric: true }),
   );
 
-const levelsOf = (layout: Layout): Level[] =>
-  listOf(layout, "level").map(({ id, name, elevation_m }) => ({ id, name, elevation_m }));
+function levelsOf(layout: Layout, drawings: readonly MeasuredDrawing[]): Level[] {
+  const sheets = new Map(drawings.map(({ id, sheetNumber, revision }) => [id, { sheetNumber, revision }]));
+  return listOf(layout, "level").map(({ id, name, elevation_m, underlay }) => ({
+    id,
+    name,
+    elevation_m,
+    sheet: underlay ? (sheets.get(underlay.drawingId) ?? null) : null,
+  }));
+}
 
 function airSystem(
   system: SystemRecord,
@@ -63,11 +79,13 @@ function airSystem(
     spec,
     levels,
     nodes: (index.nodesOf.get(system.id) ?? []).map(airNode),
-    segments: treeOf(index, system.id).map(({ segment }) => airSegment(segment)),
+    segments: treeOf(index, system.id).map(({ segment, number }) => airSegment(segment, number)),
   };
 }
 
 const airNode = ({ kind: _kind, systemId: _systemId, ...node }: NodeRecord): AirNode => node;
 
-const airSegment = ({ kind: _kind, systemId: _systemId, ordinal: _ordinal, ...segment }: SegmentRecord): AirSegment =>
-  segment;
+const airSegment = (
+  { kind: _kind, systemId: _systemId, ordinal: _ordinal, ...segment }: SegmentRecord,
+  number: number,
+): AirSegment => ({ ...segment, number });

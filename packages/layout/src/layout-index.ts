@@ -1,4 +1,5 @@
 /** The references of the document, read the other way: from a node to its ducts, from a system to its tree. */
+import { markNumbers } from "@cleatwork/calc";
 import type { NodeId, NodeRecord, SegmentId, SegmentRecord, SystemId } from "@cleatwork/contracts";
 import type { Layout } from "./layout.ts";
 
@@ -6,7 +7,7 @@ export interface TreeRow {
   readonly segment: SegmentRecord;
   /** Steps from the equipment. */
   readonly depth: number;
-  /** As it stands in the schedule and on the marks: 1 is the first at the equipment. */
+  /** As it stands in the schedule and on the marks. A segment keeps the number that it was given. */
   readonly number: number;
 }
 
@@ -53,7 +54,7 @@ const byOrdinal = (a: SegmentRecord, b: SegmentRecord) => a.ordinal - b.ordinal 
  * with the equipment follow at the end, so that nothing is hidden.
  */
 export function treeOf(index: LayoutIndex, systemId: SystemId): TreeRow[] {
-  const rows: TreeRow[] = [];
+  const rows: Omit<TreeRow, "number">[] = [];
   const seen = new Set<SegmentId>();
   const walk = (start: readonly SegmentRecord[]) => {
     // A stack of its own, since a riser may be deeper than the call stack is.
@@ -61,7 +62,7 @@ export function treeOf(index: LayoutIndex, systemId: SystemId): TreeRow[] {
     for (let next = waiting.pop(); next; next = waiting.pop()) {
       if (seen.has(next.segment.id)) continue;
       seen.add(next.segment.id);
-      rows.push({ ...next, number: rows.length + 1 });
+      rows.push(next);
       const children = index.childrenOf.get(next.segment.toNodeId) ?? [];
       // A single duct that goes on is the same run; only a branch steps in.
       const depth = next.depth + (children.length > 1 ? 1 : 0);
@@ -72,7 +73,16 @@ export function treeOf(index: LayoutIndex, systemId: SystemId): TreeRow[] {
   const equipment = index.equipmentOf.get(systemId);
   if (equipment) walk(index.childrenOf.get(equipment.id) ?? []);
   walk(index.segmentsOf.get(systemId) ?? []);
-  return rows;
+  const numbers = markNumbers(rows.map(({ segment }) => segment));
+  return rows.map((row, at) => ({ ...row, number: numbers[at]! }));
+}
+
+/** For a new segment: one more than any that the system has, so that no mark is given a second time while it lives. */
+export function nextNumber(index: LayoutIndex, systemId: SystemId): number {
+  let highest = 0;
+  const segments = index.segmentsOf.get(systemId) ?? [];
+  for (const { number } of segments) highest = Math.max(highest, number ?? 0);
+  return Math.max(highest, segments.length) + 1;
 }
 
 /** The segment and everything that hangs on it, it first. */

@@ -29,6 +29,9 @@ const systemId =
   })();
 const lengthFrom = (of: Layout, id: string) => lengthOfSegment(of, find(of, "segment", id) as SegmentRecord);
 
+const numbersIn = (of: Layout) =>
+  new Map(treeOf(indexOf(of), systemId).map(({ segment, number }) => [segment.id, number]));
+
 /** Any edit that a person could make on a layout; some are refused, and then nothing happens. */
 const anyEdit = fc.oneof(
   fc.record({
@@ -123,6 +126,25 @@ describe("every edit", () => {
         }
         expect(checkLayout(now)).toEqual([]);
         for (const record of recordsOf(now)) expect(layoutRecordSchema.safeParse(record).error).toBeUndefined();
+      }),
+      { numRuns: 60 },
+    );
+  });
+
+  it("leaves every duct that stays its number, and gives no number twice", () => {
+    fc.assert(
+      fc.property(fc.array(anyEdit, { minLength: 1, maxLength: 8 }), (edits) => {
+        let now = layout;
+        let known = numbersIn(now);
+        for (const edit of edits) {
+          const result = resultOf(edit, now);
+          if (!result?.ok) continue;
+          now = done(now, result);
+          const numbers = numbersIn(now);
+          expect(new Set(numbers.values()).size).toBe(numbers.size);
+          for (const [id, number] of numbers) expect(known.get(id) ?? number).toBe(number);
+          known = numbers;
+        }
       }),
       { numRuns: 60 },
     );

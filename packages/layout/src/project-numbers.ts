@@ -14,13 +14,14 @@ import {
   type Takeoff,
 } from "@cleatwork/calc";
 import type { LayoutRecord, PricingSettings, ProjectPricing, Spec } from "@cleatwork/contracts";
-import { airSystemsFrom } from "./air-systems.ts";
+import { airSystemsFrom, type MeasuredDrawing } from "./air-systems.ts";
 import { createLayout } from "./layout.ts";
 
 export interface PricingDocuments {
   readonly records: readonly LayoutRecord[];
   readonly specs: readonly Pick<Spec, "id" | "construction">[];
   readonly altitude_m: Meters;
+  readonly drawings?: readonly MeasuredDrawing[] | undefined;
   readonly currency: string;
   readonly items: readonly PriceItem[];
   readonly settings: PricingSettings;
@@ -43,7 +44,11 @@ export interface Numbers {
 export function computeNumbers(documents: PricingDocuments): Numbers {
   const { settings, pricing } = documents;
   const layout = createLayout(documents.records);
-  const systems = airSystemsFrom(layout, { specs: documents.specs, altitude_m: documents.altitude_m });
+  const systems = airSystemsFrom(layout, {
+    specs: documents.specs,
+    altitude_m: documents.altitude_m,
+    drawings: documents.drawings,
+  });
   const standards = standardsOf(documents.standards, pricing.conditionFactor ?? settings.conditionFactor);
 
   const solutions: Solution[] = [];

@@ -1,5 +1,5 @@
 /** What is counted and not cut: hangers, sealant, dampers and doors, devices at the outlets. */
-import type { AccessoryKind, Section } from "../air-system.ts";
+import type { AccessoryKind, Section, SheetReference } from "../air-system.ts";
 import { leg } from "../fittings/joints.ts";
 import { hours, METERS_PER_INCH } from "../quantity.ts";
 import { segmentBefore, type Frame } from "./frame.ts";
@@ -12,6 +12,10 @@ const roundUp = (value: number): number => Math.ceil(value - 1e-9);
 
 /** Level where a segment is hung: that of its far end. */
 export const levelOf = ({ system, tree }: Frame, s: number): string => system.nodes[tree.to[s]!]!.levelId;
+
+/** The sheet that a segment was measured from: that of the same level. */
+export const sheetOf = (frame: Frame, s: number): SheetReference | null =>
+  frame.sheetOfLevel.get(levelOf(frame, s)) ?? null;
 
 /**
  * Hangers of each segment: one a spacing along a run from its start, one at each elbow, one at a free end.

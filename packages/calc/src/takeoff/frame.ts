@@ -1,5 +1,5 @@
 /** The solved system as a shop sees it: sheet-metal sizes, and how each segment leaves the one before. */
-import type { AirSystem, Insulation, Section } from "../air-system.ts";
+import type { AirSystem, Insulation, Section, SheetReference } from "../air-system.ts";
 import { describeJoints, type Joints } from "../fittings/joints.ts";
 import { clearSection, insulationOf } from "../network/clear-section.ts";
 import { layCourse, type Course } from "../network/course.ts";
@@ -7,6 +7,7 @@ import type { Solution, SystemProblem } from "../network/solution.ts";
 import { buildTree } from "../network/tree.ts";
 import { meters } from "../quantity.ts";
 import { gaugeReader } from "./gauge.ts";
+import { markNumbers } from "./marks.ts";
 import { hoursReader } from "./productivity.ts";
 import type { ShopStandards } from "./takeoff.ts";
 
@@ -20,6 +21,9 @@ export interface Frame {
   /** Outside of the liner; what is cut. */
   readonly metal: readonly Section[];
   readonly insulation: readonly Insulation[];
+  /** By segment: what its marks begin with. */
+  readonly numbers: readonly number[];
+  readonly sheetOfLevel: ReadonlyMap<string, SheetReference | null>;
   /** Of the system's metal and pressure class. */
   readonly readGauge: ReturnType<typeof gaugeReader>;
   readonly readHours: ReturnType<typeof hoursReader>;
@@ -48,6 +52,8 @@ export function frameOf(system: AirSystem, solution: Solution, standards: ShopSt
       metalSection(section, system.segments[s]!.flexible ? { kind: "none" } : insulation[s]!),
     ),
     insulation,
+    numbers: markNumbers(system.segments),
+    sheetOfLevel: new Map(system.levels.map(({ id, sheet }) => [id, sheet ?? null])),
     readGauge: gaugeReader({ company: standards.companyGauges, shipped: standards.gauges }, system.spec),
     readHours: hoursReader(standards.productivity),
   };

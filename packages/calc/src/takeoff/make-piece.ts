@@ -1,5 +1,5 @@
 /** From a length or a surface to a piece: gauge, joints, areas, weight, hours, each with its arithmetic. */
-import type { ConstructionSpec, Insulation, Section } from "../air-system.ts";
+import type { ConstructionSpec, Insulation, Section, SheetReference } from "../air-system.ts";
 import { outerPerimeter } from "../geometry/section.ts";
 import { hours, kilograms, meters, squareMeters, type Meters, type SquareMeters } from "../quantity.ts";
 import {
@@ -24,6 +24,7 @@ export interface PieceOrigin {
   readonly systemId: string;
   readonly systemTag: string;
   readonly levelId: string;
+  readonly sheet: SheetReference | null;
   readonly segmentId: string;
   readonly segmentName: string;
   readonly spec: ConstructionSpec;
@@ -146,6 +147,7 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     systemId: origin.systemId,
     systemTag: origin.systemTag,
     levelId: origin.levelId,
+    sheet: origin.sheet,
     segmentId: origin.segmentId,
     segmentName: origin.segmentName,
     kind: metal.kind,
@@ -182,6 +184,7 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   systemId: piece.systemId,
   systemTag: piece.systemTag,
   levelId: piece.levelId,
+  sheet: piece.sheet,
   segmentId: piece.segmentId,
   segmentName: piece.segmentName,
   kind: piece.kind,
@@ -261,6 +264,7 @@ export function flexiblePiece(origin: PieceOrigin, mark: string, section: Sectio
     systemId: origin.systemId,
     systemTag: origin.systemTag,
     levelId: origin.levelId,
+    sheet: origin.sheet,
     segmentId: origin.segmentId,
     segmentName: origin.segmentName,
     kind: "flexible",

@@ -3,7 +3,7 @@ import type { Section } from "../air-system.ts";
 import { isElbow } from "../fittings/infer.ts";
 import type { Solution } from "../network/solution.ts";
 import { KILOGRAMS_PER_POUND, meters, type Meters } from "../quantity.ts";
-import { countAccessories, countDevices, countHangers, countSealant, levelOf } from "./count-items.ts";
+import { countAccessories, countDevices, countHangers, countSealant, levelOf, sheetOf } from "./count-items.ts";
 import { cutStraight } from "./cut-straight.ts";
 import { frameOf, type Frame } from "./frame.ts";
 import { heavyPiece } from "./making.table.ts";
@@ -55,11 +55,12 @@ function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: Takeof
   const { spec } = system;
   const segment = system.segments[s]!;
   const section = metal[s]!;
-  const number = s + 1;
+  const number = frame.numbers[s]!;
   const origin: PieceOrigin = {
     systemId: system.id,
     systemTag: system.tag,
     levelId: levelOf(frame, s),
+    sheet: sheetOf(frame, s),
     segmentId: segment.id,
     segmentName: segment.name,
     spec,
@@ -115,9 +116,9 @@ function straightLength(frame: Frame, plans: FittingPlans, s: number, findings: 
   return meters(length_m - taken);
 }
 
-const nameOf = ({ system }: Frame, s: number): string => {
+const nameOf = ({ system, numbers }: Frame, s: number): string => {
   const { name } = system.segments[s]!;
-  return name === "" ? `Segment ${s + 1}` : `Segment ${s + 1}, ${name}`;
+  return name === "" ? `Segment ${numbers[s]!}` : `Segment ${numbers[s]!}, ${name}`;
 };
 
 function checkSegment(frame: Frame, s: number, pieces: readonly Piece[], findings: TakeoffFinding[]): void {

@@ -1,5 +1,5 @@
 /** What `takeOff` answers: pieces with their arithmetic, and the quantities that are not pieces. Plain JSON. */
-import type { AirSystem, FittingType, Material, Section } from "../air-system.ts";
+import type { AirSystem, FittingType, Material, Section, SheetReference } from "../air-system.ts";
 import type { GaugeDecider } from "./gauge.ts";
 import type { GaugeSchedule, Reinforcement } from "./gauge-schedule.ts";
 import type { ProductivityTable } from "./productivity.ts";
@@ -21,11 +21,13 @@ export interface Arithmetic {
 }
 
 export interface Piece {
-  /** Stable while the layout does not change: segment number and letter, such as "4C". Unique in the system. */
+  /** Segment number and letter, such as "4C". Unique in the system; an edit elsewhere does not change it. */
   readonly mark: string;
   readonly systemId: string;
   readonly systemTag: string;
   readonly levelId: string;
+  /** The drawing that it was measured from; null where the level has none under it. */
+  readonly sheet: SheetReference | null;
   readonly segmentId: string;
   readonly segmentName: string;
   readonly kind: PieceKind;

@@ -1,7 +1,7 @@
 /** Copies a branch, with everything that hangs on it, onto another node. */
 import type { NodeId, NodeRecord, SegmentRecord } from "@cleatwork/contracts";
 import type { Layout } from "../layout.ts";
-import { indexOf, subtreeOf, type LayoutIndex } from "../layout-index.ts";
+import { indexOf, nextNumber, subtreeOf, type LayoutIndex } from "../layout-index.ts";
 import { added, changeSet, need, refuse, type CommandResult, type IdSource } from "./command.ts";
 import { movedBy, type Vector } from "./direction.ts";
 
@@ -30,6 +30,7 @@ export function copyBranch(
 
   const copies = new Map<NodeId, NodeRecord>([[origin.value.id, target.value]]);
   const changes = [];
+  let number = nextNumber(index, target.value.systemId);
   for (const segment of subtreeOf(index, root.value)) {
     const from = copies.get(segment.fromNodeId);
     const end = layout.records.get(segment.toNodeId);
@@ -40,6 +41,7 @@ export function copyBranch(
     const copy: SegmentRecord = {
       ...segment,
       id: ids.segment(),
+      number: number++,
       systemId: target.value.systemId,
       fromNodeId: from.id,
       toNodeId: node.id,

@@ -2,7 +2,7 @@
 import { meters, type Meters } from "@cleatwork/calc";
 import type { NodeRecord, SegmentRecord } from "@cleatwork/contracts";
 import type { Layout } from "../layout.ts";
-import { indexOf, type LayoutIndex } from "../layout-index.ts";
+import { indexOf, nextNumber, type LayoutIndex } from "../layout-index.ts";
 import { bareNode } from "./add-system.ts";
 import { added, changeSet, need, refuse, type CommandResult, type IdSource } from "./command.ts";
 import { between, lengthOf, round, scale, turned, unit, type Turn, type Vector } from "./direction.ts";
@@ -60,6 +60,7 @@ export function extendRun(
     fromNodeId: from.id,
     toNodeId: to.id,
     ordinal: (siblings.at(-1)?.ordinal ?? 0) + 1,
+    number: nextNumber(index, from.systemId),
     name: parent?.name ?? "",
     ductClass: parent?.ductClass ?? "main",
     section: null,

@@ -2,6 +2,7 @@
 import { meters } from "@cleatwork/calc";
 import type { NodeRecord, SegmentRecord } from "@cleatwork/contracts";
 import type { Layout } from "../layout.ts";
+import { indexOf, nextNumber } from "../layout-index.ts";
 import { bareNode } from "./add-system.ts";
 import { added, changed, changeSet, need, refuse, type CommandResult, type IdSource } from "./command.ts";
 import { round } from "./direction.ts";
@@ -40,6 +41,7 @@ export function splitSegment(
   const second: SegmentRecord = {
     ...segment,
     id: ids.segment(),
+    number: nextNumber(indexOf(layout), segment.systemId),
     fromNodeId: joint.id,
     ordinal: 1,
     length_m: part(segment.length_m && segment.length_m * (1 - share)),

@@ -2,7 +2,7 @@ import type { Company, ProjectId } from "@cleatwork/contracts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { companyQuestion } from "../companies/index.ts";
 import { layoutQuestion } from "../layouts/index.ts";
-import { projectQuestion } from "../projects/index.ts";
+import { projectQuestion, sheetsQuestion } from "../projects/index.ts";
 import { specsQuestion } from "../specs/index.ts";
 import { standardsOn, standardsQuestion } from "../standards/index.ts";
 import { computeNumbers, type ProjectNumbers } from "./compute.ts";
@@ -13,6 +13,7 @@ export const projectQuestions = (db: TenantDb, projectId: ProjectId) => ({
   company: companyQuestion(db),
   project: projectQuestion(db, projectId),
   layout: layoutQuestion(db, projectId),
+  drawings: sheetsQuestion(db, projectId),
   specs: specsQuestion(db),
   standards: standardsQuestion(db),
   items: priceItemsQuestion(db),
@@ -26,12 +27,23 @@ const askProject = (db: TenantDb, projectId: ProjectId) => db.askTogether(projec
 
 /** Null when there is no such project here. */
 export function numbersFrom(answers: ProjectAnswers, pricedOn: string): ProjectNumbers | null {
-  const { company, project, layout, pricing, ...documents } = answers;
+  const { company, project, layout, drawings, pricing, ...documents } = answers;
   if (!project || !layout || !pricing) return null;
   const { specs, items, settings } = documents;
   const standards = standardsOn(documents.standards, pricedOn);
   const { currency } = company;
-  return computeNumbers({ project, ...layout, specs, standards, items, settings, currency, pricing, pricedOn });
+  return computeNumbers({
+    project,
+    ...layout,
+    drawings,
+    specs,
+    standards,
+    items,
+    settings,
+    currency,
+    pricing,
+    pricedOn,
+  });
 }
 
 /** A project's numbers from what is stored now, with the company they are for; null when there is no such project here. */

@@ -1,6 +1,19 @@
 import type { Drawing, DrawingId, PersonId, ProjectId } from "@cleatwork/contracts";
+import type { Question } from "../../platform/db/question.ts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { drawingFromRow, type DrawingRow } from "./drawings.rows.ts";
+
+/** What a project's levels were measured from: only what the title blocks say. */
+export const sheetsQuestion = (
+  db: TenantDb,
+  projectId: ProjectId,
+): Question<Pick<Drawing, "id" | "sheetNumber" | "revision">[]> => ({
+  from: db.from("drawings", "d").where("d.project_id", projectId),
+  columns: { id: "d.id", sheet_number: "d.sheet_number", revision: "d.revision" },
+  order: "d.id",
+  read: (rows: readonly Pick<DrawingRow, "id" | "sheet_number" | "revision">[]) =>
+    rows.map(({ id, sheet_number, revision }) => ({ id, sheetNumber: sheet_number, revision })),
+});
 
 export const drawingsRepository = (db: TenantDb) => {
   const withPerson = (projectId: ProjectId) =>

@@ -3,6 +3,7 @@ import type { Project, ProjectId } from "@cleatwork/contracts";
 import type { TenantDb } from "../../platform/db/tenant-db.ts";
 import { projectsRepository } from "./projects.repository.ts";
 
+export { sheetsQuestion } from "./drawings.repository.ts";
 export { projectQuestion } from "./projects.repository.ts";
 export { projectHandlers } from "./projects.routes.ts";
 

@@ -28,7 +28,7 @@ export function WorkspaceProvider({
 }) {
   const session = useSession();
   const pricedOn = dayIn(session.company.timeZone, new Date());
-  const [project, layoutRead, specs, book, settings, pricing, standards] = useSuspenseQueries({
+  const [project, layoutRead, specs, book, settings, pricing, standards, drawings] = useSuspenseQueries({
     queries: [
       projectQueries.detail(company, projectId),
       workspaceQueries.layout(company, projectId),
@@ -37,6 +37,7 @@ export function WorkspaceProvider({
       workspaceQueries.settings(company),
       workspaceQueries.pricing(company, projectId),
       workspaceQueries.standards(company, pricedOn),
+      workspaceQueries.drawings(company, projectId),
     ],
   });
 
@@ -69,6 +70,7 @@ export function WorkspaceProvider({
       records: [...layout.records.values()],
       specs: specs.data.items,
       altitude_m: project.data.altitude_m,
+      drawings: drawings.data.items,
       currency: book.data.currency,
       items: book.data.items,
       settings: settings.data,
@@ -76,7 +78,17 @@ export function WorkspaceProvider({
       pricing: pricing.data,
       pricedOn,
     }),
-    [layout, specs.data, project.data.altitude_m, book.data, settings.data, standards.data, pricing.data, pricedOn],
+    [
+      layout,
+      specs.data,
+      project.data.altitude_m,
+      drawings.data,
+      book.data,
+      settings.data,
+      standards.data,
+      pricing.data,
+      pricedOn,
+    ],
   );
   const numbers = useNumbers(documents);
   const selection = useSelection();

@@ -51,4 +51,5 @@ export function prefetchWorkspace(client: QueryClient, company: CompanySlug, pro
   void client.prefetchQuery(workspaceQueries.priceBook(company));
   void client.prefetchQuery(workspaceQueries.settings(company));
   void client.prefetchQuery(workspaceQueries.pricing(company, projectId));
+  void client.prefetchQuery(workspaceQueries.drawings(company, projectId));
 }
