@@ -94,6 +94,7 @@ function systemRecord(system: SystemRows, id: SystemId, site: { specId: SpecId; 
       temperature_k: degreesFahrenheit(system.temperature_f),
       relativeHumidity: 0.5,
       availablePressure_pa: inchesOfWater(system.available_inwg),
+      safetyMargin: 0.1,
     },
     limits,
     sizing,

@@ -92,6 +92,8 @@ export interface DesignConditions {
   readonly relativeHumidity: number;
   /** What the unit gives this duct system, outside the casing. */
   readonly availablePressure_pa: Pascals;
+  /** Share of the required pressure that the fan is chosen with on top; told apart from every other number. */
+  readonly safetyMargin: number;
 }
 
 export interface Limits {

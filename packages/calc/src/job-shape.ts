@@ -23,7 +23,13 @@ export const airSystemShape = {
   tag: "string",
   name: "string",
   service: "string",
-  design: { altitude_m: "number", temperature_k: "number", relativeHumidity: "number", availablePressure_pa: "number" },
+  design: {
+    altitude_m: "number",
+    temperature_k: "number",
+    relativeHumidity: "number",
+    availablePressure_pa: "number",
+    safetyMargin: "number",
+  },
   limits: {
     velocity_m_s: { main: "number", branch: "number", runout: "number" },
     frictionRate_pa_m: { main: "number", branch: "number", runout: "number" },

@@ -94,6 +94,7 @@ export const designSchema: z.ZodType<DesignConditions, DesignConditions> = z.str
   temperature_k: kelvinsSchema,
   relativeHumidity: z.number().min(0).max(1),
   availablePressure_pa: notNegativePascalsSchema,
+  safetyMargin: z.number().min(0).max(0.5),
 });
 
 const perClass = <S extends z.ZodType>(value: S) =>

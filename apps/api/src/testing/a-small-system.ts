@@ -49,6 +49,7 @@ export function aSmallSystem(levelId: LevelId, specId: SpecId, tag = "S1"): Smal
       temperature_k: degreesCelsius(13),
       relativeHumidity: 0.5,
       availablePressure_pa: inchesOfWater(0.5),
+      safetyMargin: 0,
     },
     limits: {
       velocity_m_s: { main: feetPerMinute(1500), branch: feetPerMinute(1200), runout: feetPerMinute(900) },

@@ -139,6 +139,7 @@ const benchFrame: Omit<AirSystem, "nodes" | "segments"> = {
     temperature_k: degreesFahrenheit(55),
     relativeHumidity: 0.9,
     availablePressure_pa: pascals(1e4),
+    safetyMargin: 0,
   },
   limits: {
     velocity_m_s: { main: feetPerMinute(20_000), branch: feetPerMinute(5_000), runout: feetPerMinute(2_000) },

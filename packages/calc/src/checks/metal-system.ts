@@ -90,6 +90,7 @@ export function aSystem(ducts: readonly DuctOf[], spec: Partial<ConstructionSpec
       temperature_k: degreesFahrenheit(70),
       relativeHumidity: 0,
       availablePressure_pa: pascals(500),
+      safetyMargin: 0,
     },
     limits: {
       velocity_m_s: { main: feetPerMinute(2000), branch: feetPerMinute(2000), runout: feetPerMinute(2000) },

@@ -53,6 +53,7 @@ describe("a worked supply system", () => {
     temperature_k: degreesFahrenheit(69.36),
     relativeHumidity: 0,
     availablePressure_pa: inchesOfWater(1),
+    safetyMargin: 0,
   };
 
   const terminal = (id: string) => {

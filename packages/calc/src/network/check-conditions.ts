@@ -37,6 +37,8 @@ export function checkConditions(system: AirSystem, problems: SystemProblem[]): v
   check("design.relativeHumidity", design.relativeHumidity, ranges.relativeHumidity);
   check("design.availablePressure_pa", design.availablePressure_pa, ranges.availablePressure);
 
+  check("design.safetyMargin", design.safetyMargin, ranges.safetyMargin);
+
   for (const ductClass of DUCT_CLASSES) {
     check(`limits.velocity_m_s.${ductClass}`, limits.velocity_m_s[ductClass], ranges.velocityLimit);
     check(`limits.frictionRate_pa_m.${ductClass}`, limits.frictionRate_pa_m[ductClass], ranges.frictionLimit);

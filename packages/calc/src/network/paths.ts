@@ -4,10 +4,13 @@ import { OPEN_ENTRY_COEFFICIENT, OPEN_EXIT_COEFFICIENT } from "../fittings/ends.
 import { meters, pascals, type Pascals } from "../quantity.ts";
 import { addFinding, limitSources, type FindingList } from "./findings.ts";
 import { plainRecord, type Draft } from "./plain-record.ts";
-import type { SolvedPath } from "./solution.ts";
+import type { PracticeCoefficients } from "../fittings/practice.table.ts";
+import { damperSetting } from "./damper-setting.ts";
+import type { DamperSetting, SolvedPath } from "./solution.ts";
 import type { Losses } from "./losses.ts";
 import type { Friction } from "./friction.ts";
 import { NONE, type Tree } from "./tree.ts";
+import type { SolvedColumns } from "./write-segments.ts";
 
 /** What each outlet needs at the equipment, in the order of the outlets. */
 export interface OutletNeeds {
@@ -49,11 +52,12 @@ function indexOfMost(values: Float64Array): number {
 
 /** Paths in the order of the outlets. Walks the tree once with the way so far at hand, and copies it at each outlet. */
 export function writePaths(
-  { nodes, segments, design }: AirSystem,
+  { system, sections, friction, accessories, losses }: SolvedColumns,
   { outlets, into, order, depth }: Tree,
-  losses: Losses,
   needs: OutletNeeds,
+  practice: PracticeCoefficients,
 ): readonly SolvedPath[] {
+  const { nodes, segments, design } = system;
   const most = needs.required[needs.governing]!;
   const paths = new Array<SolvedPath>(outlets.length);
   const outletAfter = new Int32Array(order.length).fill(NONE);
@@ -66,6 +70,13 @@ export function writePaths(
     const o = outletAfter[s]!;
     if (o === NONE) continue;
     const segmentIds = way.slice(0, depth[s]! + 1);
+    const duct = {
+      segment: segments[s]!,
+      section: sections.section[s]!,
+      velocityPressure: friction.velocityPressure[s]!,
+      accessories: accessories[s]!,
+    };
+    const damper = damperSetting(most - needs.required[o]!, duct, practice);
     paths[o] = new PathRecord(
       nodes[outlets[o]!]!.id,
       segmentIds,
@@ -75,6 +86,7 @@ export function writePaths(
       o,
       design.availablePressure_pa,
       most,
+      damper,
     );
   }
   return paths;
@@ -90,6 +102,7 @@ const PathRecord = plainRecord(function (
   outlet: number,
   available: Pascals,
   most: number,
+  damper: DamperSetting | null,
 ) {
   this.outletNodeId = outletNodeId;
   this.segmentIds = segmentIds;
@@ -100,6 +113,7 @@ const PathRecord = plainRecord(function (
   this.requiredPressure_pa = pascals(required[outlet]!);
   this.spare_pa = pascals(available - required[outlet]!);
   this.throttle_pa = pascals(most - required[outlet]!);
+  this.damper = damper;
 });
 
 export function reportShort(

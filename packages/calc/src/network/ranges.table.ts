@@ -22,6 +22,7 @@ export const ranges = {
   temperature: within(220, 470, "from 220 to 470 K"),
   relativeHumidity: within(0, 1, "from 0 to 1"),
   availablePressure: within(0, 25_000, "from 0 to 25,000 Pa"),
+  safetyMargin: within(0, 0.5, "from 0 to 0.5"),
   velocityLimit: over(0, 150, "more than 0 and at most 150 m/s"),
   frictionLimit: over(0, 1_000, "more than 0 and at most 1,000 Pa/m"),
   radiusRatio: within(0.5, 5, "from 0.5 to 5"),

@@ -87,6 +87,15 @@ export interface SolvedSegment {
   /** Total pressure left of the available, at the end nearer the equipment and at the far end. */
   readonly pressureLeftEntering_pa: Pascals;
   readonly pressureLeftLeaving_pa: Pascals;
+  /**
+   * Gauge pressures in this duct against the room, when the fan makes what is required: at the end nearer the equipment, past
+   * its fittings, and at the far end. Above zero under pressure, below zero under suction; static is total less velocity
+   * pressure in both.
+   */
+  readonly totalPressureEntering_pa: Pascals;
+  readonly totalPressureLeaving_pa: Pascals;
+  readonly staticPressureEntering_pa: Pascals;
+  readonly staticPressureLeaving_pa: Pascals;
 }
 
 export interface SolvedPath {
@@ -103,6 +112,35 @@ export interface SolvedPath {
   readonly spare_pa: Pascals;
   /** What a damper must take up so that this outlet gets its design flow when the governing path does. */
   readonly throttle_pa: Pascals;
+  /** How a damper in the last segment takes that up; null where there is nothing to take up. */
+  readonly damper: DamperSetting | null;
+}
+
+export interface DamperSetting {
+  readonly segmentId: string;
+  /** The segment has a volume damper; otherwise one would have to be put in. */
+  readonly isThere: boolean;
+  /** Of the damper alone, as set, on the velocity pressure of the segment. */
+  readonly lossCoefficient: number;
+  /** Turn of the blade from open; null where even the farthest turn that a formula holds for takes up less. */
+  readonly angle_rad: number | null;
+  readonly source: string;
+}
+
+/** What the equipment's fan must do for this duct system. */
+export interface FanDuty {
+  /** The outlets' air and all leakage. */
+  readonly airflow_m3s: CubicMetersPerSecond;
+  /** What the governing path needs, without any margin. */
+  readonly requiredPressure_pa: Pascals;
+  readonly safetyMargin: number;
+  readonly marginPressure_pa: Pascals;
+  /** Required and margin together. */
+  readonly totalPressure_pa: Pascals;
+  /** In the duct at the fan; of several ducts, where it is greatest. */
+  readonly velocityPressure_pa: Pascals;
+  /** Total less velocity pressure, as fans are rated. */
+  readonly staticPressure_pa: Pascals;
 }
 
 export type FindingSeverity = "stop" | "warn" | "note";
@@ -143,6 +181,7 @@ export interface Solution {
   readonly availablePressure_pa: Pascals;
   readonly outletAirflow_m3s: CubicMetersPerSecond;
   readonly leakage_m3s: CubicMetersPerSecond;
+  readonly fan: FanDuty;
   readonly findings: readonly Finding[];
 }
 

@@ -14,6 +14,7 @@ import { checkConditions } from "./check-conditions.ts";
 import { checkDesign } from "./check-design.ts";
 import { layCourse } from "./course.ts";
 import { inOrder, type FindingList } from "./findings.ts";
+import { fanDuty } from "./fan-duty.ts";
 import { findFittings } from "./find-fittings.ts";
 import { fittingColumns } from "./fitting-columns.ts";
 import { addUpFlows } from "./flows.ts";
@@ -89,6 +90,10 @@ export function solve(
   const needs = findNeeds(system, tree, friction, losses);
   reportShort(system, tree, needs, findings);
 
+  const requiredPressure = needs.required[needs.governing]!;
+  const outletAirflow = totalAirflow(system, tree.outlets);
+  const totalLeakage = totalOf(leakage);
+
   // Records cost as much as the physics, and most readers want few of them: written when they are first asked for.
   let segments: readonly SolvedSegment[] | null = null;
   let paths: readonly SolvedPath[] | null = null;
@@ -96,16 +101,17 @@ export function solve(
     systemId: system.id,
     air: { density_kg_m3: density, viscosity_pa_s: viscosity },
     get segments() {
-      return (segments ??= writeSegments(columns));
+      return (segments ??= writeSegments(columns, requiredPressure));
     },
     get paths() {
-      return (paths ??= writePaths(system, tree, losses, needs));
+      return (paths ??= writePaths(columns, tree, needs, practice));
     },
     governingOutletNodeId: system.nodes[tree.outlets[needs.governing]!]!.id,
-    requiredPressure_pa: pascals(needs.required[needs.governing]!),
+    requiredPressure_pa: pascals(requiredPressure),
     availablePressure_pa: design.availablePressure_pa,
-    outletAirflow_m3s: cubicMetersPerSecond(totalAirflow(system, tree.outlets)),
-    leakage_m3s: cubicMetersPerSecond(totalOf(leakage)),
+    outletAirflow_m3s: cubicMetersPerSecond(outletAirflow),
+    leakage_m3s: cubicMetersPerSecond(totalLeakage),
+    fan: fanDuty(design, { requiredPressure, outletAirflow, leakage: totalLeakage }, tree, friction.velocityPressure),
     findings: inOrder(findings),
   });
 }

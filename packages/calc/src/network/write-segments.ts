@@ -7,6 +7,7 @@ import type { Course } from "./course.ts";
 import { fittingsOf, type FittingColumns } from "./fitting-columns.ts";
 import type { Flows } from "./flows.ts";
 import type { Friction } from "./friction.ts";
+import { gaugePressures } from "./gauge-pressures.ts";
 import type { Losses } from "./losses.ts";
 import { plainRecord, type Draft } from "./plain-record.ts";
 import type { Sections } from "./sections.ts";
@@ -26,18 +27,18 @@ export interface SolvedColumns {
   readonly leakage: Float64Array;
 }
 
-export function writeSegments(columns: SolvedColumns): readonly SolvedSegment[] {
+export function writeSegments(columns: SolvedColumns, requiredPressure: number): readonly SolvedSegment[] {
   const segments = new Array<SolvedSegment>(columns.leakage.length);
-  write(columns, segments);
+  write(columns, requiredPressure, segments);
   return segments;
 }
 
 // A function of its own that answers nothing: the engine keeps such a loop compiled.
-function write(columns: SolvedColumns, segments: SolvedSegment[]): void {
+function write(columns: SolvedColumns, requiredPressure: number, segments: SolvedSegment[]): void {
   const scratch: SolvedFitting[] = [];
   for (let s = 0; s < segments.length; s++) {
     const fittings = fittingsOf(columns.system, columns.sections, columns.fittings, s, scratch);
-    segments[s] = new SegmentRecord(columns, s, fittings);
+    segments[s] = new SegmentRecord(columns, s, fittings, requiredPressure);
   }
 }
 
@@ -46,6 +47,7 @@ const SegmentRecord = plainRecord(function (
   columns: SolvedColumns,
   s: number,
   fittings: readonly SolvedFitting[],
+  requiredPressure: number,
 ) {
   const { sections, friction, losses } = columns;
   const segment = columns.system.segments[s]!;
@@ -73,4 +75,9 @@ const SegmentRecord = plainRecord(function (
   this.outletCount = columns.flows.outletCount[s]!;
   this.pressureLeftEntering_pa = pascals(losses.entering[s]!);
   this.pressureLeftLeaving_pa = pascals(losses.leaving[s]!);
+  const gauge = gaugePressures(s, columns.system.service, requiredPressure, losses, friction);
+  this.totalPressureEntering_pa = gauge.totalPressureEntering_pa;
+  this.totalPressureLeaving_pa = gauge.totalPressureLeaving_pa;
+  this.staticPressureEntering_pa = gauge.staticPressureEntering_pa;
+  this.staticPressureLeaving_pa = gauge.staticPressureLeaving_pa;
 });

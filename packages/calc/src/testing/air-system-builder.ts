@@ -105,6 +105,7 @@ export const ordinary: Omit<AirSystem, "nodes" | "segments"> = {
     temperature_k: kelvins(293.15),
     relativeHumidity: 0,
     availablePressure_pa: pascals(250),
+    safetyMargin: 0,
   },
   limits: {
     velocity_m_s: { main: metersPerSecond(12), branch: metersPerSecond(10), runout: metersPerSecond(6) },

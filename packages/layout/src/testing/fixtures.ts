@@ -64,6 +64,7 @@ export function smallSystem(ids: IdSource): Layout {
             temperature_k: degreesFahrenheit(55),
             relativeHumidity: 0.5,
             availablePressure_pa: inchesOfWater(0.5),
+            safetyMargin: 0,
           },
           limits: {
             velocity_m_s: perClass(feetPerMinute(1500)),

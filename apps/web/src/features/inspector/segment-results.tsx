@@ -77,6 +77,12 @@ export function SegmentResults({ segment }: { segment: SegmentRecord }) {
           ))}
           <Row label="Straight duct" shown={formatPressureChange(pascals(0 - solved.frictionLoss_pa), units)} />
           <Row label="Left on leaving" shown={formatPressure(solved.pressureLeftLeaving_pa, units)} />
+          <Row
+            label="Static, gauge"
+            shown={formatPressureChange(solved.staticPressureEntering_pa, units)}
+            aside={`to ${formatPressureChange(solved.staticPressureLeaving_pa, units).value}`}
+            title="Against the room, when the fan makes what is required: past the fittings at its beginning, and at its end."
+          />
         </dl>
       </section>
     </div>

@@ -27,7 +27,8 @@ import { useState } from "react";
 import { Button } from "../../ui/button.tsx";
 import { SelectField, TextField } from "../../ui/controls.tsx";
 import { Dialog, DialogActions } from "../../ui/dialog.tsx";
-import { QuantityField } from "../../ui/quantity-field.tsx";
+import { parsePercent, percentText } from "../../lib/format/percent.ts";
+import { QuantityField, type Understood } from "../../ui/quantity-field.tsx";
 import { notify } from "../../ui/toast.tsx";
 import { browserIds, useWorkspace, workspaceQueries } from "../workspace/index.ts";
 
@@ -63,6 +64,7 @@ const newDraft = (specId: SpecId, taken: ReadonlySet<string>): Draft => ({
     temperature_k: degreesFahrenheit(55),
     relativeHumidity: 0.5,
     availablePressure_pa: inchesOfWater(0.5),
+    safetyMargin: 0,
   },
   limits: USUAL_LIMITS,
   sizing: {
@@ -72,6 +74,20 @@ const newDraft = (specId: SpecId, taken: ReadonlySet<string>): Draft => ({
     maximumHeight_m: null,
   },
 });
+
+const MOST_MARGIN_BP = 5000;
+
+function parseShare(text: string): Understood<number> {
+  const basisPoints = parsePercent(text);
+  return basisPoints !== null && basisPoints <= MOST_MARGIN_BP
+    ? { ok: true, value: basisPoints / 10_000 }
+    : { ok: false, problems: [{ message: `“${text.trim()}” is not a percentage from 0 to 50, such as 10.` }] };
+}
+
+function formatRatio(share: number) {
+  const text = percentText(Math.round(share * 10_000));
+  return { text, value: text.replace(" %", ""), unit: "%" };
+}
 
 function freeTag(service: Service, taken: ReadonlySet<string>): string {
   for (let number = 1; ; number++)
@@ -187,6 +203,14 @@ export function SystemDialog({
             parse={(text) => parseTemperature(text, units)}
             format={(value) => formatTemperature(value, units)}
             onChange={(value) => value !== null && change({ design: { ...draft.design, temperature_k: value } })}
+          />
+          <QuantityField
+            label="Fan chosen with a margin of"
+            hint="On top of the required pressure; shown apart from it."
+            value={draft.design.safetyMargin}
+            parse={parseShare}
+            format={formatRatio}
+            onChange={(value) => value !== null && change({ design: { ...draft.design, safetyMargin: value } })}
           />
           <SelectField
             label="Sizes left open are found by"
