@@ -7,7 +7,7 @@ import { openFitting, writeLaw } from "./fitting-columns.ts";
 import type { FittingContext } from "./fitting-context.ts";
 import { putElbow, putOffset } from "./lose-elbow.ts";
 import { putJunction, putPassage } from "./lose-junction.ts";
-import { putMouthAtEquipment, putMouthAtOutlet } from "./lose-mouth.ts";
+import { putCollarAtEquipment, putMouthAtEquipment, putMouthAtOutlet } from "./lose-mouth.ts";
 import { putTransition } from "./lose-transition.ts";
 import { NONE } from "./tree-shape.ts";
 
@@ -83,7 +83,5 @@ function putAtEquipment(context: FittingContext, s: number, chosen: FittingType)
   if (chosen === "offset") return putOffset(context, s, NONE);
   if (chosen === "end-cap") return putEndCap(context, s, NONE);
   if (isMouth(chosen)) return putMouthAtEquipment(context, s, chosen);
-  // A tap or tee on the equipment is an opening in its casing.
-  putMouthAtEquipment(context, s, "plenum");
-  context.fittings.type[context.fittings.start[s + 1]! - 1] = chosen;
+  putCollarAtEquipment(context, s, chosen);
 }

@@ -1,41 +1,47 @@
 /** The fittings of all segments as columns, in the order of the segments; records are written from them at the end. */
-import type { AirSystem, FittingType } from "../air-system.ts";
-import { MOST_INPUTS, fittingLaws, lawAt, type FittingLawName } from "../fittings/laws.ts";
+import { FITTING_TYPES, type AirSystem, type FittingType } from "../air-system.ts";
+import {
+  MOST_INPUTS,
+  fittingLaws,
+  lawAt,
+  type FittingInputName,
+  type FittingLaw,
+  type FittingLawName,
+} from "../fittings/laws.ts";
 import { pascals } from "../quantity.ts";
 import { plainRecord, type Draft } from "./plain-record.ts";
 import type { Sections } from "./sections.ts";
-import type { SolvedFitting } from "./solution.ts";
+import type { FittingInput, SolvedFitting } from "./solution.ts";
 import { NONE } from "./tree-shape.ts";
-
-/** Passing a branch, a change of size, an elbow, a mouth at the far end: no segment has more. */
-const MOST_FITTINGS = 4;
 
 export interface FittingColumns {
   /** Fittings of segment s are those from start[s] up to start[s + 1]. */
   readonly start: Int32Array;
-  readonly type: FittingType[];
-  readonly isChosen: Uint8Array;
-  readonly madeHere: Uint8Array;
+  /** Place in FITTING_TYPES. From here on columns are exchanged for longer ones as they fill: read them after adding. */
+  type: Uint8Array;
+  isChosen: Uint8Array;
+  madeHere: Uint8Array;
   /** At the end farther from the equipment. */
-  readonly isFarEnd: Uint8Array;
+  isFarEnd: Uint8Array;
   /** Read at the edge of its table. */
-  readonly isClamped: Uint8Array;
+  isClamped: Uint8Array;
   /** Place in the list of laws. */
-  readonly law: Uint8Array;
+  law: Uint8Array;
   /** What was looked up, in the order that the law names. */
-  readonly input: Float64Array;
+  input: Float64Array;
   /** Segment whose section is on the equipment's side; NONE at the equipment. */
-  readonly upstream: Int32Array;
-  readonly angle: Float64Array;
-  readonly lossCoefficient: Float64Array;
-  readonly velocityPressure: Float64Array;
+  upstream: Int32Array;
+  angle: Float64Array;
+  lossCoefficient: Float64Array;
+  velocityPressure: Float64Array;
 }
 
+/** Room for three fittings on two segments, which few systems outgrow: room that is never used costs as much to clear. */
 export function fittingColumns(segmentCount: number): FittingColumns {
-  const room = MOST_FITTINGS * segmentCount;
+  const room = segmentCount + (segmentCount >> 1) + 8;
   return {
     start: new Int32Array(segmentCount + 1),
-    type: new Array<FittingType>(room),
+    type: new Uint8Array(room),
     isChosen: new Uint8Array(room),
     madeHere: new Uint8Array(room),
     isFarEnd: new Uint8Array(room),
@@ -48,6 +54,32 @@ export function fittingColumns(segmentCount: number): FittingColumns {
     velocityPressure: new Float64Array(room),
   };
 }
+
+function makeRoom(columns: FittingColumns): void {
+  columns.type = longer(columns.type, Uint8Array);
+  columns.isChosen = longer(columns.isChosen, Uint8Array);
+  columns.madeHere = longer(columns.madeHere, Uint8Array);
+  columns.isFarEnd = longer(columns.isFarEnd, Uint8Array);
+  columns.isClamped = longer(columns.isClamped, Uint8Array);
+  columns.law = longer(columns.law, Uint8Array);
+  columns.input = longer(columns.input, Float64Array);
+  columns.upstream = longer(columns.upstream, Int32Array);
+  columns.angle = longer(columns.angle, Float64Array);
+  columns.lossCoefficient = longer(columns.lossCoefficient, Float64Array);
+  columns.velocityPressure = longer(columns.velocityPressure, Float64Array);
+}
+
+function longer<C extends Uint8Array | Int32Array | Float64Array>(column: C, Column: new (length: number) => C): C {
+  const twice = new Column(2 * column.length);
+  twice.set(column);
+  return twice;
+}
+
+const typeAt = Object.fromEntries(FITTING_TYPES.map((type, place) => [type, place])) as Readonly<
+  Record<FittingType, number>
+>;
+
+export const typeOfFitting = (columns: FittingColumns, at: number): FittingType => FITTING_TYPES[columns.type[at]!]!;
 
 /**
  * Adds a fitting to segment s, which must be the last one that has any; answers its place, where the caller then writes
@@ -62,7 +94,8 @@ export function openFitting(
   upstream: number,
 ): number {
   const at = columns.start[s + 1]!++;
-  columns.type[at] = type;
+  if (at === columns.type.length) makeRoom(columns);
+  columns.type[at] = typeAt[type];
   columns.isChosen[at] = isChosen ? 1 : 0;
   columns.madeHere[at] = madeHere ? 1 : 0;
   columns.upstream[at] = upstream;
@@ -100,6 +133,22 @@ export function fittingsOf(
   return scratch.slice(0, count);
 }
 
+const NO_INPUTS: readonly FittingInput[] = [];
+const inputScratch: FittingInput[] = [];
+
+function inputsOf({ inputs }: FittingLaw, column: Float64Array, first: number): readonly FittingInput[] {
+  if (inputs.length === 0) return NO_INPUTS;
+  for (let place = 0; place < inputs.length; place++) {
+    inputScratch[place] = new InputRecord(inputs[place]!, column[first + place]!);
+  }
+  return inputScratch.slice(0, inputs.length);
+}
+
+const InputRecord = plainRecord(function (this: Draft<FittingInput>, name: FittingInputName, value: number) {
+  this.name = name;
+  this.value = value;
+});
+
 const FittingRecord = plainRecord(function (
   this: Draft<SolvedFitting>,
   { section }: Sections,
@@ -109,7 +158,7 @@ const FittingRecord = plainRecord(function (
 ) {
   const upstream = columns.upstream[at]!;
   const law = fittingLaws[columns.law[at]!]!;
-  this.type = columns.type[at]!;
+  this.type = typeOfFitting(columns, at);
   this.basis = columns.isChosen[at] === 1 ? "chosen" : "inferred";
   this.nodeId = nodeId;
   this.angle_rad = columns.angle[at]!;
@@ -119,7 +168,7 @@ const FittingRecord = plainRecord(function (
   this.velocityPressure_pa = pascals(columns.velocityPressure[at]!);
   this.loss_pa = pascals(columns.lossCoefficient[at]! * columns.velocityPressure[at]!);
   this.source = law.source;
-  this.inputs = law.inputs.map((name, place) => ({ name, value: columns.input[MOST_INPUTS * at + place]! }));
+  this.inputs = inputsOf(law, columns.input, MOST_INPUTS * at);
   this.clamped = columns.isClamped[at] === 1;
   this.madeHere = columns.madeHere[at] === 1;
 });

@@ -5,7 +5,7 @@ import type { PracticeCoefficients } from "../fittings/practice.table.ts";
 import type { TransitionForm } from "../fittings/transition.ts";
 import type { Course } from "./course.ts";
 import { addFinding, type FindingList } from "./findings.ts";
-import type { FittingColumns } from "./fitting-columns.ts";
+import { typeOfFitting, type FittingColumns } from "./fitting-columns.ts";
 import type { Friction } from "./friction.ts";
 import type { Sections } from "./sections.ts";
 import type { Tree } from "./tree-shape.ts";
@@ -37,7 +37,7 @@ export function markOutOfTable(
 ): void {
   context.fittings.isClamped[at] = 1;
   const subject = { kind: "segment", id: context.system.segments[s]!.id } as const;
-  const fitting = context.fittings.type[at]!.replaceAll("-", " ");
+  const fitting = typeOfFitting(context.fittings, at).replaceAll("-", " ");
   const measured = { value, limit, unit: "1", limitSource: `${fitting}: ${limitSource}` };
   addFinding(context.findings, s, "table-range-exceeded", subject, measured);
 }

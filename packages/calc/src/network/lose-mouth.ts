@@ -9,15 +9,26 @@ const hasPiece = (type: FittingType): boolean => type === "entry-bellmouth" || t
 
 /** Where the duct begins at the equipment: supply air enters it there, all other air leaves it. */
 export const putMouthAtEquipment = (context: FittingContext, s: number, mouth: MouthType): void =>
-  putMouth(context, s, mouth, context.diverges, false);
+  putMouth(context, s, mouth, mouth, context.diverges, false);
+
+/** A tap or tee chosen at the equipment is an opening flush with its casing. */
+export const putCollarAtEquipment = (context: FittingContext, s: number, type: FittingType): void =>
+  putMouth(context, s, type, "plenum", context.diverges, false);
 
 /** Where the duct ends in a room or outdoors: supply air leaves it there, all other air enters. */
 export const putMouthAtOutlet = (context: FittingContext, s: number, mouth: MouthType): void =>
-  putMouth(context, s, mouth, !context.diverges, true);
+  putMouth(context, s, mouth, mouth, !context.diverges, true);
 
-function putMouth(context: FittingContext, s: number, mouth: MouthType, airEnters: boolean, isFarEnd: boolean): void {
+function putMouth(
+  context: FittingContext,
+  s: number,
+  type: FittingType,
+  mouth: MouthType,
+  airEnters: boolean,
+  isFarEnd: boolean,
+): void {
   const { fittings, friction, practice } = context;
-  const at = openFitting(fittings, s, mouth, true, hasPiece(mouth), isFarEnd ? s : NONE);
+  const at = openFitting(fittings, s, type, true, hasPiece(mouth), isFarEnd ? s : NONE);
   fittings.isFarEnd[at] = isFarEnd ? 1 : 0;
   fittings.velocityPressure[at] = friction.velocityPressure[s]!;
   if (!airEnters) {

@@ -19,7 +19,7 @@ export const fittingNames: Readonly<Record<FittingType, string>> = {
   "elbow-mitered": "Mitered round elbow",
   offset: "Offset",
   "tap-straight": "Straight tap",
-  "tap-shoe": "Shoe tap, 45° entry",
+  "tap-shoe": "Shoe tap",
   "tap-conical": "Conical tap",
   "tap-saddle": "Saddle tap",
   tee: "Tee",
