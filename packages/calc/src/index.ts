@@ -16,6 +16,7 @@ export {
   HOURS_KINDS,
   HOURS_PER,
   HOURS_PLACES,
+  type HoursPer,
   type HoursRow,
   type ProductivityTable,
   type WorkCondition,

@@ -61,6 +61,7 @@ export function makeRouter(client: QueryClient) {
                   ],
                 },
                 { path: "specs", ...page(() => import("../routes/specs.tsx")) },
+                { path: "specs/schedules", ...page(() => import("../routes/specs.schedules.tsx")) },
                 {
                   path: "company",
                   ...page(() => import("../routes/company.tsx")),

@@ -19,6 +19,7 @@ export const paths = {
   prices: (company: CompanySlug) => `/c/${company}/prices`,
   rates: (company: CompanySlug) => `/c/${company}/prices/rates`,
   specs: (company: CompanySlug) => `/c/${company}/specs`,
+  schedules: (company: CompanySlug) => `/c/${company}/specs/schedules`,
   company: (company: CompanySlug, page: CompanyPage = "people") => `/c/${company}/company/${page}`,
   field: (company: CompanySlug) => `/c/${company}/field`,
   fieldProject: (company: CompanySlug, project: ProjectId) => `/c/${company}/field/${project}`,

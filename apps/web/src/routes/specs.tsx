@@ -3,7 +3,7 @@ import type { LoaderFunctionArgs } from "react-router-dom";
 import { SpecsScreen, specQueries } from "../features/specs/index.ts";
 import { useSession } from "../features/session/index.ts";
 import { companyParam } from "../lib/route-params.ts";
-import { TopBar } from "../ui/top-bar.tsx";
+import { SpecTabs } from "./spec-tabs.tsx";
 
 export const loader =
   (client: QueryClient) =>
@@ -17,7 +17,7 @@ export function Component() {
   return (
     <>
       <title>{`Specs, ${company.name}`}</title>
-      <TopBar title="Construction specs" fact={company.name} />
+      <SpecTabs />
       <SpecsScreen />
     </>
   );

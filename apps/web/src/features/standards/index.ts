@@ -1,0 +1,2 @@
+export { standardsQueries } from "./standards.queries.ts";
+export { StandardsScreen } from "./standards-screen.tsx";
