@@ -13,6 +13,7 @@ import { projectHandlers } from "./features/projects/index.ts";
 import { quoteHandlers } from "./features/quotes/index.ts";
 import { specHandlers } from "./features/specs/index.ts";
 import { standardsHandlers } from "./features/standards/index.ts";
+import { takeoffHandlers } from "./features/takeoffs/index.ts";
 import { sendProblems } from "./platform/http/errors.ts";
 import { mount, type AnyHandler } from "./platform/http/mount.ts";
 import { openApiDocument } from "./platform/http/openapi.ts";
@@ -32,6 +33,7 @@ const handlers = {
   ...projectHandlers,
   ...specHandlers,
   ...standardsHandlers,
+  ...takeoffHandlers,
   ...layoutHandlers,
   ...pricingHandlers,
   ...quoteHandlers,

@@ -27,7 +27,17 @@ export {
   type CompanyHours,
   type CompanyStandards,
 } from "./takeoff/company-standards.ts";
+export { type GaugeDecider } from "./takeoff/gauge.ts";
 export { sheetLabels } from "./takeoff/sheet-weights.table.ts";
+export {
+  checkRatios,
+  ratiosOf,
+  TAKEOFF_RATIOS,
+  US_RATIO,
+  type RatioCheck,
+  type TakeoffRatio,
+  type TakeoffRatios,
+} from "./takeoff/ratios.ts";
 export { shippedStandards } from "./takeoff/shipped-standards.ts";
 export { markNumbers } from "./takeoff/marks.ts";
 export { sizeKey } from "./takeoff/count-items.ts";

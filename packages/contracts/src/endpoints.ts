@@ -9,6 +9,7 @@ import { projectEndpoints } from "./projects.ts";
 import { quoteEndpoints } from "./quotes.ts";
 import { specEndpoints } from "./specs.ts";
 import { standardsEndpoints } from "./standards.ts";
+import { takeoffEndpoints } from "./takeoff.ts";
 
 export const endpoints = {
   ...peopleEndpoints,
@@ -17,6 +18,7 @@ export const endpoints = {
   ...projectEndpoints,
   ...specEndpoints,
   ...standardsEndpoints,
+  ...takeoffEndpoints,
   ...layoutEndpoints,
   ...pricingEndpoints,
   ...quoteEndpoints,

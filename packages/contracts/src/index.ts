@@ -14,6 +14,7 @@ export * from "./clients.ts";
 export * from "./projects.ts";
 export * from "./specs.ts";
 export * from "./standards.ts";
+export * from "./takeoff.ts";
 export * from "./pricing.ts";
 export * from "./quotes.ts";
 export * from "./field.ts";

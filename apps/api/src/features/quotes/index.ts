@@ -1,2 +1,3 @@
 /** The door of quotes. */
+export { issuedRatios, issuedTakeoff } from "./issued-takeoffs.repository.ts";
 export { quoteHandlers } from "./quotes.routes.ts";

@@ -1,4 +1,11 @@
-import { feet, inches, inchesOfWater, NO_COMPANY_STANDARDS, type CompanyStandards } from "@cleatwork/calc";
+import {
+  feet,
+  inches,
+  inchesOfWater,
+  NO_COMPANY_STANDARDS,
+  shippedStandards,
+  type CompanyStandards,
+} from "@cleatwork/calc";
 import { describe, expect, test } from "vitest";
 import { standardsChanges } from "./standards.rules.ts";
 
@@ -36,9 +43,26 @@ describe("what changed in the standards", () => {
     expect(standardsChanges(withGauge("24 ga"), withGauge("24 ga"))).toEqual([]);
   });
 
-  test("a chart that is new has no value before", () => {
+  test("a chart that is new is ours from now on, beside the shipped one that it stands before", () => {
     const changes = standardsChanges(NO_COMPANY_STANDARDS, withGauge("24 ga"));
-    expect(changes).toContainEqual(expect.objectContaining({ field: "gauge", before: null, after: "24 ga" }));
-    expect(standardsChanges(withGauge("24 ga"), NO_COMPANY_STANDARDS)).toHaveLength(changes.length);
+    expect(changes[0]).toEqual({
+      subject: "galvanized rectangular",
+      field: "schedule",
+      before: "shipped",
+      after: "ours",
+    });
+    // The shipped chart of 1 in. at 5 ft has 26 ga up to 30 in.
+    expect(changes).toContainEqual(expect.objectContaining({ field: "gauge", before: "26 ga", after: "24 ga" }));
+  });
+
+  test("a copy of what is shipped with one cell changed is one cell, and whose it is", () => {
+    const rows = shippedStandards.gauges.rows.filter(({ shape }) => shape === "flat-oval");
+    const [first, ...rest] = rows;
+    const sizes = first!.sizes.map((size, index) => (index === 0 ? { ...size, gauge: "18 ga" } : size));
+    const own = { name: "Our sheet", source: "", standing: "own" as const, rows: [{ ...first!, sizes }, ...rest] };
+    const changes = standardsChanges(NO_COMPANY_STANDARDS, { ...NO_COMPANY_STANDARDS, gauges: own });
+    expect(changes.filter(({ field }) => field !== "schedule")).toEqual([
+      expect.objectContaining({ field: "gauge", before: "24 ga", after: "18 ga" }),
+    ]);
   });
 });

@@ -2,6 +2,7 @@
 import {
   METERS_PER_INCH,
   PASCALS_PER_INCH_OF_WATER,
+  shippedStandards,
   type CompanyHours,
   type CompanyStandards,
   type GaugeChart,
@@ -16,9 +17,13 @@ type Values = Readonly<Record<string, string>>;
 /** Subject → field → value. Two documents compare as two such maps; order and layout of the document do not count. */
 type Facts = Map<string, Values>;
 
+/**
+ * Where one document has charts of a metal and shape, or hours, and the other leaves them to what is shipped, the shipped
+ * values stand for it: whoever copies a schedule and changes one cell has changed one cell, and whose it is.
+ */
 export function standardsChanges(before: CompanyStandards, after: CompanyStandards): StandardsChange[] {
-  const [old, now] = [factsOf(before), factsOf(after)];
-  const changes: StandardsChange[] = [];
+  const changes = ownerChanges(before, after);
+  const [old, now] = [factsOf(filledFrom(before, after)), factsOf(filledFrom(after, before))];
   for (const subject of new Set([...old.keys(), ...now.keys()])) {
     const [was, is] = [old.get(subject) ?? {}, now.get(subject) ?? {}];
     for (const field of new Set([...Object.keys(was), ...Object.keys(is)]))
@@ -26,6 +31,34 @@ export function standardsChanges(before: CompanyStandards, after: CompanyStandar
         changes.push({ subject, field, before: was[field] ?? null, after: is[field] ?? null });
   }
   return changes;
+}
+
+const kindOf = ({ material, shape }: GaugeChart) => `${material} ${shape}`;
+const kindsIn = ({ gauges }: CompanyStandards) => new Set((gauges?.rows ?? []).map(kindOf));
+
+function ownerChanges(before: CompanyStandards, after: CompanyStandards): StandardsChange[] {
+  const changes: StandardsChange[] = [];
+  const tell = (subject: string, had: boolean, has: boolean) => {
+    const owner = (own: boolean) => (own ? "ours" : "shipped");
+    if (had !== has) changes.push({ subject, field: "schedule", before: owner(had), after: owner(has) });
+  };
+  const [old, now] = [kindsIn(before), kindsIn(after)];
+  for (const kind of new Set([...old, ...now])) tell(kind, old.has(kind), now.has(kind));
+  tell("Hours", before.hours !== null, after.hours !== null);
+  return changes;
+}
+
+/** A document with the shipped values where the other has its own and this has none. */
+function filledFrom(document: CompanyStandards, other: CompanyStandards): CompanyStandards {
+  const own = kindsIn(document);
+  const missing = [...kindsIn(other)].filter((kind) => !own.has(kind));
+  const shipped = shippedStandards.gauges.rows.filter((chart) => missing.includes(kindOf(chart)));
+  const named = document.gauges ?? other.gauges;
+  return {
+    ...document,
+    gauges: named ? { ...named, rows: [...(document.gauges?.rows ?? []), ...shipped] } : null,
+    hours: document.hours ?? (other.hours ? { ...shippedStandards.productivity } : null),
+  };
 }
 
 const factsOf = ({ gauges, hours, ratioTolerance }: CompanyStandards): Facts =>

@@ -1,2 +1,3 @@
 /** The door of price. */
+export { useSaveProjectPricing } from "./price.queries.ts";
 export { PriceScreen } from "./price-screen.tsx";

@@ -77,7 +77,7 @@ export function GridCell<T>({
           if (next) next.focus();
           else commit();
         }}
-        className={`h-7 rounded-edge border border-transparent bg-transparent px-1.5 hover:border-line-strong focus:bg-sheet-hi disabled:text-ink-2 disabled:hover:border-transparent aria-invalid:border-stop aria-invalid:bg-stop-tint ${wide ? "w-56" : "w-24"}`}
+        className={`h-7 rounded-edge border border-transparent bg-transparent px-1.5 hover:border-line-strong focus:bg-sheet-hi disabled:text-ink-2 disabled:hover:border-transparent aria-invalid:border-stop aria-invalid:bg-stop-tint ${wide ? "w-44" : "w-28"}`}
       />
       {error && (
         <p role="alert" className="flex max-w-64 items-start gap-1 px-1.5 pb-1 text-help font-semibold text-stop-ink">

@@ -144,7 +144,7 @@ function Editor({ stored, mayWrite }: { stored: Standards; mayWrite: boolean }) 
         {part === "history" && <HistoryPanel />}
       </div>
       {mayWrite && part !== "history" && (
-        <div className="sticky bottom-0 mt-auto flex flex-wrap items-end gap-3 border-t border-line bg-ground py-3">
+        <div className="sticky -bottom-4 mt-auto flex flex-wrap items-end gap-3 border-t border-line bg-ground py-3">
           <TextField
             label="In force from"
             type="date"

@@ -2,7 +2,7 @@
 import { formatSize, type Piece, type PieceKind, type Section, type Takeoff } from "@cleatwork/calc";
 import type { UnitSystem } from "@cleatwork/contracts";
 
-export const GROUPINGS = ["system", "level", "kind", "gauge"] as const;
+export const GROUPINGS = ["system", "level", "kind", "size", "gauge", "spec"] as const;
 export type Grouping = (typeof GROUPINGS)[number];
 
 export interface Sums {
@@ -35,6 +35,7 @@ export interface Group {
 export interface Names {
   readonly system: (id: string) => string;
   readonly level: (id: string) => string;
+  readonly spec: (systemId: string) => string;
   readonly units: UnitSystem;
 }
 
@@ -92,6 +93,14 @@ function groupOf(piece: Piece, by: Grouping, names: Names): { key: string; label
       return { key: piece.levelId, label: names.level(piece.levelId) };
     case "kind": {
       const label = kindLabel(piece);
+      return { key: label, label };
+    }
+    case "size": {
+      const label = formatSize(piece.section, names.units).text;
+      return { key: label, label };
+    }
+    case "spec": {
+      const label = names.spec(piece.systemId);
       return { key: label, label };
     }
     case "gauge": {

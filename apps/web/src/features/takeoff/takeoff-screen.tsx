@@ -11,23 +11,28 @@ import {
 } from "@cleatwork/calc";
 import { find } from "@cleatwork/layout";
 import { Fragment, useMemo, useState } from "react";
-import { downloadText } from "../../lib/format/csv.ts";
+import { Link } from "react-router-dom";
+import { useQuery } from "@tanstack/react-query";
+import { paths } from "../../lib/paths.ts";
 import { classNames } from "../../lib/class-names.ts";
-import { Button } from "../../ui/button.tsx";
 import { EmptyState } from "../../ui/empty-state.tsx";
-import { DownloadIcon } from "../../ui/icons/icon.tsx";
 import { Panel, PanelBody, PanelHead } from "../../ui/panel.tsx";
 import { ScreenSkeleton } from "../../ui/skeleton.tsx";
 import { Toggle } from "../../ui/toggle.tsx";
-import { useWorkspace } from "../workspace/index.ts";
+import { useWorkspace, workspaceQueries } from "../workspace/index.ts";
 import { PieceArithmetic } from "./arithmetic.tsx";
-import { pieceCsv } from "./piece-csv.ts";
+import { ComparePanel } from "./compare-panel.tsx";
+import { ConditionsPanel } from "./conditions-panel.tsx";
+import { ExportButtons } from "./export-buttons.tsx";
+import { GaugeChoice } from "./gauge-choice.tsx";
+import { RatiosPanel } from "./ratios-panel.tsx";
 import { Counted, MetalByGauge } from "./takeoff-sides.tsx";
 import { groupsOf, sumOf, type Group, type Grouping, type Line, type Sums } from "./takeoff-rows.ts";
 
 /** Every piece, counted: totals that open to sizes, sizes that open to pieces and their arithmetic. */
 export function TakeoffScreen() {
-  const { numbers, layout, units, project } = useWorkspace();
+  const { numbers, layout, units, company } = useWorkspace();
+  const { data: specs } = useQuery(workspaceQueries.specs(company.slug));
   const [by, setBy] = useState<Grouping>("system");
   const [closed, setClosed] = useState<ReadonlySet<string>>(new Set());
   const [openLine, setOpenLine] = useState<string | null>(null);
@@ -40,8 +45,12 @@ export function TakeoffScreen() {
           return system ? `${system.tag} ${system.name}` : "";
         },
         level: (id) => find(layout, "level", id)?.name ?? "",
+        spec: (systemId) => {
+          const specId = find(layout, "system", systemId)?.specId;
+          return specs?.items.find(({ id }) => id === specId)?.name ?? "";
+        },
       }),
-    [numbers, by, units, layout],
+    [numbers, by, units, layout, specs],
   );
   if (!numbers) return <ScreenSkeleton />;
   const all = sumOf(numbers.takeoffs.flatMap(({ pieces }) => pieces));
@@ -59,17 +68,12 @@ export function TakeoffScreen() {
               { value: "system", label: "System" },
               { value: "level", label: "Level" },
               { value: "kind", label: "Type" },
+              { value: "size", label: "Size" },
               { value: "gauge", label: "Gauge" },
+              { value: "spec", label: "Spec" },
             ]}
           />
-          <Button
-            size="small"
-            onClick={() =>
-              downloadText(`${project.name} takeoff.csv`, pieceCsv(numbers.takeoffs.flatMap(({ pieces }) => pieces)))
-            }
-          >
-            <DownloadIcon size={14} /> CSV
-          </Button>
+          <ExportButtons />
         </PanelHead>
         {groups.length === 0 ? (
           <EmptyState title="Nothing to count yet">
@@ -120,8 +124,11 @@ export function TakeoffScreen() {
         </PanelBody>
       </Panel>
       <div className="grid content-start gap-3">
+        <RatiosPanel />
+        <ComparePanel />
         <MetalByGauge />
         <Counted />
+        <ConditionsPanel />
       </div>
     </main>
   );
@@ -191,7 +198,7 @@ function GroupRows({
 }
 
 function Opened({ line }: { line: Line }) {
-  const { units, selection } = useWorkspace();
+  const { units, selection, company, project } = useWorkspace();
   const [mark, setMark] = useState(line.pieces[0]?.mark ?? "");
   const piece = line.pieces.find((each) => each.mark === mark) ?? line.pieces[0];
   if (!piece) return null;
@@ -224,7 +231,10 @@ function Opened({ line }: { line: Line }) {
         {piece.seam && `, ${piece.seam}`}
       </p>
       <PieceArithmetic piece={piece} units={units} />
-      {piece.gaugeSource && <p className="text-help text-ink-3">Gauge: {piece.gaugeSource}</p>}
+      <GaugeChoice piece={piece} />
+      <p>
+        <Link to={`${paths.project(company.slug, project.id)}?at=${piece.segmentId}`}>Show on the board</Link>
+      </p>
     </div>
   );
 }

@@ -1,5 +1,5 @@
 import type { Company, LayoutRecord, Project, SystemRecord, UnitSystem } from "@cleatwork/contracts";
-import type { Solution, SolvedSegment } from "@cleatwork/calc";
+import type { CompanyStandards, Solution, SolvedSegment } from "@cleatwork/calc";
 import type { Layout, LayoutIndex, Numbers, TreeRow } from "@cleatwork/layout";
 import { createContext, useContext } from "react";
 import type { ApplyResult, LayoutState, LayoutStore } from "./core/layout-store.ts";
@@ -22,6 +22,8 @@ export interface Workspace {
   readonly numbers: Numbers | null;
   readonly solutionOf: (systemId: string) => Solution | null;
   readonly solvedOf: (segmentId: string) => SolvedSegment | null;
+  /** The company's own schedules, in force today. */
+  readonly standards: CompanyStandards;
   readonly selection: Selection;
   readonly mayEdit: boolean;
   /** Runs a command and says why when it cannot be. */

@@ -131,6 +131,7 @@ export function WorkspaceProvider({
       numbers,
       solutionOf: (systemId) => numbers?.solutions.find((solution) => solution.systemId === systemId) ?? null,
       solvedOf: (segmentId) => solved.get(segmentId) ?? null,
+      standards: standards.data.document,
       selection,
       mayEdit: session.may("layouts.write"),
       run: (command) => say(store.run(command)),
@@ -151,6 +152,7 @@ export function WorkspaceProvider({
     rowNumbers,
     numbers,
     solved,
+    standards.data,
     selection,
   ]);
 

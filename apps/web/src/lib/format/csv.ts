@@ -10,8 +10,11 @@ function cell(value: string | number | null): string {
   return /[",\r\n]/.test(safe) ? `"${safe.replace(/"/g, '""')}"` : safe;
 }
 
-export function downloadText(fileName: string, text: string, type = "text/csv;charset=utf-8") {
-  const url = URL.createObjectURL(new Blob(["\ufeff", text], { type }));
+export const downloadText = (fileName: string, text: string, type = "text/csv;charset=utf-8") =>
+  downloadBlob(fileName, new Blob(["\ufeff", text], { type }));
+
+export function downloadBlob(fileName: string, blob: Blob) {
+  const url = URL.createObjectURL(blob);
   const link = document.createElement("a");
   link.href = url;
   link.download = fileName;

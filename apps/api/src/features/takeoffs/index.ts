@@ -1,0 +1,2 @@
+/** The door of takeoffs. */
+export { takeoffHandlers } from "./takeoffs.routes.ts";
