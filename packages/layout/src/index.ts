@@ -14,3 +14,4 @@ export * from "./commands/remove.ts";
 export * from "./commands/copy-branch.ts";
 export * from "./commands/paste-rows.ts";
 export * from "./project-numbers.ts";
+export * from "./trial.ts";

@@ -6,3 +6,4 @@ export { browserIds } from "./browser-ids.ts";
 export { Tally } from "./tally.tsx";
 export { useWorkspaceKeys } from "./use-workspace-keys.ts";
 export { useStepFacts } from "./step-facts.tsx";
+export { useTrial } from "./use-trial.ts";

@@ -1,8 +1,9 @@
 import type { Company, LayoutRecord, Project, SystemRecord, UnitSystem } from "@cleatwork/contracts";
 import type { CompanyStandards, Solution, SolvedSegment } from "@cleatwork/calc";
-import type { Layout, LayoutIndex, Numbers, TreeRow } from "@cleatwork/layout";
+import type { Layout, LayoutIndex, Numbers, PricingDocuments, TreeRow } from "@cleatwork/layout";
 import { createContext, useContext } from "react";
 import type { ApplyResult, LayoutState, LayoutStore } from "./core/layout-store.ts";
+import type { TrialDesk } from "./core/trial-desk.ts";
 import type { Selection } from "./use-selection.ts";
 
 /** Everything a step of a project works with. */
@@ -18,6 +19,10 @@ export interface Workspace {
   /** The segments of a system, from the equipment outward, with their numbers. */
   readonly rowsOf: (systemId: string) => readonly TreeRow[];
   readonly numberOf: (segmentId: string) => string;
+  /** What the numbers are made from, as it is now. */
+  readonly documents: PricingDocuments;
+  /** Where edits are tried before they are made; read through `useTrial`. */
+  readonly trials: TrialDesk;
   /** Null until the first are computed. */
   readonly numbers: Numbers | null;
   readonly solutionOf: (systemId: string) => Solution | null;

@@ -9,6 +9,7 @@ import { projectQueries } from "../projects/index.ts";
 import { useSession } from "../session/index.ts";
 import { LayoutStore } from "./core/layout-store.ts";
 import { browserShelf } from "./core/saved-edits.ts";
+import { TrialDesk, type TrialWorker } from "./core/trial-desk.ts";
 import { sendBatch } from "./send-batch.ts";
 import { dayIn } from "./today.ts";
 import { useNumbers } from "./use-numbers.ts";
@@ -91,6 +92,8 @@ export function WorkspaceProvider({
     ],
   );
   const numbers = useNumbers(documents);
+  const [trials] = useState(() => new TrialDesk(hireTrialWorker));
+  useEffect(() => () => trials.close(), [trials]);
   const selection = useSelection();
 
   const systems = useMemo(() => systemsInOrder(layout), [layout]);
@@ -128,6 +131,8 @@ export function WorkspaceProvider({
       systems,
       rowsOf: (systemId) => trees.get(systemId) ?? NO_ROWS,
       numberOf: (segmentId) => rowNumbers.get(segmentId) ?? "",
+      documents,
+      trials,
       numbers,
       solutionOf: (systemId) => numbers?.solutions.find((solution) => solution.systemId === systemId) ?? null,
       solvedOf: (segmentId) => solved.get(segmentId) ?? null,
@@ -150,6 +155,8 @@ export function WorkspaceProvider({
     systems,
     trees,
     rowNumbers,
+    documents,
+    trials,
     numbers,
     solved,
     standards.data,
@@ -158,6 +165,9 @@ export function WorkspaceProvider({
 
   return <WorkspaceContext value={workspace}>{children}</WorkspaceContext>;
 }
+
+const hireTrialWorker = (): TrialWorker =>
+  new Worker(new URL("./trial.worker.ts", import.meta.url), { type: "module" });
 
 const NO_ROWS: readonly TreeRow[] = [];
 
