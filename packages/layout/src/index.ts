@@ -6,6 +6,7 @@ export * from "./air-systems.ts";
 export type { CommandProblem, CommandResult, IdSource } from "./commands/command.ts";
 export { TURNS, heightOf, type Turn } from "./commands/direction.ts";
 export * from "./commands/add-system.ts";
+export * from "./commands/apply-fix.ts";
 export * from "./commands/edit-record.ts";
 export * from "./commands/extend-run.ts";
 export * from "./commands/move.ts";

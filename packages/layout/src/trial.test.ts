@@ -1,4 +1,4 @@
-import { inches, meters, pascals, type ConstructionSpec } from "@cleatwork/calc";
+import { NO_COMPANY_STANDARDS, inches, meters, pascals, type ConstructionSpec } from "@cleatwork/calc";
 import { describe, expect, it } from "vitest";
 import { applyChangeSet } from "./change-set.ts";
 import { setNodes, setSegments } from "./commands/edit-record.ts";
@@ -34,6 +34,7 @@ const documents: PricingDocuments = {
   altitude_m: meters(0),
   currency: "USD",
   items: [],
+  standards: NO_COMPANY_STANDARDS,
   settings: {
     labor: [hourly("shop"), hourly("field")],
     rates,

@@ -11,6 +11,21 @@ export const findingSeverity: Readonly<Record<FindingCode, FindingSeverity>> = {
   "aspect-ratio-high": "warn",
   "table-range-exceeded": "note",
   "flow-transitional": "note",
+  "damper-missing": "warn",
+  "margin-short": "warn",
+  "seal-class-low": "warn",
+  "duct-grows": "warn",
+  "elbow-too-sharp": "warn",
+  "leakage-high": "warn",
+  "turn-near-equipment": "warn",
+  "transition-abrupt": "warn",
+  "outlet-over-pressured": "note",
+  "paths-unequal": "note",
+  "reserve-large": "note",
+  "velocity-low": "note",
+  "unlined-near-equipment": "note",
+  "flexible-slack": "note",
+  "fittings-too-close": "note",
 };
 
 export const limitSources = {

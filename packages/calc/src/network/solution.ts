@@ -155,6 +155,21 @@ export const FINDING_CODES = [
   "table-range-exceeded",
   "pressure-class-exceeded",
   "size-not-found",
+  "outlet-over-pressured",
+  "damper-missing",
+  "paths-unequal",
+  "margin-short",
+  "reserve-large",
+  "leakage-high",
+  "seal-class-low",
+  "velocity-low",
+  "duct-grows",
+  "unlined-near-equipment",
+  "flexible-slack",
+  "elbow-too-sharp",
+  "transition-abrupt",
+  "fittings-too-close",
+  "turn-near-equipment",
 ] as const;
 export type FindingCode = (typeof FINDING_CODES)[number];
 
@@ -166,7 +181,7 @@ export interface Finding {
   readonly subject: { readonly kind: "segment" | "node" | "system"; readonly id: string };
   readonly value: number;
   readonly limit: number;
-  /** SI unit of value and limit, as in "m/s", "Pa", "Pa/m", "m", "1". */
+  /** SI unit of value and limit, as in "m/s", "Pa", "Pa/m", "m", "m²", "rad", "1"; or what is counted, as in "diameters". */
   readonly unit: string;
   readonly limitSource: string;
 }

@@ -7,6 +7,7 @@ import { sumJunctions } from "../fittings/junction-sums.ts";
 import { shippedPractice, type PracticeCoefficients } from "../fittings/practice.table.ts";
 import { transitionForm } from "../fittings/transition.ts";
 import { cubicMetersPerSecond, pascals, radians } from "../quantity.ts";
+import { review } from "../findings/review.ts";
 import { ok, type Result } from "../result.ts";
 import { sizingTables } from "../sizing/size-rule.ts";
 import { findAccessories } from "./accessories.ts";
@@ -22,7 +23,7 @@ import { findFriction } from "./friction.ts";
 import { findLeakage, sumLosses } from "./losses.ts";
 import { findNeeds, reportShort, writePaths } from "./paths.ts";
 import { chooseSections } from "./sections.ts";
-import type { Solution, SolvedPath, SolvedSegment, SystemProblem } from "./solution.ts";
+import type { Finding, Solution, SolvedPath, SolvedSegment, SystemProblem } from "./solution.ts";
 import { readTraits } from "./traits.ts";
 import { buildTree } from "./tree.ts";
 import { writeSegments } from "./write-segments.ts";
@@ -33,7 +34,7 @@ import { writeSegments } from "./write-segments.ts";
  * Segments carry the air of the outlets beyond them. Leakage is told beside it and added to what the equipment moves; it
  * does not change the flow in a segment. Total pressure is accounted throughout, friction on the hydraulic diameter.
  *
- * The answer is plain data, also for JSON and structured clones; `segments` and `paths` are written on first reading.
+ * The answer is plain data, also for JSON and structured clones; `segments`, `paths` and `findings` are made on first reading.
  *
  * Range    one pass each way over the segments: cost is linear in them
  * Problem  every code of `SystemProblem`, all at once
@@ -93,10 +94,13 @@ export function solve(
   const requiredPressure = needs.required[needs.governing]!;
   const outletAirflow = totalAirflow(system, tree.outlets);
   const totalLeakage = totalOf(leakage);
+  const sums = { requiredPressure, outletAirflow, leakage: totalLeakage };
+  const fan = fanDuty(design, sums, tree, friction.velocityPressure);
 
   // Records cost as much as the physics, and most readers want few of them: written when they are first asked for.
   let segments: readonly SolvedSegment[] | null = null;
   let paths: readonly SolvedPath[] | null = null;
+  let found: readonly Finding[] | null = null;
   return ok({
     systemId: system.id,
     air: { density_kg_m3: density, viscosity_pa_s: viscosity },
@@ -111,8 +115,14 @@ export function solve(
     availablePressure_pa: design.availablePressure_pa,
     outletAirflow_m3s: cubicMetersPerSecond(outletAirflow),
     leakage_m3s: cubicMetersPerSecond(totalLeakage),
-    fan: fanDuty(design, { requiredPressure, outletAirflow, leakage: totalLeakage }, tree, friction.velocityPressure),
-    findings: inOrder(findings),
+    fan,
+    get findings() {
+      if (found === null) {
+        review({ columns, tree, needs, fan, findings });
+        found = inOrder(findings);
+      }
+      return found;
+    },
   });
 }
 

@@ -1,21 +1,12 @@
-import {
-  formatLength,
-  formatPressure,
-  formatPressureChange,
-  pascals,
-  meters,
-  type Finding,
-  type SolvedPath,
-} from "@cleatwork/calc";
+import { formatLength, formatPressure, formatPressureChange, pascals, meters, type SolvedPath } from "@cleatwork/calc";
 import { find } from "@cleatwork/layout";
-import { Link } from "react-router-dom";
-import { paths } from "../../lib/paths.ts";
-import { EmptyState } from "../../ui/empty-state.tsx";
-import { Panel, PanelHead } from "../../ui/panel.tsx";
-import { SeverityMark, SeverityText } from "../../ui/severity.tsx";
+import { Panel } from "../../ui/panel.tsx";
+import { SeverityMark } from "../../ui/severity.tsx";
 import { DataTable } from "../../ui/table/data-table.tsx";
 import { useWorkspace } from "../workspace/index.ts";
-import { findingFigures, findingTitle } from "./finding-words.ts";
+import { FanPanel } from "./fan-panel.tsx";
+import { FindingList } from "./finding-list.tsx";
+import { degrees } from "./fix-words.ts";
 import { GradeLineDock } from "./grade-line-dock.tsx";
 
 /** What an engineer would check: findings first, then the grade line, then every path. */
@@ -25,11 +16,12 @@ export function AirCheck({ systemId }: { systemId: string }) {
   return (
     <main className="grid min-h-0 grow grid-cols-[380px_minmax(0,1fr)] content-start gap-3 overflow-auto p-4 max-lg:grid-cols-1">
       <h1 className="sr-only">Air check</h1>
-      <Findings systemId={systemId} />
+      <FindingList systemId={systemId} />
       <div className="grid content-start gap-3">
         <Panel label="Grade line">
           <GradeLineDock systemId={systemId} />
         </Panel>
+        {solution && <FanPanel solution={solution} />}
         {solution && <Paths paths={solution.paths} governing={solution.governingOutletNodeId} />}
       </div>
       {numbers === null && (
@@ -43,92 +35,6 @@ export function AirCheck({ systemId }: { systemId: string }) {
         combustion and make-up air, seismic bracing: have a licensed professional decide.
       </p>
     </main>
-  );
-}
-
-function Findings({ systemId }: { systemId: string }) {
-  const { numbers, solutionOf } = useWorkspace();
-  const findings = solutionOf(systemId)?.findings ?? [];
-  const takeoff = numbers?.takeoffs.find((each) => each.systemId === systemId)?.findings ?? [];
-  const problems = numbers?.problems ?? [];
-  return (
-    <Panel live label="Findings">
-      <PanelHead title="Findings" fact={`${findings.length + takeoff.length + problems.length}`} />
-      {findings.length + takeoff.length + problems.length === 0 ? (
-        <EmptyState title="Nothing found">Every duct of this system is within its limits.</EmptyState>
-      ) : (
-        <ul>
-          {problems.map((problem, position) => (
-            <Item
-              key={position}
-              severity="stop"
-              title={`${problem.subject.name || "The system"}: ${problem.field}`}
-              id={problem.subject.id}
-            >
-              Needs {problem.limit}
-              {problem.value === null ? "." : `, is ${problem.value}.`}
-            </Item>
-          ))}
-          {findings.map((finding) => (
-            <FindingItem key={finding.id} finding={finding} />
-          ))}
-          {takeoff.map((finding) => (
-            <Item key={finding.id} severity={finding.severity} title="Metal" id={finding.segmentId}>
-              {finding.message}
-            </Item>
-          ))}
-        </ul>
-      )}
-    </Panel>
-  );
-}
-
-function FindingItem({ finding }: { finding: Finding }) {
-  const { units } = useWorkspace();
-  const { value, limit } = findingFigures(finding, units);
-  return (
-    <Item severity={finding.severity} title={findingTitle(finding)} id={finding.subject.id}>
-      <b>{value}</b>, limit {limit}
-      <span className="block text-help text-ink-3">{finding.limitSource}</span>
-    </Item>
-  );
-}
-
-function Item({
-  severity,
-  title,
-  id,
-  children,
-}: {
-  severity: "stop" | "warn" | "note";
-  title: string;
-  id: string;
-  children: React.ReactNode;
-}) {
-  const { selection, numberOf, layout, company, project } = useWorkspace();
-  const segment = find(layout, "segment", id);
-  const node = find(layout, "node", id);
-  const place = segment ? `${numberOf(id)} ${segment.name}` : node?.tag || node?.spaceName || "";
-  return (
-    <li
-      className="border-b border-line px-4 py-2 last:border-b-0"
-      onPointerEnter={() => selection.hover(id)}
-      onPointerLeave={() => selection.hover(null)}
-    >
-      <div className="flex items-baseline gap-2">
-        <SeverityText severity={severity}>{title}</SeverityText>
-        <span className="ml-auto text-help text-ink-3">{place}</span>
-      </div>
-      <div className="mt-0.5 text-ink-2">{children}</div>
-      {(segment ?? node) && (
-        <Link
-          to={`${paths.project(company.slug, project.id, "layout")}?at=${id}`}
-          className="text-help text-dye-ink underline"
-        >
-          Show on the board
-        </Link>
-      )}
-    </li>
   );
 }
 
@@ -212,6 +118,14 @@ function Paths({ paths: rows, governing }: { paths: readonly SolvedPath[]; gover
           align: "right",
           value: ({ throttle_pa }) => throttle_pa,
           cell: ({ throttle_pa }) => formatPressure(pascals(throttle_pa), units).value,
+        },
+        {
+          id: "damper",
+          head: "Blade turned",
+          align: "right",
+          value: ({ damper }) => damper?.angle_rad ?? 0,
+          cell: ({ damper }) =>
+            damper === null ? "open" : damper.angle_rad === null ? "over 70°" : degrees(damper.angle_rad),
         },
       ]}
     />
