@@ -55,13 +55,19 @@ const full = (sheet: Sheet) => ({ x: sheet.left, y: sheet.y, width: sheet.width 
 /** Columns that nothing stands in are left out, the others are as wide as what they hold. */
 function drawTable(sheet: Sheet, table: Table, brand: string): void {
   if (table.rows.length === 0) return;
+  const same = sameAll(table);
   const shown = table.head
     .map((_, column) => column)
-    .filter((column) => !LEFT_OUT.has(table.head[column] ?? "") && table.rows.some((row) => text(row[column]) !== ""));
+    .filter(
+      (column) =>
+        !LEFT_OUT.has(table.head[column] ?? "") &&
+        !same.includes(column) &&
+        table.rows.some((row) => text(row[column]) !== ""),
+    );
   const sums = sumRow(table);
   const weights = shown.map((column) =>
     Math.min(
-      26,
+      22,
       [...table.rows, sums].reduce((most, row) => Math.max(most, text(row[column]).length), table.head[column]!.length),
     ),
   );
@@ -71,8 +77,13 @@ function drawTable(sheet: Sheet, table: Table, brand: string): void {
   sheet.need(60);
   sheet.space(10);
   sheet.space(sheet.put(table.title, { font: "medium", size: 11, color: brand }, full(sheet)) + 4);
+  const isNumber = table.head.map((_, column) => table.rows.some((cells) => typeof cells[column] === "number"));
+  // A column with tenths anywhere shows them everywhere: figures are compared down the column.
+  const digits = table.head.map((_, column) =>
+    table.rows.some((cells) => typeof cells[column] === "number" && !Number.isInteger(cells[column])) ? 1 : 0,
+  );
   const row = (cells: readonly Cell[], style: Style) => {
-    const texts = shown.map((column) => text(cells[column]));
+    const texts = shown.map((column) => text(cells[column], digits[column]));
     const height = Math.max(...texts.map((cell, index) => sheet.heightOf(cell, style, widths[index]! - 4)));
     if (sheet.y + height + 3 > sheet.bottom) {
       sheet.need(sheet.bottom);
@@ -80,27 +91,39 @@ function drawTable(sheet: Sheet, table: Table, brand: string): void {
     }
     let x = sheet.left;
     texts.forEach((cell, index) => {
-      const isNumber = typeof cells[shown[index]!] === "number" || table.summed.includes(shown[index]!);
-      sheet.put(cell, { ...style, align: isNumber ? "right" : "left" }, { x, y: sheet.y, width: widths[index]! - 4 });
+      const align = isNumber[shown[index]!] ? "right" : "left";
+      sheet.put(cell, { ...style, align }, { x, y: sheet.y, width: widths[index]! - 4 });
       x += widths[index]!;
     });
     sheet.space(height + 2);
     sheet.rule(LINE, 0.4);
     sheet.space(2);
   };
+  if (same.length > 0) {
+    const words = same.map((column) => `${table.head[column] ?? ""} ${text(table.rows[0]?.[column])}`);
+    sheet.write(`All of it: ${words.join(", ")}.`, { ...small, color: SOFT });
+  }
   row(table.head, headStyle);
   for (const cells of table.rows) row(cells, small);
-  row(sums, { ...small, font: "medium" });
+  row(
+    sums.map((cell, column) => (column === shown[0] && cell === null ? "Total" : cell)),
+    { ...small, font: "medium" },
+  );
 }
 
-/** Said in words elsewhere, or too long for paper. */
-const LEFT_OUT = new Set(["Gauge by", "Seam", "Basis"]);
+/** Columns of words that say the same in every row: said once above the table, where there is more than a row. */
+const sameAll = ({ head, rows }: Table): readonly number[] =>
+  rows.length < 2
+    ? []
+    : head
+        .map((_, column) => column)
+        .filter((column) => {
+          const first = rows[0]?.[column];
+          return typeof first === "string" && first !== "" && rows.every((row) => row[column] === first);
+        });
 
-const text = (cell: Cell | undefined): string =>
-  cell === null || cell === undefined
-    ? ""
-    : typeof cell === "number"
-      ? Number.isInteger(cell)
-        ? String(cell)
-        : cell.toFixed(1)
-      : cell;
+/** Said in words elsewhere, or too long for paper. */
+const LEFT_OUT = new Set(["Gauge by", "Seam", "Basis", "Joints"]);
+
+const text = (cell: Cell | undefined, digits = 1): string =>
+  cell === null || cell === undefined ? "" : typeof cell === "number" ? cell.toFixed(digits) : cell;

@@ -92,7 +92,8 @@ export function piecesTable({ takeoffs, systems, units }: Source): Table {
       levelName(piece.levelId),
       piece.mark,
       piece.kind,
-      piece.fitting,
+      // A transition that is called one says nothing new.
+      piece.fitting === piece.kind ? null : piece.fitting,
       piece.segmentName,
       formatSize(piece.section, units).value,
       rounded(u.lengthOf(piece.length_m)),

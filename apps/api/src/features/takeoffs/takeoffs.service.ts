@@ -8,6 +8,8 @@ import { takeoffPdf } from "./takeoff-pdf.ts";
 import { piecesTable, takeoffTables } from "./takeoff-tables.ts";
 import { takeoffXlsx } from "./takeoff-xlsx.ts";
 
+const SEVERITY_WORDS = { stop: "Stop", warn: "Warning", note: "Note" } as const;
+
 /** The takeoff as it is stored now, in a file. A system with problems would be missing from it, so then there is none. */
 export async function takeoffFile(
   tenant: TenantDb,
@@ -48,7 +50,7 @@ export async function takeoffFile(
           paper: project.unitSystem === "si" ? "A4" : "LETTER",
           tables: takeoffTables(source),
           findings: takeoffs.flatMap(({ findings }) =>
-            findings.map(({ severity, message }) => `${severity}: ${message}`),
+            findings.map(({ severity, message }) => `${SEVERITY_WORDS[severity]}: ${message}`),
           ),
         }),
         mediaType: "application/pdf",

@@ -5,7 +5,7 @@ import {
   parseLength,
   parseThickness,
 } from "@cleatwork/calc/display/index";
-import { SPLITTER_COUNTS, inches, meters, type Meters, type Pascals } from "@cleatwork/calc";
+import { SPLITTER_COUNTS, inches, meters, type Meters, type Pascals, sheetLabels } from "@cleatwork/calc";
 import { endpoints, specRequest, type Spec } from "@cleatwork/contracts";
 import { useQueryClient } from "@tanstack/react-query";
 import type { ReactNode } from "react";
@@ -13,7 +13,7 @@ import { useFormContext, useWatch } from "react-hook-form";
 import type { z } from "zod";
 import { api } from "../../lib/http.ts";
 import { Button } from "../../ui/button.tsx";
-import { SelectField } from "../../ui/controls.tsx";
+import { CheckField, SelectField } from "../../ui/controls.tsx";
 import { ContractFormView } from "../../ui/form/contract-form-view.tsx";
 import { formParts } from "../../ui/form/form-parts.tsx";
 import { useContractForm } from "../../ui/form/use-contract-form.ts";
@@ -138,13 +138,51 @@ function Sheet() {
         choices={specChoices.sealClass}
         hint="It decides leakage and sealant."
       />
+      <SheetOfTheJob />
     </Part>
+  );
+}
+
+/** What the job asks for goes before every schedule; a duct's own sheet goes before this. */
+function SheetOfTheJob() {
+  const { setValue } = useFormContext<Values>();
+  const { gauge, material } = useWatch<Values, "construction">({ name: "construction" });
+  return (
+    <SelectField
+      label="Sheet for everything"
+      empty="By size, from the schedule"
+      value={gauge ?? ""}
+      onChange={(event) =>
+        setValue("construction.gauge", event.target.value === "" ? null : event.target.value, { shouldDirty: true })
+      }
+      choices={sheetLabels(material).map((value) => ({ value, label: value }))}
+      hint="Only where the job names one sheet. Lighter than the schedule is pointed out."
+    />
+  );
+}
+
+function FromSchedule() {
+  const { setValue } = useFormContext<Values>();
+  const fromSchedule = useWatch<Values, "construction.constructionFromSchedule">({
+    name: "construction.constructionFromSchedule",
+  });
+  return (
+    <CheckField
+      className="sm:col-span-2 lg:col-span-3"
+      label="Joint, seam and length of a piece as the gauge schedule names them"
+      hint="Where it names none, these count."
+      checked={fromSchedule ?? false}
+      onChange={(event) =>
+        setValue("construction.constructionFromSchedule", event.target.checked, { shouldDirty: true })
+      }
+    />
   );
 }
 
 function Rectangular() {
   return (
     <Part title="Rectangular">
+      <FromSchedule />
       <Select
         name="construction.rectangularJoint"
         label="Joint"

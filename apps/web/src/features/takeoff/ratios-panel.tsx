@@ -43,17 +43,22 @@ export function RatiosPanel() {
       {rows.length === 0 ? (
         <PanelBody className="text-ink-3">Nothing to hold against anything yet.</PanelBody>
       ) : (
-        <table className="grid-table">
-          <tbody>
-            {rows.map(({ ratio, value, check }) => (
-              <tr key={ratio}>
-                <td>{names[ratio]}</td>
-                <td className="num">{text(ratio, value)}</td>
-                <td>{check && <Verdict check={check} usual={text(ratio, check.usual)} />}</td>
-              </tr>
-            ))}
-          </tbody>
-        </table>
+        <dl className="px-4 py-2">
+          {rows.map(({ ratio, value, check }) => (
+            <div
+              key={ratio}
+              className="grid grid-cols-[1fr_auto] gap-x-3 border-b border-line-soft py-1 last:border-b-0"
+            >
+              <dt>{names[ratio]}</dt>
+              <dd className="text-right font-semibold">{text(ratio, value)}</dd>
+              {check && (
+                <dd className="col-span-2">
+                  <Verdict check={check} usual={text(ratio, check.usual)} />
+                </dd>
+              )}
+            </div>
+          ))}
+        </dl>
       )}
     </Panel>
   );
