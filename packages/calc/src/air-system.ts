@@ -47,6 +47,9 @@ export type RectangularBranch = (typeof RECTANGULAR_BRANCHES)[number];
 export const ROUND_BRANCHES = ["straight-tap", "conical-tap", "saddle-tap"] as const;
 export type RoundBranch = (typeof ROUND_BRANCHES)[number];
 
+export const TRANSITION_ALIGNMENTS = ["centered", "flat-bottom", "flat-top"] as const;
+export type TransitionAlignment = (typeof TRANSITION_ALIGNMENTS)[number];
+
 /** What a company writes once and reuses: how duct of a system is built. */
 export interface ConstructionSpec {
   readonly material: Material;
@@ -77,6 +80,8 @@ export interface ConstructionSpec {
   };
   /** Total angle of a transition. */
   readonly transitionAngle_rad: number;
+  /** Which wall of a transition runs straight through; none where it is not said: the center does. */
+  readonly transitionAlignment?: TransitionAlignment | undefined;
   /** How far flexible duct is left slack: 0 is pulled tight, 0.3 is 30 % too long. Adds loss. */
   readonly flexibleSlack: number;
   /** Sheet that the job asks for whatever a schedule says, such as "24 ga"; null or absent: the schedule's. */

@@ -42,6 +42,9 @@ export {
 } from "./takeoff/ratios.ts";
 export { shippedStandards } from "./takeoff/shipped-standards.ts";
 export { markNumbers } from "./takeoff/marks.ts";
+export type { Body } from "./takeoff/body.ts";
+export { patternArea, patternSize, type FlatPattern } from "./takeoff/pattern/flat-pattern.ts";
+export { patternsOf } from "./takeoff/pattern/patterns.ts";
 export { sizeKey } from "./takeoff/count-items.ts";
 export * from "./money.ts";
 export { price } from "./pricing/price.ts";

@@ -2,9 +2,9 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import type { Section } from "../air-system.ts";
-import { METERS_PER_INCH, inches, radians, type SquareMeters } from "../quantity.ts";
+import { METERS_PER_INCH, inches, radians, squareMeters, type SquareMeters } from "../quantity.ts";
 import { makingTable } from "../takeoff/making.table.ts";
-import { capSurface } from "../takeoff/surface/body.ts";
+import { capSurface, plenumSurface } from "../takeoff/surface/body.ts";
 import {
   goredElbowSurface,
   radiusElbowParts,
@@ -61,6 +61,18 @@ describe(`fitting surfaces as worked: ${source.place}`, () => {
       () => transitionSurface(rectangle(30, 20), rectangle(20, 16), inches(24)),
       2086.71,
     ],
+    [
+      "G09",
+      "angled offset: a transition of one size with its center moved",
+      () => transitionSurface(rectangle(20, 14), rectangle(20, 14), inches(36), { x_m: inches(10), y_m: 0 }),
+      2486.166,
+    ],
+    [
+      "G10",
+      "ogee offset of two equal arcs, 12 in. over 48 in.",
+      () => squareMeters(2 * radiusElbowSurface(rectangle(20, 14), radians(2 * Math.atan(12 / 48)), inches(51))),
+      3398.344,
+    ],
     ["G15", "24 × 12 to 16 round", () => transitionSurface(rectangle(24, 12), round(16), inches(18)), 1119.629],
     ["G17", "straight 14 round, 10 ft", () => ductSurface(round(14), inches(120)), 5277.876],
     ["G18", "reducer 20 to 14", () => transitionSurface(round(20), round(14), inches(12)), 660.609],
@@ -85,6 +97,17 @@ describe(`fitting surfaces as worked: ${source.place}`, () => {
       384.569,
     ],
     ["G28", "straight flat oval 26 × 10", () => ductSurface(oval(26, 10), inches(60)), 3804.956],
+    [
+      "G30",
+      "plenum less three openings",
+      () =>
+        plenumSurface({ width_m: inches(48), height_m: inches(30), length_m: inches(36) }, [
+          rectangle(24, 12),
+          rectangle(20, 14),
+          rectangle(18, 18),
+        ]),
+      7604,
+    ],
     ["G29", "end cap 24 × 12", () => capSurface(rectangle(24, 12)), 360],
   ];
 
@@ -131,6 +154,18 @@ describe("fitting surfaces against a mesh", () => {
         expect(Math.abs(exact - transitionMesh(from, to, inches(long))) / exact).toBeLessThan(2e-3);
       }),
       { numRuns: 200 },
+    );
+  });
+
+  it("any two sections make an eccentric transition of the mesh's area", () => {
+    const move = fc.double({ min: -20, max: 20, noNaN: true });
+    fc.assert(
+      fc.property(section, section, length, move, move, (from, to, long, x, y) => {
+        const shift = { x_m: inches(x), y_m: inches(y) };
+        const exact = transitionSurface(from, to, inches(long), shift);
+        expect(Math.abs(exact - eccentricMesh(from, to, inches(long), shift)) / exact).toBeLessThan(2e-3);
+      }),
+      { numRuns: 100 },
     );
   });
 
@@ -362,6 +397,44 @@ function transitionMesh(
     400,
   );
   return 4 * (top + right + corner);
+}
+
+/**
+ * The same with the far end moved: all four quarters, each arc to the arc of the same turn, with the flats between them
+ * coming of themselves, for one ring of points runs through all of it.
+ */
+function eccentricMesh(
+  from: Exclude<Section, { shape: "annular" }>,
+  to: Exclude<Section, { shape: "annular" }>,
+  long: number,
+  shift: { readonly x_m: number; readonly y_m: number },
+): number {
+  const rings = [quarterOf(from), quarterOf(to)].map(({ center, radius }, end) =>
+    [0, 1, 2, 3].flatMap((turn) => {
+      const [signX, signY] = [turn === 0 || turn === 3 ? 1 : -1, turn < 2 ? 1 : -1];
+      return Array.from({ length: 101 }, (_, i): Point => {
+        const t = ((turn + i / 100) * Math.PI) / 2;
+        return [
+          end * shift.x_m + signX * center[0] + radius * Math.cos(t),
+          end * shift.y_m + signY * center[1] + radius * Math.sin(t),
+          end * long,
+        ];
+      });
+    }),
+  );
+  const [near, far] = rings as [Point[], Point[]];
+  const at = (ring: Point[], i: number) => ring[i % ring.length]!;
+  let area = 0;
+  for (let i = 0; i < near.length; i++) {
+    const between =
+      (ring: Point[]) =>
+      (t: number): Point => {
+        const [p, q] = [at(ring, i), at(ring, i + 1)];
+        return [p[0] + t * (q[0] - p[0]), p[1] + t * (q[1] - p[1]), p[2] + t * (q[2] - p[2])];
+      };
+    area += ruledArea(between(near), between(far), 1);
+  }
+  return area;
 }
 
 /** A rectangle's corner is an arc of no radius. */

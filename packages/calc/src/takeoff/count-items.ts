@@ -83,7 +83,7 @@ export function countSealant(frame: Frame, s: number, pieces: readonly Piece[]):
   for (const piece of pieces) {
     if (piece.kind === "flexible") continue;
     sealed += girth(piece.otherSection ?? piece.section);
-    if (sealClass !== "C" && piece.seam !== "spiral") sealed += seamLength(piece);
+    if (sealClass !== "C") sealed += piece.seamLength_m;
   }
   if (sealed === 0) return null;
   return {
@@ -101,10 +101,6 @@ export function countSealant(frame: Frame, s: number, pieces: readonly Piece[]):
     basis: `${sealantTable.source}, ${sealClass === "C" ? "joints" : "joints and seams"}; its hours are in those by weight`,
   };
 }
-
-/** A rectangular straight is wrapped from one sheet, with one seam; a fitting has a seam in every corner. */
-const seamLength = ({ kind, section, length_m }: Piece): number =>
-  (section.shape === "rectangular" && kind !== "straight" ? 4 : section.shape === "annular" ? 2 : 1) * length_m;
 
 const ACCESSORY_NAMES: Readonly<Record<AccessoryKind, string>> = {
   "volume-damper": "Volume damper",

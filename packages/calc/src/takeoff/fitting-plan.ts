@@ -1,6 +1,7 @@
 /** What each made fitting is, and what it takes out of the straight duct. */
 import type { FittingType, Section } from "../air-system.ts";
 import type { Meters, Radians, SquareMeters } from "../quantity.ts";
+import type { Body } from "./body.ts";
 import { isSteep, segmentBefore, type Frame } from "./frame.ts";
 import { longestSide } from "./gauge.ts";
 import { outerWall } from "./surface/girth.ts";
@@ -19,6 +20,7 @@ export interface FittingPlan {
   readonly length: Meters;
   /** The larger end sets the gauge of all of it. */
   readonly gaugeSection: Section;
+  readonly body: Body;
   readonly netArea: SquareMeters;
   readonly netTerms: Terms;
   readonly netBasis: string;

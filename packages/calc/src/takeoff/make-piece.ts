@@ -12,6 +12,9 @@ import {
   type GaugeQuestion,
   type gaugeReader,
 } from "./gauge.ts";
+import { clearSection } from "../network/clear-section.ts";
+import { blankOf } from "./blank.ts";
+import type { Body } from "./body.ts";
 import { areaArithmetic, hoursArithmetic, weightArithmetic } from "./piece-arithmetic.ts";
 import type { FittingPlan } from "./fitting-plan.ts";
 import { hoursOf, type hoursReader } from "./productivity.ts";
@@ -46,6 +49,7 @@ interface Metal {
   readonly length: Meters;
   readonly gaugeSection: Section;
   readonly construction: GaugeQuestion["construction"];
+  readonly body: Body;
   readonly netArea: SquareMeters;
   readonly netTerms: Arithmetic["terms"];
   readonly netBasis: string;
@@ -63,6 +67,7 @@ export function straightPiece(origin: PieceOrigin, mark: string, section: Sectio
     length,
     gaugeSection: section,
     construction: straightConstruction(section, origin.spec),
+    body: { kind: "straight", section, length_m: length },
     netArea: squareMeters(around * length),
     netTerms: [
       { label: "girth", value: around, unit: "m" },
@@ -83,6 +88,7 @@ export const fittingPiece = (origin: PieceOrigin, mark: string, plan: FittingPla
     length: plan.length,
     gaugeSection: plan.gaugeSection,
     construction: "fitting",
+    body: plan.body,
     netArea: plan.netArea,
     netTerms: plan.netTerms,
     netBasis: plan.netBasis,
@@ -96,7 +102,7 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
   const { spec, standards, insulation } = origin;
   const { section, netArea } = metal;
   const part = metal.kind === "straight" ? "straight" : "fitting";
-  const { productivity, blankAllowance } = standards;
+  const { productivity, edges } = standards;
 
   const answer = origin.readGauge(pieceQuestion(metal.gaugeSection, metal.construction, spec), {
     piece: origin.gaugeOverride,
@@ -105,7 +111,8 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
   // A label that no sheet of the metal answers to is as good as none: no weight is made up for it.
   const { gauge, sheet } = answer;
 
-  const blankArea = squareMeters(netArea * (1 + blankAllowance[part]));
+  const blank = blankOf(metal.body, { netArea, length: metal.length, spec, edges });
+  const blankArea = blank.area;
   const weight = kilograms(netArea * (sheet?.weight_kg_m2 ?? 0));
   const work = {
     kind: metal.kind,
@@ -129,7 +136,7 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     netTerms: metal.netTerms,
     netBasis: metal.netBasis,
     blankArea,
-    blankAllowance: blankAllowance[part],
+    blankTerms: blank.terms,
     outerArea,
     wrapShare,
     insulationArea,
@@ -153,9 +160,11 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     kind: metal.kind,
     fitting: metal.fitting,
     section,
+    clearSection: clearOf(section, insulation),
     otherSection: metal.otherSection,
     angle_rad: metal.angle_rad,
     length_m: metal.length,
+    body: metal.body,
     material: spec.material,
     gauge,
     sheetThickness_m: sheet?.thickness_m ?? null,
@@ -167,6 +176,8 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     joint: jointOf(section, spec, answer),
     seam: seamOf(section, spec, part, answer),
     jointCount: section.shape === "annular" ? 2 : 1,
+    ends: blank.ends,
+    seamLength_m: blank.seamLength,
     netArea_m2: netArea,
     blankArea_m2: blankArea,
     weight_kg: weight,
@@ -190,9 +201,11 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   kind: piece.kind,
   fitting: piece.fitting,
   section: piece.section,
+  clearSection: piece.clearSection,
   otherSection: piece.otherSection,
   angle_rad: piece.angle_rad,
   length_m: piece.length_m,
+  body: piece.body,
   material: piece.material,
   gauge: piece.gauge,
   sheetThickness_m: piece.sheetThickness_m,
@@ -204,6 +217,8 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   joint: piece.joint,
   seam: piece.seam,
   jointCount: piece.jointCount,
+  ends: piece.ends,
+  seamLength_m: piece.seamLength_m,
   netArea_m2: piece.netArea_m2,
   blankArea_m2: piece.blankArea_m2,
   weight_kg: piece.weight_kg,
@@ -213,6 +228,10 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   fieldHours_h: piece.fieldHours_h,
   arithmetic: piece.arithmetic,
 });
+
+/** What the air sees: inside of the liner. */
+const clearOf = (section: Section, insulation: Insulation): Section =>
+  insulation.kind === "liner" ? clearSection(section, insulation.thickness_m) : section;
 
 const gaugeSource = ({ source, missing }: GaugeAnswer): string =>
   missing === null ? source : `${source}: ${missingWords(missing)}`;
@@ -270,9 +289,11 @@ export function flexiblePiece(origin: PieceOrigin, mark: string, section: Sectio
     kind: "flexible",
     fitting: null,
     section,
+    clearSection: section,
     otherSection: null,
     angle_rad: 0,
     length_m: length,
+    body: { kind: "straight", section, length_m: length },
     material: "flexible",
     gauge: null,
     sheetThickness_m: null,
@@ -284,6 +305,8 @@ export function flexiblePiece(origin: PieceOrigin, mark: string, section: Sectio
     joint: "band and tape",
     seam: "",
     jointCount: 1,
+    ends: [section, section],
+    seamLength_m: meters(0),
     netArea_m2: squareMeters(0),
     blankArea_m2: squareMeters(0),
     weight_kg: kilograms(0),

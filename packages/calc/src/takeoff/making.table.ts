@@ -15,6 +15,8 @@ export const makingTable = {
   coneSpread: inches(4),
   /** Edge turned over all round an end cap. */
   capTurn: inches(1),
+  /** A plenum stands out this far around the duct on it, and is this long; its opening to the unit is the duct's. */
+  plenum: { margin: inches(6), length: inches(24) },
   transition: { shortest: inches(12) },
   /** Single-thickness turning vanes of 2 in. radius, 1 1/2 in. apart square to the wall. */
   vane: { radius: inches(2), spacing: inches(1.5) },

@@ -13,7 +13,7 @@ export function areaArithmetic(areas: {
   readonly netTerms: Arithmetic["terms"];
   readonly netBasis: string;
   readonly blankArea: SquareMeters;
-  readonly blankAllowance: number;
+  readonly blankTerms: Arithmetic["terms"];
   readonly outerArea: SquareMeters;
   readonly wrapShare: number;
   readonly insulationArea: SquareMeters;
@@ -25,13 +25,10 @@ export function areaArithmetic(areas: {
     { quantity: "net-area", terms: areas.netTerms, result: netArea, unit: "m²", basis: areas.netBasis },
     {
       quantity: "blank-area",
-      terms: [
-        { label: "net area", value: netArea, unit: "m²" },
-        { label: "with seams, joints, laps", value: 1 + areas.blankAllowance, unit: "×" },
-      ],
+      terms: areas.blankTerms,
       result: blankArea,
       unit: "m²",
-      basis: areas.standards.allowanceSource,
+      basis: areas.standards.edges.source,
     },
   ];
   if (areas.insulationArea > 0) {

@@ -3,7 +3,9 @@ import type { SolvedFitting } from "../network/solution.ts";
 import { meters, radians, squareMeters, type Meters } from "../quantity.ts";
 import { GEOMETRY, sidesInBend, type FittingPlan, type FittingPlans } from "./fitting-plan.ts";
 import { segmentBefore, type Frame } from "./frame.ts";
+import { makingTable } from "./making.table.ts";
 import {
+  WIDEST_MITER_RAD,
   gorePieces,
   goredElbowSurface,
   radiusElbowSurface,
@@ -38,6 +40,14 @@ export function planElbow(
     gaugeSection: section,
   } as const;
 
+  const bend = {
+    section,
+    planeSide_m: planeSide,
+    acrossSide_m: acrossSide,
+    angle_rad: angle,
+    centerRadius_m: centerRadius,
+  };
+
   const takeOut = (tangent: Meters) => {
     plans.near[s]! += tangent;
     const before = segmentBefore(frame, s);
@@ -49,12 +59,20 @@ export function planElbow(
     takeOut(tangent);
     const walls = squareElbowSurface(section, angle, planeSide);
     const terms = [around, { label: "center line through the corner", value: 2 * tangent, unit: "m" }];
+    const mitered = {
+      kind: "mitered-elbow",
+      bend: { ...bend, angle_rad: radians(Math.min(angle, WIDEST_MITER_RAD)) },
+      leg_m: makingTable.squareThroatLeg,
+      vaneCount: type === "elbow-square-throat-vanes" ? vaneCount(planeSide) : 0,
+    } as const;
     if (type !== "elbow-square-throat-vanes") {
-      return { ...base, length: meters(2 * tangent), netArea: walls, netTerms: terms, netBasis: GEOMETRY };
+      const length = meters(2 * tangent);
+      return { ...base, body: mitered, length, netArea: walls, netTerms: terms, netBasis: GEOMETRY };
     }
     const vanes = vaneSurface({ planeSide, acrossSide, angle });
     return {
       ...base,
+      body: { ...mitered, bend: { ...mitered.bend, angle_rad: angle } },
       length: meters(2 * tangent),
       netArea: squareMeters(walls + vanes),
       netTerms: [...terms, { label: `${vaneCount(planeSide)} turning vanes`, value: vanes, unit: "m²" }],
@@ -69,6 +87,7 @@ export function planElbow(
     const splitters = splitterSurface({ planeSide, acrossSide, angle, centerRadius }, splitterCount);
     return {
       ...base,
+      body: { kind: "radius-elbow", bend, splitterCount },
       length: meters(angle * centerRadius),
       netArea: squareMeters(walls + splitters),
       netTerms: [
@@ -83,6 +102,7 @@ export function planElbow(
     const netArea = goredElbowSurface(section, angle, centerRadius, pieces);
     return {
       ...base,
+      body: { kind: "gored-elbow", bend, pieceCount: pieces },
       length: meters(netArea / girth(section)),
       netArea,
       netTerms: [
@@ -94,6 +114,7 @@ export function planElbow(
   }
   return {
     ...base,
+    body: { kind: "radius-elbow", bend, splitterCount: 0 },
     length: meters(angle * centerRadius),
     netArea: radiusElbowSurface(section, angle, centerRadius),
     netTerms: [
@@ -114,7 +135,7 @@ export function planOffset(
 ): FittingPlan {
   const section = frame.metal[s]!;
   const angle = radians(angle_rad);
-  const { planeSide } = sidesInBend(frame, s, section);
+  const { planeSide, acrossSide } = sidesInBend(frame, s, section);
   const centerRadius = meters(frame.system.spec.elbow.radiusRatio * planeSide);
   const tangent = radiusElbowTangent(angle, centerRadius);
   plans.near[s]! += 3 * tangent;
@@ -129,11 +150,21 @@ export function planOffset(
     otherSection: null,
     angle,
     gaugeSection: section,
+    body: {
+      kind: "offset",
+      bend: {
+        section,
+        planeSide_m: planeSide,
+        acrossSide_m: acrossSide,
+        angle_rad: angle,
+        centerRadius_m: centerRadius,
+      },
+    },
     length: meters(2 * angle * centerRadius),
     netArea: squareMeters(2 * one),
     netTerms: [
       { label: "girth", value: girth(section), unit: "m" },
-      { label: "angle of each turn", value: angle, unit: "rad" },
+      { label: "angle of both turns", value: 2 * angle, unit: "rad" },
       { label: "center-line radius", value: centerRadius, unit: "m" },
     ],
     netBasis: `${GEOMETRY}; two radius elbows`,

@@ -5,6 +5,7 @@ import type { SolvedFitting } from "../network/solution.ts";
 import { meters, radians, squareMeters } from "../quantity.ts";
 import { GEOMETRY, larger, sidesInBend, type FittingPlan, type FittingPlans } from "./fitting-plan.ts";
 import { isSteep, segmentBefore, type Frame } from "./frame.ts";
+import type { Bend, Body } from "./body.ts";
 import { makingTable } from "./making.table.ts";
 import { bodyLength, bodySurface } from "./surface/body.ts";
 import { radiusElbowSurface, radiusElbowTangent } from "./surface/elbow.ts";
@@ -43,9 +44,14 @@ function planTap(
   plans.near[s]! += wall.distance / Math.sin(angle) + length;
 
   let netArea = collarSurface(section, wall, angle, length);
-  if (type === "tap-shoe" && section.shape === "rectangular") netArea = shoeSurface(section, wall, length, entry);
+  let body: Body = { kind: "collar", section, wall, angle_rad: angle, length_m: length };
+  if (type === "tap-shoe" && section.shape === "rectangular") {
+    netArea = shoeSurface(section, wall, length, entry);
+    body = { kind: "shoe", section, wall, length_m: length, entry_m: entry };
+  }
   if (type === "tap-conical" && section.shape !== "annular") {
     netArea = coneSurface(section, wall, length, makingTable.coneSpread);
+    body = { kind: "cone", section, wall, length_m: length, spread_m: makingTable.coneSpread };
   }
   return {
     segment: s,
@@ -56,6 +62,7 @@ function planTap(
     angle: radians(angle_rad),
     length,
     gaugeSection: section,
+    body,
     netArea,
     netTerms: [
       { label: "girth", value: girth(section), unit: "m" },
@@ -79,11 +86,20 @@ function planWye(frame: Frame, plans: FittingPlans, s: number, before: number, {
   let netArea = 0;
   let farthest = 0;
   const terms: { label: string; value: number; unit: string }[] = [];
+  const bends: Bend[] = [];
   for (const child of legs) {
     const section = metal[child]!;
     const cosine = joints.turnCosine[child]!;
     const angle = radians(Number.isNaN(cosine) ? Math.PI / 4 : Math.acos(cosine));
-    const centerRadius = meters(system.spec.elbow.radiusRatio * sidesInBend(frame, child, section).planeSide);
+    const { planeSide, acrossSide } = sidesInBend(frame, child, section);
+    const centerRadius = meters(system.spec.elbow.radiusRatio * planeSide);
+    bends.push({
+      section,
+      planeSide_m: planeSide,
+      acrossSide_m: acrossSide,
+      angle_rad: angle,
+      centerRadius_m: centerRadius,
+    });
     const area = radiusElbowSurface(section, angle, centerRadius);
     const tangent = radiusElbowTangent(angle, centerRadius);
     netArea += area;
@@ -101,6 +117,7 @@ function planWye(frame: Frame, plans: FittingPlans, s: number, before: number, {
     angle: radians(frame.solution.segments[s]!.fittings.find((fitting) => fitting.type === type)?.angle_rad ?? 0),
     length: meters(2 * farthest),
     gaugeSection: larger(metal[before]!, metal[s]!),
+    body: { kind: "wye", legs: bends },
     netArea: squareMeters(netArea),
     netTerms: terms,
     netBasis: `${GEOMETRY}; radius legs back to back`,
@@ -140,6 +157,7 @@ function planBody(
     angle: radians(angle_rad),
     length,
     gaugeSection: larger(main, metal[s]!),
+    body: { kind: "junction", main, branches: sections, length_m: length, runsOn: run !== null },
     netArea,
     netTerms: [
       { label: "walls along the main", value: walls, unit: "m²" },

@@ -409,7 +409,8 @@ describe("a whole building", () => {
     for (const { arithmetic } of takeoff.pieces) {
       for (const { quantity, terms, result } of arithmetic) {
         // Surfaces put together from parts add up, all else multiplies.
-        const isSum = quantity === "net-area" && terms.every(({ unit }) => unit === "m²");
+        const isSum =
+          (quantity === "net-area" || quantity === "blank-area") && terms.every(({ unit }) => unit === "m²");
         const isVaned = quantity === "net-area" && terms.length === 3 && terms[2]!.unit === "m²";
         const product = (some: typeof terms) => some.reduce((sofar, { value }) => sofar * value, 1);
         const came = isSum

@@ -1,5 +1,7 @@
 /** What `takeOff` answers: pieces with their arithmetic, and the quantities that are not pieces. Plain JSON. */
 import type { AirSystem, FittingType, Material, Section, SheetReference } from "../air-system.ts";
+import type { Body } from "./body.ts";
+import type { EdgeTable } from "./edges.table.ts";
 import type { GaugeDecider } from "./gauge.ts";
 import type { GaugeSchedule, Reinforcement } from "./gauge-schedule.ts";
 import type { ProductivityTable } from "./productivity.ts";
@@ -34,10 +36,14 @@ export interface Piece {
   readonly fitting: FittingType | null;
   /** Sheet-metal size. */
   readonly section: Section;
+  /** Clear inside of its liner; the same where there is none. */
+  readonly clearSection: Section;
   /** The other end of a transition or shape change, or the branch of a tap. */
   readonly otherSection: Section | null;
   readonly angle_rad: number;
   readonly length_m: Meters;
+  /** Its form, from which `patternsOf` lays its walls flat. */
+  readonly body: Body;
   readonly material: Material | "flexible";
   /** "24 ga" as the schedule says; null for flexible duct. */
   readonly gauge: string | null;
@@ -53,6 +59,10 @@ export interface Piece {
   readonly joint: string;
   readonly seam: string;
   readonly jointCount: number;
+  /** Sections at its ends, each with an edge for the joint. */
+  readonly ends: readonly Section[];
+  /** Along the piece and between its gores; none where it is spiral. */
+  readonly seamLength_m: Meters;
   readonly netArea_m2: SquareMeters;
   readonly blankArea_m2: SquareMeters;
   readonly weight_kg: Kilograms;
@@ -121,9 +131,8 @@ export interface ShopStandards {
   /** The company's own charts; for a metal and shape that it has any of, these alone count. */
   readonly companyGauges: GaugeSchedule | null;
   readonly productivity: ProductivityTable;
-  /** Share of the net area added for seams, joints and laps, as bought sheet. */
-  readonly blankAllowance: { readonly straight: number; readonly fitting: number };
-  readonly allowanceSource: string;
+  /** What seams and joints take beyond the net outline. */
+  readonly edges: EdgeTable;
 }
 
 export type TakeoffInput = { readonly system: AirSystem; readonly standards: ShopStandards };

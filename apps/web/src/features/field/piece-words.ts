@@ -33,6 +33,7 @@ const branchNames: Readonly<Record<string, string>> = {
   tee: "Tee",
   wye: "Wye",
   cross: "Cross",
+  plenum: "Plenum",
 };
 
 /** Gauge, joint and weight, under the name of the piece. */

@@ -26,6 +26,23 @@ export function bodySurface(
   return squareMeters(area);
 }
 
+/**
+ * Closed box less its openings.
+ *
+ *     A = 2 (W H + W L + H L) − Σ openings
+ *
+ * Source   geometry; trades that pay by area leave the openings in
+ */
+export function plenumSurface(
+  box: { readonly width_m: Meters; readonly height_m: Meters; readonly length_m: Meters },
+  openings: readonly Section[],
+): SquareMeters {
+  const { width_m: w, height_m: h, length_m: l } = box;
+  let area = 2 * (w * h + w * l + h * l);
+  for (const opening of openings) area -= coveredArea(opening);
+  return squareMeters(area);
+}
+
 /** End cap with its edge turned over: W H + 2 (W + H) f, π D²/4 + π D f. */
 export const capSurface = (section: Section): SquareMeters =>
   squareMeters(coveredArea(section) + girth(section) * makingTable.capTurn);

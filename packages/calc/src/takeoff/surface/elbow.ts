@@ -5,7 +5,7 @@ import { goreTable, makingTable } from "../making.table.ts";
 import { girth } from "./girth.ts";
 
 /** Over this a bend is made of two, so that a turn back on itself stays finite. */
-const WIDEST_MITER_RAD = (2 * Math.PI) / 3;
+export const WIDEST_MITER_RAD = (2 * Math.PI) / 3;
 
 const halfTangent = (angle: Radians): number => Math.tan(Math.min(angle, WIDEST_MITER_RAD) / 2);
 
@@ -46,15 +46,24 @@ export function radiusElbowParts(elbow: {
  *
  * Source   geometry
  */
-export function splitterSurface(
+export const splitterSurface = (
   elbow: { planeSide: Meters; acrossSide: Meters; angle: Radians; centerRadius: Meters },
   splitterCount: number,
-): SquareMeters {
-  const throat = elbow.centerRadius - elbow.planeSide / 2;
-  const heel = throat + elbow.planeSide;
-  let arcs = 0;
-  for (let i = 1; i <= splitterCount; i++) arcs += throat * (heel / throat) ** (i / (splitterCount + 1));
-  return squareMeters(throat > 0 ? elbow.angle * arcs * elbow.acrossSide : 0);
+): SquareMeters => {
+  const { planeSide, acrossSide, angle, centerRadius } = elbow;
+  const radii = splitterRadii({ planeSide_m: planeSide, centerRadius_m: centerRadius }, splitterCount);
+  return squareMeters(angle * acrossSide * radii.reduce((sum, radius) => sum + radius, 0));
+};
+
+/** None where the throat has no radius: passages of one curve ratio cannot start there. */
+export function splitterRadii(
+  { planeSide_m, centerRadius_m }: { readonly planeSide_m: Meters; readonly centerRadius_m: Meters },
+  splitterCount: number,
+): readonly number[] {
+  const throat = centerRadius_m - planeSide_m / 2;
+  const heel = throat + planeSide_m;
+  if (throat <= 0) return [];
+  return Array.from({ length: splitterCount }, (_, i) => throat * (heel / throat) ** ((i + 1) / (splitterCount + 1)));
 }
 
 /** Center-line length of a square-throat elbow: its legs to the corner and on. W/2 tan(θ/2) + leg on each side. */

@@ -46,7 +46,8 @@ export function collarSurface(branch: Section, wall: MainWall, angle: Radians, l
   return squareMeters(around * toWall - aroundGirth(branch, (x) => rise(radius, x)) / sine);
 }
 
-const rise = (radius: number, x: number): number => Math.sqrt(Math.max(0, radius * radius - x * x));
+/** Height of a round main's wall over its center line, that far from its middle. */
+export const rise = (radius: number, x: number): number => Math.sqrt(Math.max(0, radius * radius - x * x));
 
 /** ∮ f(x) ds, x across the main's axis: the height of a branch that leaves sideways. */
 function aroundGirth(branch: Section, of: (x: number) => number): number {
@@ -70,23 +71,36 @@ function aroundGirth(branch: Section, of: (x: number) => number): number {
  * Source   geometry; on a flat wall the frustum π (r1 + r2) √(h² + (r1 − r2)²)
  */
 export function coneSurface(branch: Section, wall: MainWall, height: Meters, spread: Meters): SquareMeters {
-  const { radius: top } = stadiumOf(roundOf(branch));
-  const base = top + spread / 2;
+  const { top, base, k, end, trimmedAt } = coneProfile(branch, wall, height, spread);
   if (wall.radius === null) return squareMeters(Math.PI * (top + base) * Math.hypot(height, base - top));
-
-  const main = wall.radius;
-  const end = main + height;
-  const k = (base - top) / height;
   // From the trimmed edge at z0 to the end: ∫ (top + k (end − z)) dz.
   const stripe = (phi: number) => {
-    const depth = end - trimmedAt({ main, top, end, k, cosine: Math.cos(phi) });
+    const depth = end - trimmedAt(phi);
     return top * depth + (k * depth * depth) / 2;
   };
   return squareMeters(4 * Math.hypot(1, k) * integrate(stripe, 0, Math.PI / 2, 64));
 }
 
+/** The cone's wall by height over the main's center line, or over a flat wall: how wide it is, and where it begins. */
+export function coneProfile(branch: Section, wall: MainWall, height: Meters, spread: Meters) {
+  const { radius: top } = stadiumOf(roundOf(branch));
+  const base = top + spread / 2;
+  const k = (base - top) / height;
+  const main = wall.radius;
+  const end = (main ?? 0) + height;
+  return {
+    top,
+    base,
+    k,
+    end,
+    radiusAt: (z: number): number => top + k * (end - z),
+    /** At a turn around its axis, from across the main. */
+    trimmedAt: (phi: number): number => (main === null ? 0 : trimmed({ main, top, end, k, cosine: Math.cos(phi) })),
+  };
+}
+
 /** Where the cone's wall meets the main: (r(z) cos φ)² + z² = R². A cone wider than its main ends at the middle. */
-function trimmedAt(cone: { main: number; top: number; end: number; k: number; cosine: number }): number {
+function trimmed(cone: { main: number; top: number; end: number; k: number; cosine: number }): number {
   const { main, top, end, k, cosine } = cone;
   const square = cosine * cosine;
   const base = top + k * end;

@@ -1,8 +1,9 @@
-/** Surface of concentric changes of size and of shape: flats between straight edges, cones where an end is round. */
+/** Surface of changes of size and of shape: flats between straight edges, cones where an end is round. */
 import type { Section } from "../../air-system.ts";
 import { meters, squareMeters, type Meters, type Radians, type SquareMeters } from "../../quantity.ts";
 import { makingTable } from "../making.table.ts";
-import { coveredArea, innerWall, outerWall, stadiumOf, type Stadium } from "./girth.ts";
+import { CONCENTRIC, type Shift } from "../shift.ts";
+import { coveredArea, innerWall, outerWall, stadiumOf } from "./girth.ts";
 import { integrate } from "./integrate.ts";
 
 type Rectangle = Extract<Section, { shape: "rectangular" }>;
@@ -17,70 +18,70 @@ export function extent(section: Section): { readonly width: number; readonly hei
 }
 
 /** Long enough that no wall leans by more than half the total angle, and to handle. */
-export function transitionLength(from: Section, to: Section, totalAngle: Radians): Meters {
+export function transitionLength(from: Section, to: Section, totalAngle: Radians, shift: Shift = CONCENTRIC): Meters {
   const a = extent(from);
   const b = extent(to);
-  const change = Math.max(Math.abs(a.width - b.width), Math.abs(a.height - b.height));
-  return meters(Math.max(makingTable.transition.shortest, change / 2 / Math.tan(totalAngle / 2)));
+  const lean = Math.max(
+    Math.abs(a.width - b.width) / 2 + Math.abs(shift.x_m),
+    Math.abs(a.height - b.height) / 2 + Math.abs(shift.y_m),
+  );
+  return meters(Math.max(makingTable.transition.shortest, lean / Math.tan(totalAngle / 2)));
 }
 
 /**
- * Surface of a concentric transition between any two sections.
+ * Surface of a transition between any two sections, concentric or with its center moved.
+ *
+ * Between straight edges that are parallel a flat; between arcs that turn alike a single-curved wall, whose strips are as
+ * high as their tangents lie apart:
+ *
+ *     A = Σ (la + lb)/2 √(L² + g²) + Σ (ra + rb)/2 ∫ √(L² + g(t)²) dt,   g: how far the edge moves outward
  *
  * The inner wall of an annulus goes on as a cone of its own, or runs through and ends with a cap where the other end has
  * none.
  *
  * Source   geometry; checked against a fine mesh in checks/metal-fittings.check.test.ts
  */
-export function transitionSurface(from: Section, to: Section, length: Meters): SquareMeters {
-  const outer = wallBetween(outerWall(from), outerWall(to), length);
+export function transitionSurface(from: Section, to: Section, length: Meters, shift: Shift = CONCENTRIC): SquareMeters {
+  const outer = wallBetween(outerWall(from), outerWall(to), length, shift);
   const innerFrom = innerWall(from);
   const innerTo = innerWall(to);
-  if (innerFrom && innerTo) return squareMeters(outer + wallBetween(innerFrom, innerTo, length));
+  if (innerFrom && innerTo) return squareMeters(outer + wallBetween(innerFrom, innerTo, length, shift));
   const ending = innerFrom ?? innerTo;
   if (!ending) return squareMeters(outer);
   return squareMeters(outer + Math.PI * ending.diameter_m * length + coveredArea(ending));
 }
 
-function wallBetween(from: Rectangle | Rounded, to: Rectangle | Rounded, length: number): number {
-  if (from.shape === "rectangular") {
-    return to.shape === "rectangular"
-      ? betweenRectangles(from, to, length)
-      : rectangleToStadium(from, stadiumOf(to), length);
+/** Centers of the corner arcs, their radius, and where the walls stand. A rectangle's corner is an arc of no radius. */
+function cornersOf(wall: Rectangle | Rounded) {
+  if (wall.shape === "rectangular") return { x: wall.width_m / 2, y: wall.height_m / 2, radius: 0 };
+  const { radius, halfFlat } = stadiumOf(wall);
+  return { x: halfFlat, y: 0, radius };
+}
+
+function wallBetween(from: Rectangle | Rounded, to: Rectangle | Rounded, length: number, shift: Shift): number {
+  const a = cornersOf(from);
+  const b = cornersOf(to);
+  const widening = b.radius - a.radius;
+  let area = 0;
+  for (const side of SIDES) {
+    // Top and bottom run along the width, the others along the height.
+    area += (a.x + b.x) * Math.hypot(length, b.y - a.y + widening + side * shift.y_m);
+    area += (a.y + b.y) * Math.hypot(length, b.x - a.x + widening + side * shift.x_m);
   }
-  return to.shape === "rectangular"
-    ? rectangleToStadium(to, stadiumOf(from), length)
-    : betweenStadiums(stadiumOf(from), stadiumOf(to), length);
+  const meanRadius = (a.radius + b.radius) / 2;
+  if (meanRadius === 0) return area;
+  for (const sideX of SIDES) {
+    for (const sideY of SIDES) {
+      const along = b.x - a.x + sideX * shift.x_m;
+      const across = b.y - a.y + sideY * shift.y_m;
+      const slant = (t: number) => Math.hypot(length, widening + along * Math.cos(t) + across * Math.sin(t));
+      const corner = meanRadius * integrate(slant, 0, Math.PI / 2);
+      // Concentric, all four corners are alike.
+      if (shift.x_m === 0 && shift.y_m === 0) return area + 4 * corner;
+      area += corner;
+    }
+  }
+  return area;
 }
 
-/** Four trapezoids. */
-function betweenRectangles(from: Rectangle, to: Rectangle, length: number): number {
-  const topSlant = Math.hypot(length, (from.height_m - to.height_m) / 2);
-  const sideSlant = Math.hypot(length, (from.width_m - to.width_m) / 2);
-  return (from.width_m + to.width_m) * topSlant + (from.height_m + to.height_m) * sideSlant;
-}
-
-/** Two flats and two halves of a slanted cone; a round end has no flat. */
-function betweenStadiums(from: Stadium, to: Stadium, length: number): number {
-  const shift = to.halfFlat - from.halfFlat;
-  const widening = to.radius - from.radius;
-  const flats = 2 * (from.halfFlat + to.halfFlat) * Math.hypot(length, widening);
-  const slant = (t: number) => Math.hypot(length, widening + shift * Math.cos(t));
-  // Both halves, each twice from the flat to its middle.
-  const ends = 4 * ((from.radius + to.radius) / 2) * integrate(slant, 0, Math.PI / 2);
-  return flats + ends;
-}
-
-/** In each corner of the rectangle a quarter of a slanted cone with its tip there; between them flats. */
-function rectangleToStadium({ width_m, height_m }: Rectangle, end: Stadium, length: number): number {
-  const { radius, halfFlat } = end;
-
-  // The long sides run to the oval's flat, the short ones to the middle of its round end.
-  const longSides = (width_m + 2 * halfFlat) * Math.hypot(length, height_m / 2 - radius);
-  const shortSides = height_m * Math.hypot(length, width_m / 2 - halfFlat - radius);
-  const cornerAlong = width_m / 2 - halfFlat;
-  const cornerAcross = height_m / 2;
-  const fromTip = (t: number) => Math.hypot(length, radius - cornerAlong * Math.cos(t) - cornerAcross * Math.sin(t));
-  const corners = 4 * (radius / 2) * integrate(fromTip, 0, Math.PI / 2);
-  return longSides + shortSides + corners;
-}
+const SIDES = [1, -1] as const;
