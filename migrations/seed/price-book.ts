@@ -18,6 +18,16 @@ const METAL: readonly Row[] = [
   ["sealant", "Duct sealant, water base", "gal", 31.5],
   ["hanger", "Hanger, strap and rod set", "ea", 9.4],
   ["liner", "Duct liner, 1 in.", "ft2", 1.18, 19],
+  ["gasket", "Flange gasket, butyl", "ft", 0.19],
+  ["flange-corner", "Flange corner", "ea", 0.42],
+  ["flange-cleat", "Flange cleat", "ea", 0.31],
+  ["slip-strip", "Slip, 24 ga", "ft", 0.38],
+  ["standing-slip-strip", "Standing slip, 22 ga", "ft", 0.66],
+  ["drive-strip", "Drive, 24 ga", "ft", 0.36],
+  ["coupling", "Slip coupling, round", "ea", 6.2],
+  ["liner-pin", "Liner pin, welded", "ea", 0.09],
+  ["liner-adhesive", "Liner adhesive", "gal", 27.4],
+  ["vapor-tape", "Vapor barrier tape", "ft", 0.21],
 ];
 
 const SUBCONTRACTS: readonly Row[] = [["wrap", "Insulation wrap, 1 1/2 in., in place", "ft2", 3.85, 19]];

@@ -7,9 +7,10 @@ import { signIn } from "./member.ts";
 import { roundTripFigures } from "./round-trips.ts";
 import { secondStartFigures } from "./second-start.ts";
 import { solveFigures } from "./solve.ts";
+import { takeoffFigures } from "./takeoff.ts";
 
 // Alone first: nothing else may use the processor while it is timed.
-const figures: Figure[] = [...solveFigures()];
+const figures: Figure[] = [...solveFigures(), ...takeoffFigures()];
 
 // Outside production the API says how often it went to the database.
 const stack = await startWholeStack({ folder: throwawayFolder(), throwaway: true, env: { NODE_ENV: "test" } });

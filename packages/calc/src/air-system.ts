@@ -50,6 +50,19 @@ export type RoundBranch = (typeof ROUND_BRANCHES)[number];
 export const TRANSITION_ALIGNMENTS = ["centered", "flat-bottom", "flat-top"] as const;
 export type TransitionAlignment = (typeof TRANSITION_ALIGNMENTS)[number];
 
+export const BOUGHT_KINDS = ["round-duct", "round-fittings", "oval-duct", "oval-fittings"] as const;
+export type BoughtKind = (typeof BOUGHT_KINDS)[number];
+export const SUPPLIES = ["made", "bought"] as const;
+export type Supply = (typeof SUPPLIES)[number];
+
+export const ALLOWANCES_OF = ["offsets", "hangers", "sealant", "joints", "waste"] as const;
+export type AllowanceOf = (typeof ALLOWANCES_OF)[number];
+/** A share of the straight duct for offsets, of all metal for the rest: 0.05 is 5 %. */
+export interface Allowance {
+  readonly of: AllowanceOf;
+  readonly share: number;
+}
+
 /** What a company writes once and reuses: how duct of a system is built. */
 export interface ConstructionSpec {
   readonly material: Material;
@@ -84,6 +97,12 @@ export interface ConstructionSpec {
   readonly transitionAlignment?: TransitionAlignment | undefined;
   /** How far flexible duct is left slack: 0 is pulled tight, 0.3 is 30 % too long. Adds loss. */
   readonly flexibleSlack: number;
+  /** What is bought by size and not made; where it is not said, all sheet metal is made. */
+  readonly bought?: readonly BoughtKind[] | undefined;
+  /** What plans do not show, carried as a share of the metal. */
+  readonly allowances?: readonly Allowance[] | undefined;
+  /** Wrap is faced and its seams are taped. */
+  readonly vaporBarrier?: boolean | undefined;
   /** Sheet that the job asks for whatever a schedule says, such as "24 ga"; null or absent: the schedule's. */
   readonly gauge?: string | null | undefined;
   /** Joints, seams and section lengths of rectangular duct are the gauge schedule's where it names them. */
@@ -226,6 +245,8 @@ export interface AirSegment {
   readonly mouth?: MouthType | null | undefined;
   /** Null: the spec's. */
   readonly insulation: Insulation | null;
+  /** Made or bought, whatever the spec says; null or absent: the spec's. */
+  readonly supply?: Supply | null | undefined;
   /** Sheet set for this duct by hand, such as "20 ga"; null or absent: the spec's, then the schedule's. */
   readonly gauge?: string | null | undefined;
 }

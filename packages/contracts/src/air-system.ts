@@ -2,6 +2,8 @@
 import {
   ACCESSORY_KINDS,
   AIR_SYSTEM_SCHEMA,
+  ALLOWANCES_OF,
+  BOUGHT_KINDS,
   DUCT_CLASSES,
   FITTING_TYPES,
   MATERIALS,
@@ -13,6 +15,7 @@ import {
   ROUND_ELBOWS,
   SEAL_CLASSES,
   SERVICES,
+  SUPPLIES,
   TRANSITION_ALIGNMENTS,
   SPLITTER_COUNTS,
   type AirNode,
@@ -87,6 +90,12 @@ export const constructionSpecSchema: z.ZodType<ConstructionSpec, ConstructionSpe
   transitionAngle_rad: z.number().positive().max(Math.PI),
   transitionAlignment: z.enum(TRANSITION_ALIGNMENTS).optional(),
   flexibleSlack: z.number().min(0).max(0.5),
+  bought: z.array(z.enum(BOUGHT_KINDS)).max(BOUGHT_KINDS.length).optional(),
+  allowances: z
+    .array(z.strictObject({ of: z.enum(ALLOWANCES_OF), share: z.number().min(0).max(1) }))
+    .max(ALLOWANCES_OF.length)
+    .optional(),
+  vaporBarrier: z.boolean().optional(),
   gauge: sheetLabel.nullable().optional(),
   constructionFromSchedule: z.boolean().optional(),
 });
@@ -168,6 +177,7 @@ const airSegmentSchema: z.ZodType<AirSegment, AirSegment> = z.strictObject({
   damperAngle_rad: damperAngleSchema,
   mouth: mouthSchema,
   insulation: insulationSchema.nullable(),
+  supply: z.enum(SUPPLIES).nullable().optional(),
   gauge: sheetLabel.nullable().optional(),
 });
 

@@ -35,12 +35,12 @@ export const fieldPiece = z.object({
 export type FieldPiece = z.infer<typeof fieldPiece>;
 
 export const fieldItem = z.object({
-  kind: z.enum(["hanger", "sealant", "accessory", "device"]),
+  kind: z.enum(["hanger", "sealant", "hardware", "accessory", "device"]),
   description: z.string(),
   systemId: z.string(),
   levelId: z.string(),
   quantity: z.number(),
-  unit: z.enum(["ea", "L"]),
+  unit: z.enum(["ea", "L", "m"]),
 });
 
 export const fieldTakeoffResponse = z.object({

@@ -1,5 +1,5 @@
 /** The layout document on the wire: flat records by id, and the changes that edit them. */
-import { ACCESSORY_KINDS, DUCT_CLASSES, FITTING_TYPES, NODE_ROLES, SERVICES } from "@cleatwork/calc";
+import { ACCESSORY_KINDS, DUCT_CLASSES, FITTING_TYPES, NODE_ROLES, SERVICES, SUPPLIES } from "@cleatwork/calc";
 import { z } from "zod";
 import {
   damperAngleSchema,
@@ -87,6 +87,8 @@ export const segmentRecordSchema = z.strictObject({
   damperAngle_rad: damperAngleSchema,
   mouth: mouthSchema,
   insulation: insulationSchema.nullable(),
+  /** Made or bought, whatever the spec says. */
+  supply: z.enum(SUPPLIES).nullable().optional(),
   /** Sheet set for this duct, whatever the schedules say. */
   gauge: sheetLabel.nullable().optional(),
 });

@@ -1,5 +1,6 @@
 /** From a project's documents to its numbers: air, takeoff, estimate. The browser's worker and the server run this. */
 import {
+  createTakeoff,
   price,
   solve,
   standardsOf,
@@ -41,7 +42,20 @@ export interface Numbers {
   readonly problems: readonly SystemProblem[];
 }
 
-export function computeNumbers(documents: PricingDocuments): Numbers {
+export const computeNumbers = (documents: PricingDocuments): Numbers => numbersOf(documents, () => takeOff);
+
+/** The same, remembering each system's takeoff, so that after an edit only the pieces that it touches are made anew. */
+export function createNumbers(): typeof computeNumbers {
+  const remembered = new Map<string, typeof takeOff>();
+  return (documents) =>
+    numbersOf(documents, (systemId) => {
+      let taking = remembered.get(systemId);
+      if (!taking) remembered.set(systemId, (taking = createTakeoff()));
+      return taking;
+    });
+}
+
+function numbersOf(documents: PricingDocuments, taking: (systemId: string) => typeof takeOff): Numbers {
   const { settings, pricing } = documents;
   const layout = createLayout(documents.records);
   const systems = airSystemsFrom(layout, {
@@ -61,7 +75,7 @@ export function computeNumbers(documents: PricingDocuments): Numbers {
       continue;
     }
     solutions.push(solved.value);
-    takeoffs.push(takeOff({ system, standards }, solved.value));
+    takeoffs.push(taking(system.id)({ system, standards }, solved.value));
   }
 
   const estimate =

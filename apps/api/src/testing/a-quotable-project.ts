@@ -39,11 +39,18 @@ export async function aQuotableProject(company: TestCompany) {
   return { project, params, drawn, seen };
 }
 
+/** What the takeoff measures it by. */
+export const unitOf = (key: string): PriceItem["unit"] => {
+  if (key.startsWith("metal")) return "kg";
+  if (key === "sealant" || key === "liner-adhesive") return "L";
+  return /strip$|^gasket$|-tape$/.test(key) ? "m" : "ea";
+};
+
 const aPrice = (key: string): PriceItem => ({
   key,
   description: key,
   group: "metal",
-  unit: key.startsWith("metal") ? "kg" : key === "sealant" ? "L" : "ea",
+  unit: unitOf(key),
   unitPrice_micro: 1_000_000,
   supplier: "Prairie Coil (invented)",
   effectiveOn: "2026-11-20",

@@ -1,5 +1,8 @@
 /** What a takeoff asks of the price book: one entry for each price, with its quantity by system. */
+import { METERS_PER_INCH } from "../quantity.ts";
 import { sizeKey } from "../takeoff/count-items.ts";
+import { longestSide } from "../takeoff/gauge.ts";
+import { insulationKey, insulationWords } from "../takeoff/insulation.ts";
 import type { CountedItem, Piece, Takeoff } from "../takeoff/takeoff.ts";
 import type { LineGroup } from "./estimate.ts";
 import type { Dimension } from "./units.ts";
@@ -14,6 +17,8 @@ export interface Measure {
 
 export interface Demand {
   readonly key: string;
+  /** Key of the price that holds for it. */
+  readonly priceKey: string;
   /** What it is called until a price names it. */
   readonly description: string;
   readonly group: LineGroup;
@@ -25,6 +30,10 @@ export interface Demand {
 
 interface Ask {
   readonly key: string;
+  /** Its line is its own, its price another's: an allowance of sheet is priced as that sheet. */
+  readonly pricedAs?: string;
+  /** Goes up to the next band that the book has: "spiral:to 12" for 11 in. */
+  readonly band?: { readonly base: string; readonly size_in: number };
   readonly description: string;
   readonly group: LineGroup;
   readonly isMetal: boolean;
@@ -56,11 +65,18 @@ interface OpenDemand extends Demand {
 
 function collect(byKey: Map<string, OpenDemand>, ask: Ask, isInBook: (key: string) => boolean): void {
   const { systemId, amounts } = ask;
-  const key = keyInBook(ask.key, isInBook);
+  const key = ask.band ? bandInBook(ask.key, ask.band, isInBook) : keyInBook(ask.key, isInBook);
   let open = byKey.get(key);
   if (!open) {
     const measures = amounts.map(({ dimension }) => ({ dimension, bySystem: new Map<string, number>(), net: 0 }));
-    open = { key, description: ask.description, group: ask.group, isMetal: ask.isMetal, measures };
+    open = {
+      key,
+      priceKey: ask.pricedAs ?? key,
+      description: ask.description,
+      group: ask.group,
+      isMetal: ask.isMetal,
+      measures,
+    };
     byKey.set(key, open);
   }
   for (const { dimension, amount, net } of amounts) {
@@ -71,10 +87,26 @@ function collect(byKey: Map<string, OpenDemand>, ask: Ask, isInBook: (key: strin
   }
 }
 
-/** Metal and flexible duct go by their full key; only what is counted falls back. */
+/** The size itself, or the smallest band over it; without either the size is asked for. */
+function bandInBook(
+  key: string,
+  { base, size_in }: NonNullable<Ask["band"]>,
+  isInBook: (key: string) => boolean,
+): string {
+  if (isInBook(key)) return key;
+  for (let to = Math.ceil(size_in - 1e-6); to <= WIDEST_BAND_IN; to++) {
+    const band = `${base}:to ${to}`;
+    if (isInBook(band)) return band;
+  }
+  return key;
+}
+
+const WIDEST_BAND_IN = 120;
+
+/** Metal goes by its full key; only what is counted falls back. */
 function keyInBook(key: string, isInBook: (key: string) => boolean): string {
   const colon = key.indexOf(":");
-  if (colon < 0 || key.startsWith("metal:") || key.startsWith("flexible:") || isInBook(key)) return key;
+  if (colon < 0 || key.startsWith("metal:") || key.startsWith("allowance:") || isInBook(key)) return key;
   return key.slice(0, colon);
 }
 
@@ -84,9 +116,11 @@ function askForPiece(piece: Piece, ask: (one: Ask) => void): void {
     const size = sizeKey(piece.section);
     const amounts = [{ dimension: "length", amount: piece.length_m, net: piece.length_m }] as const;
     const description = `Flexible duct, ${size} in.`;
-    ask({ key: `flexible:${size}`, description, group: "devices", isMetal: false, systemId, amounts });
+    const band = { base: "flexible", size_in: longestSide(piece.section) / METERS_PER_INCH };
+    ask({ key: `flexible:${size}`, band, description, group: "devices", isMetal: false, systemId, amounts });
     return;
   }
+  if (piece.supply === "bought") return askForBought(piece, ask);
   // Without a gauge there is nothing to price; the takeoff's own finding stops the quote.
   if (piece.gauge === null) return;
   const blankShare = piece.netArea_m2 > 0 ? piece.blankArea_m2 / piece.netArea_m2 : 1;
@@ -103,8 +137,32 @@ function askForPiece(piece: Piece, ask: (one: Ask) => void): void {
   });
 }
 
+/** Duct by its length, fittings each; under the size of their larger end. "spiral:14", "elbow-gored-90:14". */
+function askForBought(piece: Piece, ask: (one: Ask) => void): void {
+  const { systemId, section, otherSection, fitting, angle_rad } = piece;
+  const size = sizeKey(section);
+  const other = otherSection === null || sizeKey(otherSection) === size ? "" : ` to ${sizeKey(otherSection)}`;
+  const ends = otherSection === null ? [section] : [section, otherSection];
+  const size_in = Math.max(...ends.map((end) => longestSide(end) / METERS_PER_INCH));
+  const turn = piece.kind === "elbow" ? `-${Math.round((angle_rad * 180) / Math.PI)}` : "";
+  const duct = piece.seam === "spiral" ? "spiral" : "pipe";
+  const base = `${fitting === null ? (section.shape === "flat-oval" ? `oval-${duct}` : duct) : fitting}${turn}`;
+  const dimension = fitting === null ? "length" : "count";
+  const amount = fitting === null ? piece.length_m : 1;
+  ask({
+    key: `${base}:${size}${other}`,
+    band: { base, size_in },
+    description: `Bought: ${base.replaceAll("-", " ")}, ${size}${other} in.`,
+    group: "metal",
+    isMetal: false,
+    systemId,
+    amounts: [{ dimension, amount, net: amount }],
+  });
+}
+
 function askForInsulation(piece: Piece, ask: (one: Ask) => void): void {
-  const { systemId, insulationArea_m2: wrap, linerArea_m2: liner } = piece;
+  const { systemId, insulation, insulationArea_m2: wrap, linerArea_m2: liner } = piece;
+  if (insulation.kind === "none") return;
   const of = (key: string, description: string, area: number): Ask => ({
     key,
     description,
@@ -113,22 +171,32 @@ function askForInsulation(piece: Piece, ask: (one: Ask) => void): void {
     systemId,
     amounts: [{ dimension: "area", amount: area, net: area }],
   });
-  if (wrap > 0) ask(of("wrap", "Insulation wrap", wrap));
-  if (liner > 0) ask(of("liner", "Duct liner", liner));
+  const area = insulation.kind === "wrap" ? wrap : liner;
+  if (area > 0) ask(of(insulationKey(insulation), insulationWords(insulation), area));
 }
 
 const ITEM_GROUPS: Readonly<Record<CountedItem["kind"], LineGroup>> = {
   hanger: "metal",
   sealant: "metal",
+  hardware: "metal",
+  allowance: "metal",
   accessory: "accessories",
   device: "devices",
 };
 
+const DIMENSIONS: Readonly<Record<CountedItem["unit"], Dimension>> = {
+  ea: "count",
+  L: "volume",
+  m: "length",
+  kg: "mass",
+};
+
 const askForItem = ({ key, kind, description, systemId, quantity, unit }: CountedItem): Ask => ({
   key,
+  ...(kind === "allowance" ? { pricedAs: key.slice(key.indexOf(":metal:") + 1) } : {}),
   description,
   group: ITEM_GROUPS[kind],
   isMetal: false,
   systemId,
-  amounts: [{ dimension: unit === "L" ? "volume" : "count", amount: quantity, net: quantity }],
+  amounts: [{ dimension: DIMENSIONS[unit], amount: quantity, net: quantity }],
 });

@@ -86,7 +86,7 @@ export interface EstimateLine {
 }
 
 export interface EstimateWarning {
-  readonly code: "price-missing" | "price-stale" | "hours-zero" | "margin-under-floor";
+  readonly code: "price-missing" | "price-stale" | "hours-zero" | "carried-twice" | "margin-under-floor";
   readonly severity: "stop" | "warn";
   readonly key: string;
   readonly message: string;

@@ -27,7 +27,7 @@ export function takeoffLines(takeoffs: readonly Takeoff[], basis: PricingBasis):
   const book = indexPrices(basis.items, basis.pricedOn);
   const warnings: EstimateWarning[] = [];
   const lines = demandsOf(takeoffs, (key) => book.find(key) !== null).map((demand) => {
-    const item = book.find(demand.key);
+    const item = book.find(demand.priceKey);
     const measure = item && demand.measures.find(({ dimension }) => dimension === dimensionOf(item.unit));
     if (!item || !measure) {
       warnings.push(missing(demand, item));
@@ -40,7 +40,7 @@ export function takeoffLines(takeoffs: readonly Takeoff[], basis: PricingBasis):
   return { lines, warnings };
 }
 
-const missing = ({ key, description, measures }: Demand, item: PriceItem | null): EstimateWarning => ({
+const missing = ({ priceKey: key, description, measures }: Demand, item: PriceItem | null): EstimateWarning => ({
   code: "price-missing",
   severity: "stop",
   key,
@@ -84,7 +84,7 @@ function priced(demand: Demand, measure: Measure, item: PriceItem, age: number, 
     line: {
       key: demand.key,
       group: item.group,
-      description: item.description,
+      description: demand.key === demand.priceKey ? item.description : demand.description,
       quantity,
       unit: item.unit,
       unitPrice_micro: item.unitPrice_micro,
@@ -168,6 +168,8 @@ export function laborLines(takeoffs: readonly Takeoff[], { labor }: PricingBasis
 const ITEM_HOURS: Readonly<Record<CountedItem["kind"], string>> = {
   hanger: "hangers",
   sealant: "sealing",
+  hardware: "hardware",
+  allowance: "allowances",
   accessory: "dampers, doors, connectors",
   device: "devices",
 };
@@ -182,7 +184,7 @@ function hourTerms(takeoffs: readonly Takeoff[], key: LaborRate["key"]): Estimat
         piece.kind === "flexible" ? "flexible duct" : piece.kind === "straight" ? "straight duct" : "fittings";
       add(label, key === "shop" ? piece.shopHours_h : piece.fieldHours_h);
     }
-    if (key === "field") for (const item of items) add(ITEM_HOURS[item.kind], item.fieldHours_h);
+    for (const item of items) add(ITEM_HOURS[item.kind], key === "field" ? item.fieldHours_h : (item.shopHours_h ?? 0));
   }
   return [...sums].filter(([, worked]) => worked > 0).map(([label, value]) => ({ label, value, unit: "h" }));
 }

@@ -40,6 +40,9 @@ const basis: PricingBasis = {
     item("metal:galvanized:28 ga", "lb", 1.16),
     item("hanger", "ea", 9.4),
     item("sealant", "gal", 31.5),
+    item("slip-strip", "ft", 0.38),
+    item("drive-strip", "ft", 0.36),
+    item("coupling", "ea", 6.2),
     item("wrap", "ft2", 3.85, { group: "subcontracts", taxable: false }),
     item("flexible:10", "ft", 4.1, { group: "devices" }),
     item("volume-damper", "ea", 41.5, { group: "accessories" }),
@@ -290,6 +293,13 @@ describe("warnings", () => {
   it("stops on a price in a unit that does not measure the thing", () => {
     const items = basis.items.map((each) => (each.key === "sealant" ? { ...each, unit: "ea" as const } : each));
     expect(codes(price([job()], { ...basis, items }))).toEqual([["price-missing", "stop", "sealant"]]);
+  });
+
+  it("warns of waste that is carried by the spec and added here", () => {
+    const carried = takeoffOf(aRun(rectangular(24, 12), 40, { allowances: [{ of: "waste", share: 0.1 }] }));
+    expect(codes(price([carried], basis))).toContainEqual(["carried-twice", "warn", "waste"]);
+    const rates = { ...basis.rates, wasteOnMetal_bp: 0 };
+    expect(codes(price([carried], { ...basis, rates }))).toEqual([]);
   });
 
   it("stops on labor without a rate", () => {

@@ -41,7 +41,12 @@ export function price(takeoffs: readonly Takeoff[], basis: PricingBasis): Estima
     price_minor: total,
     margin_bp: margin,
     bySystem: splitBySystem(takeoffs, weighted, total),
-    warnings: [...metal.warnings, ...labor.warnings, ...marginWarning(margin, total, basis)],
+    warnings: [
+      ...metal.warnings,
+      ...labor.warnings,
+      ...wasteWarning(takeoffs, basis),
+      ...marginWarning(margin, total, basis),
+    ],
   };
 }
 
@@ -49,6 +54,14 @@ export function amountOf(steps: readonly Step[], name: StepName): number {
   const step = steps.find((each) => each.step === name);
   if (!step) throw new Error(`no step "${name}"`);
   return step.amount_minor;
+}
+
+/** Waste that a spec carries as an allowance and the price adds as a percentage is paid for twice. */
+function wasteWarning(takeoffs: readonly Takeoff[], { rates }: PricingBasis): EstimateWarning[] {
+  const isCarried = takeoffs.some(({ items }) => items.some(({ key }) => key.startsWith("allowance:waste:")));
+  if (!isCarried || rates.wasteOnMetal_bp === 0) return [];
+  const message = `Waste on metal is added here, ${(rates.wasteOnMetal_bp / 100).toFixed(1)} %, and carried as an allowance of the spec too; take one of them out`;
+  return [{ code: "carried-twice", severity: "warn", key: "waste", message }];
 }
 
 function marginWarning(margin: number, total: number, { marginFloor_bp }: PricingBasis): EstimateWarning[] {

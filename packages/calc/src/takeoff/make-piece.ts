@@ -1,5 +1,5 @@
 /** From a length or a surface to a piece: gauge, joints, areas, weight, hours, each with its arithmetic. */
-import type { ConstructionSpec, Insulation, Section, SheetReference } from "../air-system.ts";
+import type { ConstructionSpec, Insulation, Section, SheetReference, Supply } from "../air-system.ts";
 import { outerPerimeter } from "../geometry/section.ts";
 import { hours, kilograms, meters, squareMeters, type Meters, type SquareMeters } from "../quantity.ts";
 import {
@@ -36,6 +36,8 @@ export interface PieceOrigin {
   readonly readHours: ReturnType<typeof hoursReader>;
   /** The sheet that the layout sets for this duct, whatever the schedules say. */
   readonly gaugeOverride: string | null;
+  /** Made or bought, as the layout sets it for this duct. */
+  readonly supply: Supply | null;
   readonly insulation: Insulation;
 }
 
@@ -111,6 +113,7 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
   // A label that no sheet of the metal answers to is as good as none: no weight is made up for it.
   const { gauge, sheet } = answer;
 
+  const supply = origin.supply ?? supplyOf(section, part, spec);
   const blank = blankOf(metal.body, { netArea, length: metal.length, spec, edges });
   const blankArea = blank.area;
   const weight = kilograms(netArea * (sheet?.weight_kg_m2 ?? 0));
@@ -120,7 +123,8 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     material: spec.material,
     size_m: longestSide(metal.gaugeSection),
   };
-  const shopRow = sheet ? origin.readHours({ place: "shop", ...work }) : null;
+  // What is bought takes no hours in the shop.
+  const shopRow = sheet && supply === "made" ? origin.readHours({ place: "shop", ...work }) : null;
   const fieldRow = sheet ? origin.readHours({ place: "field", ...work }) : null;
   const measure = { weight, length: metal.length };
   const shopHours = hoursOf(shopRow, measure, productivity.conditionFactor);
@@ -166,6 +170,8 @@ function metalPiece(origin: PieceOrigin, metal: Metal): Piece {
     length_m: metal.length,
     body: metal.body,
     material: spec.material,
+    supply,
+    insulation,
     gauge,
     sheetThickness_m: sheet?.thickness_m ?? null,
     gaugeSource: gaugeSource(answer),
@@ -207,6 +213,8 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   length_m: piece.length_m,
   body: piece.body,
   material: piece.material,
+  supply: piece.supply,
+  insulation: piece.insulation,
   gauge: piece.gauge,
   sheetThickness_m: piece.sheetThickness_m,
   gaugeSource: piece.gaugeSource,
@@ -228,6 +236,15 @@ export const marked = (piece: Piece, mark: string): Piece => ({
   fieldHours_h: piece.fieldHours_h,
   arithmetic: piece.arithmetic,
 });
+
+const NOT_INSULATED: Insulation = { kind: "none" };
+
+/** Rectangular duct is made; of round and oval the spec says what is bought. */
+function supplyOf(section: Section, part: "straight" | "fitting", { bought }: ConstructionSpec): Supply {
+  if (!bought || section.shape === "rectangular") return "made";
+  const shape = section.shape === "flat-oval" ? "oval" : "round";
+  return bought.includes(`${shape}-${part === "straight" ? "duct" : "fittings"}`) ? "bought" : "made";
+}
 
 /** What the air sees: inside of the liner. */
 const clearOf = (section: Section, insulation: Insulation): Section =>
@@ -295,6 +312,8 @@ export function flexiblePiece(origin: PieceOrigin, mark: string, section: Sectio
     length_m: length,
     body: { kind: "straight", section, length_m: length },
     material: "flexible",
+    supply: "bought",
+    insulation: NOT_INSULATED,
     gauge: null,
     sheetThickness_m: null,
     gaugeSource: "",

@@ -20,7 +20,7 @@ export function missingHours(pieces: readonly Piece[]): {
       .filter((piece) => wanted(piece) && !piece.arithmetic.some((line) => line.quantity === quantity))
       .map(({ mark }) => mark);
   return {
-    shop_h: without("shop-hours", ({ gauge }) => gauge !== null),
+    shop_h: without("shop-hours", ({ gauge, supply }) => gauge !== null && supply === "made"),
     field_h: without("field-hours", ({ kind, gauge }) => kind === "flexible" || gauge !== null),
   };
 }

@@ -3,6 +3,8 @@ import type { Section } from "../air-system.ts";
 import { isElbow } from "../fittings/infer.ts";
 import type { Solution } from "../network/solution.ts";
 import { KILOGRAMS_PER_POUND, meters, type Meters } from "../quantity.ts";
+import { checkAllowances, countAllowances } from "./allowances.ts";
+import { countHardware } from "./count-hardware.ts";
 import { countAccessories, countDevices, countHangers, countSealant, levelOf, sheetOf } from "./count-items.ts";
 import { cutStraight } from "./cut-straight.ts";
 import { frameOf, type Frame } from "./frame.ts";
@@ -13,6 +15,7 @@ import { NO_OVERRIDES, pieceQuestion, straightConstruction } from "./gauge.ts";
 import { fittingMark, straightMark } from "./marks.ts";
 import type { FittingPlans } from "./fitting-plan.ts";
 import { planFittings } from "./plan-fittings.ts";
+import { inputsOf, isForSame, isSame, systemKey, type TakeoffMemory } from "./remember.ts";
 import { totalsOf } from "./totals.ts";
 import type { CountedItem, Piece, Takeoff, TakeoffFinding, TakeoffInput } from "./takeoff.ts";
 
@@ -28,7 +31,32 @@ import type { CountedItem, Piece, Takeoff, TakeoffFinding, TakeoffInput } from "
  *
  * Range    cost is linear in pieces
  */
-export function takeOff({ system, standards }: TakeoffInput, solution: Solution): Takeoff {
+export const takeOff = (input: TakeoffInput, solution: Solution): Takeoff => run(input, solution, null);
+
+/**
+ * A takeoff that remembers: taken again after an edit, it makes anew only the pieces of segments whose own inputs changed,
+ * and answers the very records of before for the rest. The same answer as `takeOff`, always.
+ */
+export function createTakeoff(): typeof takeOff {
+  let memory: TakeoffMemory | null = null;
+  return (input, solution) => {
+    const before = memory && isForSame(memory, input) ? memory : null;
+    memory = { spec: input.system.spec, standards: input.standards, systemKey: systemKey(input), parts: new Map() };
+    return run(input, solution, { before, now: memory });
+  };
+}
+
+interface SegmentParts {
+  readonly pieces: readonly Piece[];
+  readonly items: readonly CountedItem[];
+  readonly findings: readonly TakeoffFinding[];
+}
+
+function run(
+  { system, standards }: TakeoffInput,
+  solution: Solution,
+  memories: { readonly before: TakeoffMemory | null; readonly now: TakeoffMemory } | null,
+): Takeoff {
   const frame = frameOf(system, solution, standards);
   const plans = planFittings(frame);
   const pieces: Piece[] = [];
@@ -36,18 +64,40 @@ export function takeOff({ system, standards }: TakeoffInput, solution: Solution)
   const findings: TakeoffFinding[] = [];
 
   for (let s = 0; s < system.segments.length; s++) {
-    const own = piecesOf(frame, plans, s, findings);
-    for (const piece of own) pieces.push(piece);
-    const sealant = countSealant(frame, s, own);
-    if (sealant) items.push(sealant);
-    for (const item of countAccessories(frame, s)) items.push(item);
-    checkSegment(frame, s, own, findings);
+    const { id } = system.segments[s]!;
+    let parts: SegmentParts;
+    if (memories) {
+      const inputs = inputsOf(frame, plans, s);
+      const kept = memories.before?.parts.get(id);
+      parts = kept && isSame(kept.inputs, inputs) ? kept.parts : partsOf(frame, plans, s);
+      memories.now.parts.set(id, { inputs, parts });
+    } else {
+      parts = partsOf(frame, plans, s);
+    }
+    for (const piece of parts.pieces) pieces.push(piece);
+    for (const item of parts.items) items.push(item);
+    for (const finding of parts.findings) findings.push(finding);
   }
 
   const madeElbows = plans.of.map((list) => list.filter(({ type }) => isElbow(type)).length);
   checkJoints(frame, pieces, findings);
-  items.push(...countHangers(frame, madeElbows), ...countDevices(frame));
+  for (const item of countHangers(frame, madeElbows)) items.push(item);
+  for (const item of countDevices(frame)) items.push(item);
+  for (const item of countAllowances(frame, pieces)) items.push(item);
+  checkAllowances(frame, { pieces, items }, findings);
   return { systemId: system.id, pieces, items, totals: totalsOf(pieces, items), findings };
+}
+
+function partsOf(frame: Frame, plans: FittingPlans, s: number): SegmentParts {
+  const findings: TakeoffFinding[] = [];
+  const pieces = piecesOf(frame, plans, s, findings);
+  const items: CountedItem[] = [];
+  const sealant = countSealant(frame, s, pieces);
+  if (sealant) items.push(sealant);
+  for (const item of countHardware(frame, s, pieces, frame.insulation[s]!)) items.push(item);
+  for (const item of countAccessories(frame, s)) items.push(item);
+  checkSegment(frame, s, pieces, findings);
+  return { pieces, items, findings };
 }
 
 function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: TakeoffFinding[]): Piece[] {
@@ -68,6 +118,7 @@ function piecesOf(frame: Frame, plans: FittingPlans, s: number, findings: Takeof
     readGauge: frame.readGauge,
     readHours: frame.readHours,
     gaugeOverride: segment.gauge ?? null,
+    supply: segment.supply ?? null,
     insulation: segment.flexible ? { kind: "none" } : frame.insulation[s]!,
   };
 

@@ -1,5 +1,5 @@
 /** What `takeOff` answers: pieces with their arithmetic, and the quantities that are not pieces. Plain JSON. */
-import type { AirSystem, FittingType, Material, Section, SheetReference } from "../air-system.ts";
+import type { AirSystem, FittingType, Insulation, Material, Section, SheetReference, Supply } from "../air-system.ts";
 import type { Body } from "./body.ts";
 import type { EdgeTable } from "./edges.table.ts";
 import type { GaugeDecider } from "./gauge.ts";
@@ -45,6 +45,10 @@ export interface Piece {
   /** Its form, from which `patternsOf` lays its walls flat. */
   readonly body: Body;
   readonly material: Material | "flexible";
+  /** Made by the shop, or bought by its size from the price book. Flexible duct is always bought. */
+  readonly supply: Supply;
+  /** What the insulation is; its areas are 0 where there is none. */
+  readonly insulation: Insulation;
   /** "24 ga" as the schedule says; null for flexible duct. */
   readonly gauge: string | null;
   readonly sheetThickness_m: Meters | null;
@@ -77,7 +81,7 @@ export interface Piece {
 export interface CountedItem {
   /** Price book key, such as "hanger-strap", "sealant", "volume-damper", or a device key. */
   readonly key: string;
-  readonly kind: "hanger" | "sealant" | "accessory" | "device";
+  readonly kind: "hanger" | "sealant" | "hardware" | "accessory" | "device" | "allowance";
   readonly description: string;
   readonly systemId: string;
   readonly levelId: string;
@@ -85,7 +89,9 @@ export interface CountedItem {
   readonly nodeId: string | null;
   readonly section: Section | null;
   readonly quantity: number;
-  readonly unit: "ea" | "L";
+  readonly unit: "ea" | "L" | "m" | "kg";
+  /** Absent where it is none. */
+  readonly shopHours_h?: Hours;
   readonly fieldHours_h: Hours;
   readonly basis: string;
 }
@@ -97,6 +103,7 @@ export interface TakeoffFinding {
     | "gauge-lighter-than-schedule"
     | "joint-below-reinforcement"
     | "hours-not-in-table"
+    | "carried-and-counted"
     | "accessory-needs-review"
     | "piece-too-heavy"
     | "fittings-fill-segment";

@@ -21,7 +21,10 @@ export function totalsOf(pieces: readonly Piece[], items: readonly CountedItem[]
     shopHours += piece.shopHours_h;
     fieldHours += piece.fieldHours_h;
   }
-  for (const item of items) fieldHours += item.fieldHours_h;
+  for (const item of items) {
+    fieldHours += item.fieldHours_h;
+    shopHours += item.shopHours_h ?? 0;
+  }
   return {
     pieceCount: pieces.length,
     netWeight_kg: kilograms(netWeight),

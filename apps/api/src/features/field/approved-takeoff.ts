@@ -30,15 +30,11 @@ export function approvedDocument(sold: Sold, snapshotHash: string): ApprovedDocu
       insulation: spec.insulation,
     })),
     pieces: sold.takeoffs.flatMap(({ pieces }) => pieces.map(fieldPiece)),
+    // An allowance is a share of money and hours, not a thing that a crew could look for.
     items: sold.takeoffs.flatMap(({ items }) =>
-      items.map(({ kind, description, systemId, levelId, quantity, unit }) => ({
-        kind,
-        description,
-        systemId,
-        levelId,
-        quantity,
-        unit,
-      })),
+      items.flatMap(({ kind, description, systemId, levelId, quantity, unit }) =>
+        kind === "allowance" || unit === "kg" ? [] : [{ kind, description, systemId, levelId, quantity, unit }],
+      ),
     ),
   };
 }

@@ -5,6 +5,7 @@ import { describe, expect, test } from "vitest";
 import { foundCompany, type TestCompany } from "../../testing/found-company.ts";
 import { adding, aSmallSystem } from "../../testing/a-small-system.ts";
 import { aProject } from "../../testing/a-project.ts";
+import { unitOf } from "../../testing/a-quotable-project.ts";
 import { computeProject } from "./index.ts";
 
 const PRICED_ON = "2026-12-01";
@@ -38,7 +39,7 @@ async function priceWhatIsMissing({ owner }: TestCompany, keys: readonly string[
       key,
       description: key,
       group: "metal",
-      unit: key.startsWith("metal") ? "kg" : key === "sealant" ? "L" : "ea",
+      unit: unitOf(key),
       unitPrice_micro: 1_000_000,
       supplier: "Prairie Coil (invented)",
       effectiveOn: "2026-11-20",

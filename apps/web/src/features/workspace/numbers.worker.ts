@@ -1,5 +1,5 @@
 /** Computes away from the screen: solve, take off, price. The same code as on the server. */
-import { computeNumbers, type Numbers, type PricingDocuments } from "@cleatwork/layout";
+import { createNumbers, type Numbers, type PricingDocuments } from "@cleatwork/layout";
 
 export interface NumbersRequest {
   readonly turn: number;
@@ -9,6 +9,9 @@ export interface NumbersAnswer {
   readonly turn: number;
   readonly numbers: Numbers;
 }
+
+/** One edit follows another: what it does not touch is remembered. */
+const computeNumbers = createNumbers();
 
 self.onmessage = ({ data }: MessageEvent<NumbersRequest>) => {
   const answer: NumbersAnswer = { turn: data.turn, numbers: computeNumbers(data.documents) };
