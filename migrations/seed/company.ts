@@ -17,6 +17,7 @@ export const company = {
   phone: "316 555 0140",
   licenseNumber: "SM-0417 (demo)",
   brandColor: "#1C5C46",
+  frictionBasis: "hydraulic-diameter",
   quoteTerms: [
     "Progress billing monthly, net 30 days. Retainage 10 %, released at substantial completion.",
     "Work in regular hours on weekdays, with clear access and one mobilization a phase.",

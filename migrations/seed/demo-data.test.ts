@@ -35,6 +35,7 @@ function numbersOf(project: DemoProject) {
     records,
     specs: known,
     altitude_m: feet(project.altitude_ft),
+    frictionBasis: "hydraulic-diameter",
     currency: "USD",
     items: priceBook(TODAY),
     settings: {

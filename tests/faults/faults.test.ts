@@ -84,6 +84,7 @@ describe("the mail server is down", () => {
       records: layout.records,
       specs: specs.items,
       altitude_m: project.altitude_m,
+      frictionBasis: "hydraulic-diameter",
       currency: book.currency,
       items: book.items,
       settings,

@@ -21,6 +21,7 @@ export async function priceAsTheBrowserWould(
     records: layout.records,
     specs,
     altitude_m: project.altitude_m,
+    frictionBasis: "hydraulic-diameter",
     currency: book.currency,
     items: book.items,
     settings,

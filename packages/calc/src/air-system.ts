@@ -126,6 +126,10 @@ export interface Limits {
   readonly flexibleLength_m: Meters;
 }
 
+export const FRICTION_BASES = ["hydraulic-diameter", "laminar-equivalent-diameter"] as const;
+/** The diameter in the Reynolds number of turbulent friction; they differ only in ducts that are not round. */
+export type FrictionBasis = (typeof FRICTION_BASES)[number];
+
 export interface SizingRule {
   readonly method: "equal-friction" | "velocity";
   readonly frictionRate_pa_m: PascalsPerMeter;
@@ -261,6 +265,7 @@ export interface AirSystem {
   readonly design: DesignConditions;
   readonly limits: Limits;
   readonly sizing: SizingRule;
+  readonly frictionBasis: FrictionBasis;
   readonly spec: ConstructionSpec;
   readonly levels: readonly Level[];
   readonly nodes: readonly AirNode[];

@@ -5,6 +5,7 @@ export * from "./network/solution.ts";
 export * from "./takeoff/takeoff.ts";
 export * from "./pricing/estimate.ts";
 export { solve } from "./network/solve.ts";
+export { frictionRateOnBasis } from "./network/friction.ts";
 export { FIX_KINDS, type Fix, type FixKind, type SegmentEdit } from "./findings/fix.ts";
 export { fixesFor } from "./findings/fixes.ts";
 export { FITTING_INPUTS, REFERENCE_SECTIONS, type FittingInputName, type ReferenceSection } from "./fittings/laws.ts";

@@ -35,6 +35,7 @@ export const airSystemShape = {
     frictionRate_pa_m: { main: "number", branch: "number", runout: "number" },
     flexibleLength_m: "number",
   },
+  frictionBasis: "string",
   sizing: {
     method: "string",
     frictionRate_pa_m: "number",

@@ -1,3 +1,4 @@
+import { FRICTION_BASES } from "@cleatwork/calc";
 import { z } from "zod";
 import { address, currency, instant, longText, name, shortText, timeZone, unitSystem, version } from "./common.ts";
 import { endpoint, member } from "./endpoint.ts";
@@ -17,6 +18,8 @@ export const companyResponse = z.object({
   licenseNumber: z.string(),
   /** The brand color of quotes, #rrggbb. */
   brandColor: z.string(),
+  /** The diameter in the Reynolds number of turbulent friction. */
+  frictionBasis: z.enum(FRICTION_BASES),
   quoteTerms: z.string(),
   version,
 });
@@ -30,6 +33,7 @@ export const companyRequest = z.strictObject({
   phone: z.string().trim().max(40),
   licenseNumber: shortText,
   brandColor: z.string().regex(/^#[0-9a-fA-F]{6}$/, "a color such as #1C429C"),
+  frictionBasis: z.enum(FRICTION_BASES),
   quoteTerms: longText,
 });
 

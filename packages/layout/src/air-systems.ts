@@ -7,6 +7,7 @@ import {
   type AirSegment,
   type AirSystem,
   type ConstructionSpec,
+  type FrictionBasis,
   type Level,
   type Meters,
 } from "@cleatwork/calc";
@@ -27,6 +28,8 @@ export interface AirSystemContext {
   readonly specs: readonly { readonly id: SpecId; readonly construction: ConstructionSpec }[];
   /** Of the site; a system's own design conditions keep the rest. */
   readonly altitude_m: Meters;
+  /** The company's. */
+  readonly frictionBasis: FrictionBasis;
 }
 
 /** Systems whose spec is not among the given are left out; the server never stores such a system. */
@@ -39,7 +42,7 @@ export function airSystemsFrom(
   const levels = levelsOf(layout, context.drawings ?? []);
   return systemsInOrder(layout).flatMap((system) => {
     const spec = specs.get(system.specId);
-    return spec ? [airSystem(system, spec, levels, index, context.altitude_m)] : [];
+    return spec ? [airSystem(system, spec, levels, index, context)] : [];
   });
 }
 
@@ -65,7 +68,7 @@ function airSystem(
   spec: ConstructionSpec,
   levels: readonly Level[],
   index: LayoutIndex,
-  altitude: Meters,
+  { altitude_m, frictionBasis }: AirSystemContext,
 ): AirSystem {
   return {
     schema: AIR_SYSTEM_SCHEMA,
@@ -73,9 +76,10 @@ function airSystem(
     tag: system.tag,
     name: system.name,
     service: system.service,
-    design: { ...system.design, altitude_m: meters(altitude) },
+    design: { ...system.design, altitude_m: meters(altitude_m) },
     limits: system.limits,
     sizing: system.sizing,
+    frictionBasis,
     spec,
     levels,
     nodes: (index.nodesOf.get(system.id) ?? []).map(airNode),

@@ -384,13 +384,15 @@ describe("refusals", () => {
 });
 
 describe("air system", () => {
-  it("holds every duct in tree order and the site's altitude", () => {
+  it("holds every duct in tree order, the site's altitude and the company's friction basis", () => {
     const [system] = airSystemsFrom(layout, {
       specs: [{ id: specId, construction: {} as never }],
       altitude_m: meters(400),
+      frictionBasis: "laminar-equivalent-diameter",
     });
     expect(system?.segments.map(({ id }) => id)).toEqual([first.id, second.id, third.id, branch.id]);
     expect(system?.nodes).toHaveLength(5);
     expect(system?.design.altitude_m).toBe(400);
+    expect(system?.frictionBasis).toBe("laminar-equivalent-diameter");
   });
 });

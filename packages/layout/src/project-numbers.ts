@@ -8,6 +8,7 @@ import {
   type AirSystem,
   type CompanyStandards,
   type Estimate,
+  type FrictionBasis,
   type Meters,
   type PriceItem,
   type Solution,
@@ -22,6 +23,7 @@ export interface PricingDocuments {
   readonly records: readonly LayoutRecord[];
   readonly specs: readonly Pick<Spec, "id" | "construction">[];
   readonly altitude_m: Meters;
+  readonly frictionBasis: FrictionBasis;
   readonly drawings?: readonly MeasuredDrawing[] | undefined;
   readonly currency: string;
   readonly items: readonly PriceItem[];
@@ -61,6 +63,7 @@ function numbersOf(documents: PricingDocuments, taking: (systemId: string) => ty
   const systems = airSystemsFrom(layout, {
     specs: documents.specs,
     altitude_m: documents.altitude_m,
+    frictionBasis: documents.frictionBasis,
     drawings: documents.drawings,
   });
   const standards = standardsOf(documents.standards, pricing.conditionFactor ?? settings.conditionFactor);

@@ -32,6 +32,7 @@ const documents: PricingDocuments = {
   records: recordsOf(layout),
   specs: [{ id: specId, construction }],
   altitude_m: meters(0),
+  frictionBasis: "hydraulic-diameter",
   currency: "USD",
   items: [],
   standards: NO_COMPANY_STANDARDS,

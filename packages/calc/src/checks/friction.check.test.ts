@@ -118,6 +118,7 @@ describe("friction rate of round galvanized duct", () => {
         frictionRate: inchesOfWaterPer100Feet(0.1),
         hydraulicDiameter: diameter,
         roughness: chartRoughness,
+        turbulentScale: 1,
         density: standardDensity,
         viscosity: standardViscosity,
       });

@@ -156,6 +156,7 @@ const benchFrame: Omit<AirSystem, "nodes" | "segments"> = {
     shape: "rectangular",
     maximumHeight_m: inches(24),
   },
+  frictionBasis: "hydraulic-diameter",
   spec: {
     material: "galvanized",
     pressureClass_pa: pascals(1e4),

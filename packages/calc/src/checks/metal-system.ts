@@ -107,6 +107,7 @@ export function aSystem(ducts: readonly DuctOf[], spec: Partial<ConstructionSpec
       shape: "rectangular",
       maximumHeight_m: null,
     },
+    frictionBasis: "hydraulic-diameter",
     spec: { ...plainSpec, ...spec },
     levels: [{ id: "level", name: "Level 1", elevation_m: meters(0) }],
     nodes: [

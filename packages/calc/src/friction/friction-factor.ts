@@ -21,18 +21,28 @@ export const flowRegime = (reynoldsNumber: number): FlowRegime =>
  * at 2,000 to the turbulent value at 4,000, linearly in the logarithm of both, so that it is continuous and more flow never
  * loses less.
  *
+ * `turbulentScale` multiplies the Reynolds number in turbulent flow: 1 on the hydraulic diameter, `laminarEquivalentRatio` on the
+ * laminar-equivalent one. Laminar flow is exact by shape and knows no such choice.
+ *
  * Range    Re > 0
  * Source   regimes: common practice, no source; blend: our choice, flagged by the regime in the answer
  */
-export function darcyFrictionFactor(section: Section, reynoldsNumber: number, relativeRoughness: number): number {
+export function darcyFrictionFactor(
+  section: Section,
+  reynoldsNumber: number,
+  relativeRoughness: number,
+  turbulentScale = 1,
+): number {
   if (reynoldsNumber >= TURBULENT_FROM_REYNOLDS)
-    return colebrookFrictionFactor(reynoldsNumber, relativeRoughness).value;
+    return colebrookFrictionFactor(turbulentScale * reynoldsNumber, relativeRoughness).value;
 
   const constant = laminarConstant(section);
   if (reynoldsNumber < LAMINAR_UNDER_REYNOLDS) return constant / reynoldsNumber;
 
   const laminarEnd = Math.log(constant / LAMINAR_UNDER_REYNOLDS);
-  const turbulentEnd = Math.log(colebrookFrictionFactor(TURBULENT_FROM_REYNOLDS, relativeRoughness).value);
+  const turbulentEnd = Math.log(
+    colebrookFrictionFactor(turbulentScale * TURBULENT_FROM_REYNOLDS, relativeRoughness).value,
+  );
   const share =
     Math.log(reynoldsNumber / LAMINAR_UNDER_REYNOLDS) / Math.log(TURBULENT_FROM_REYNOLDS / LAMINAR_UNDER_REYNOLDS);
   return Math.exp(laminarEnd + share * (turbulentEnd - laminarEnd));

@@ -2,6 +2,7 @@
 import {
   AIR_SYSTEM_SCHEMA,
   DUCT_CLASSES,
+  FRICTION_BASES,
   MATERIALS,
   RECTANGULAR_BRANCHES,
   RECTANGULAR_ELBOWS,
@@ -31,6 +32,7 @@ export function checkConditions(system: AirSystem, problems: SystemProblem[]): v
   const { design, limits, spec, sizing } = system;
   checkOneOf("schema", system.schema, [AIR_SYSTEM_SCHEMA]);
   checkOneOf("service", system.service, SERVICES);
+  checkOneOf("frictionBasis", system.frictionBasis, FRICTION_BASES);
 
   check("design.altitude_m", design.altitude_m, ranges.altitude);
   check("design.temperature_k", design.temperature_k, ranges.temperature);

@@ -1,11 +1,21 @@
 /** Velocity and friction of every segment, by its real area and its hydraulic diameter. */
-import type { AirSystem, Section } from "../air-system.ts";
+import type { AirSystem, FrictionBasis, Section } from "../air-system.ts";
 import { velocityPressure as pressureOfVelocity } from "../air/velocity-pressure.ts";
 import { slackFactor } from "../friction/flexible.ts";
 import { TURBULENT_FROM_REYNOLDS, darcyFrictionFactor } from "../friction/friction-factor.ts";
+import { laminarEquivalentRatio } from "../friction/laminar-equivalent.ts";
+import { roughnessOf } from "../friction/roughness.ts";
 import { turbulentFactor, turbulentFactors } from "../friction/turbulent-factors.ts";
-import { meters, metersPerSecond, type KilogramsPerCubicMeter, type PascalSeconds } from "../quantity.ts";
+import {
+  meters,
+  metersPerSecond,
+  pascalsPerMeter,
+  type KilogramsPerCubicMeter,
+  type PascalSeconds,
+  type PascalsPerMeter,
+} from "../quantity.ts";
 import type { Sections } from "./sections.ts";
+import type { SolvedSegment } from "./solution.ts";
 import type { Traits } from "./traits.ts";
 
 export interface Friction {
@@ -18,7 +28,7 @@ export interface Friction {
 }
 
 export function findFriction(
-  { spec }: AirSystem,
+  { spec, frictionBasis }: AirSystem,
   airflow: Float64Array,
   sections: Sections,
   traits: Traits,
@@ -35,7 +45,10 @@ export function findFriction(
   const relativeRoughness = new Float64Array(count);
   fillVelocities(friction, airflow, sections, air.density, air.viscosity / air.density);
   fillRoughness(traits.roughness, sections.hydraulicDiameter, relativeRoughness);
-  fillFactors(sections.section, friction.reynoldsNumber, relativeRoughness, friction.darcyFrictionFactor);
+  if (frictionBasis === "hydraulic-diameter")
+    fillFactors(sections.section, friction.reynoldsNumber, relativeRoughness, friction.darcyFrictionFactor);
+  else
+    fillEquivalentFactors(sections.section, friction.reynoldsNumber, relativeRoughness, friction.darcyFrictionFactor);
   fillRates(traits.isFlexible, spec.flexibleSlack, sections.hydraulicDiameter, friction);
   return friction;
 }
@@ -73,6 +86,28 @@ function fillFactors(
         ? turbulentFactor(known, reynoldsNumber[s]!, relativeRoughness[s]!)
         : darcyFrictionFactor(section[s]!, reynoldsNumber[s]!, relativeRoughness[s]!);
   }
+}
+
+/** The same on the laminar-equivalent diameter. */
+function fillEquivalentFactors(
+  section: readonly Section[],
+  reynoldsNumber: Float64Array,
+  relativeRoughness: Float64Array,
+  factor: Float64Array,
+): void {
+  for (let s = 0; s < factor.length; s++) {
+    const scale = laminarEquivalentRatio(section[s]!);
+    factor[s] = darcyFrictionFactor(section[s]!, reynoldsNumber[s]!, relativeRoughness[s]!, scale);
+  }
+}
+
+/** The friction rate that a solved segment would have on a basis, for comparison with the one it was solved on. */
+export function frictionRateOnBasis(system: AirSystem, solved: SolvedSegment, basis: FrictionBasis): PascalsPerMeter {
+  const segment = system.segments.find(({ id }) => id === solved.segmentId)!;
+  const relativeRoughness = roughnessOf(segment, system.spec) / solved.hydraulicDiameter_m;
+  const scale = basis === "hydraulic-diameter" ? 1 : laminarEquivalentRatio(solved.section);
+  const factor = darcyFrictionFactor(solved.section, solved.reynoldsNumber, relativeRoughness, scale);
+  return pascalsPerMeter((solved.frictionRate_pa_m * factor) / solved.darcyFrictionFactor);
 }
 
 function fillRates(isFlexible: Uint8Array, flexibleSlack: number, diameter: Float64Array, friction: Friction): void {

@@ -15,9 +15,11 @@ export function velocityAtFrictionRate(duct: {
   roughness: Meters;
   density: KilogramsPerCubicMeter;
   viscosity: PascalSeconds;
+  /** Multiplies the Reynolds number: 1 on the hydraulic diameter, `laminarEquivalentRatio` on the other basis. */
+  turbulentScale: number;
 }): MetersPerSecond {
-  const { frictionRate, hydraulicDiameter, roughness, density, viscosity } = duct;
+  const { frictionRate, hydraulicDiameter, roughness, density, viscosity, turbulentScale } = duct;
   const shear = Math.sqrt((2 * frictionRate * hydraulicDiameter) / density);
-  const reynoldsRoot = (density * shear * hydraulicDiameter) / viscosity;
+  const reynoldsRoot = (turbulentScale * density * shear * hydraulicDiameter) / viscosity;
   return metersPerSecond(shear * -2 * Math.log10(roughness / (3.7 * hydraulicDiameter) + 2.51 / reynoldsRoot));
 }

@@ -1,6 +1,7 @@
 /** Sizes for segments whose section is left to the rule: the least metal that carries the air within the rule. */
 import { DUCT_CLASSES, type AirSegment, type AirSystem, type Section } from "../air-system.ts";
 import { slackFactor } from "../friction/flexible.ts";
+import { laminarEquivalentRatio } from "../friction/laminar-equivalent.ts";
 import { roughnessOf } from "../friction/roughness.ts";
 import { hydraulicDiameter, sectionArea, wettedPerimeter } from "../geometry/section.ts";
 import { clearSection, insulationOf, linerThickness } from "../network/clear-section.ts";
@@ -74,14 +75,14 @@ function kindOf(segment: AirSegment, { spec }: AirSystem): number {
 
 function capacityTable(
   segment: AirSegment,
-  { limits, sizing, spec }: AirSystem,
+  { limits, sizing, spec, frictionBasis }: AirSystem,
   air: { density: KilogramsPerCubicMeter; viscosity: PascalSeconds },
 ): readonly CapacityRow[] {
   const mostVelocity = limits.velocity_m_s[segment.ductClass];
   const roughness = roughnessOf(segment, spec);
   const lining = linerThickness(segment, spec);
 
-  const velocityIn = (hydraulic: Meters): MetersPerSecond => {
+  const velocityIn = (section: Section, hydraulic: Meters): MetersPerSecond => {
     if (sizing.method === "velocity") return mostVelocity;
     const slack = segment.flexible ? slackFactor({ slack: spec.flexibleSlack, diameter: hydraulic }) : 1;
     const atRate = velocityAtFrictionRate({
@@ -89,6 +90,7 @@ function capacityTable(
       hydraulicDiameter: hydraulic,
       roughness,
       ...air,
+      turbulentScale: frictionBasis === "hydraulic-diameter" ? 1 : laminarEquivalentRatio(section),
     });
     return atRate < mostVelocity ? atRate : mostVelocity;
   };
@@ -104,7 +106,7 @@ function capacityTable(
     const perimeter = wettedPerimeter(clear);
     if (!(perimeter > 0) || !isOpen(clear)) continue;
     largestArea = area;
-    const capacity = area * velocityIn(hydraulicDiameter(area, perimeter));
+    const capacity = area * velocityIn(clear, hydraulicDiameter(area, perimeter));
     if (capacity <= most) continue;
     most = capacity;
     rows.push({ section, capacity });

@@ -113,6 +113,7 @@ export const ordinary: Omit<AirSystem, "nodes" | "segments"> = {
     flexibleLength_m: meters(2),
   },
   sizing: { method: "equal-friction", frictionRate_pa_m: pascalsPerMeter(0.8), shape: "round", maximumHeight_m: null },
+  frictionBasis: "hydraulic-diameter",
   spec: {
     material: "galvanized",
     pressureClass_pa: pascals(500),

@@ -1,3 +1,4 @@
+import type { FrictionBasis } from "@cleatwork/calc";
 import type { Address, Company, CompanySlug, OrganizationId, PersonId, UnitSystem } from "@cleatwork/contracts";
 import { fromJson, instantFromColumn, instantOrNull } from "../../platform/db/columns.ts";
 import { ask, type Question } from "../../platform/db/question.ts";
@@ -14,6 +15,7 @@ interface CompanyRow {
   phone: string;
   license_number: string;
   brand_color: string;
+  friction_basis: FrictionBasis;
   quote_terms: string;
   version: number;
 }
@@ -63,6 +65,7 @@ const COMPANY_COLUMNS = [
   "phone",
   "license_number",
   "brand_color",
+  "friction_basis",
   "quote_terms",
   "version",
 ] as const satisfies readonly (keyof CompanyRow)[];
@@ -84,6 +87,7 @@ export const companiesRepository = (db: TenantDb) => ({
       phone: fields.phone,
       license_number: fields.licenseNumber,
       brand_color: fields.brandColor,
+      friction_basis: fields.frictionBasis,
       quote_terms: fields.quoteTerms,
       version,
     });
@@ -157,6 +161,7 @@ const companyFromRow = (row: CompanyRow): Company => ({
   phone: row.phone,
   licenseNumber: row.license_number,
   brandColor: row.brand_color,
+  frictionBasis: row.friction_basis,
   quoteTerms: row.quote_terms,
   version: row.version,
 });

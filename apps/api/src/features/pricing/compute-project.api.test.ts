@@ -66,6 +66,7 @@ describe("a project’s numbers", () => {
       records: layout.records,
       specs: specs.items,
       altitude_m: project.altitude_m,
+      frictionBasis: "hydraulic-diameter",
       currency: book.currency,
       items: book.items,
       settings,

@@ -31,7 +31,7 @@ export function numbersFrom(answers: ProjectAnswers, pricedOn: string): ProjectN
   if (!project || !layout || !pricing) return null;
   const { specs, items, settings } = documents;
   const standards = standardsOn(documents.standards, pricedOn);
-  const { currency } = company;
+  const { currency, frictionBasis } = company;
   return computeNumbers({
     project,
     ...layout,
@@ -41,6 +41,7 @@ export function numbersFrom(answers: ProjectAnswers, pricedOn: string): ProjectN
     items,
     settings,
     currency,
+    frictionBasis,
     pricing,
     pricedOn,
   });

@@ -25,6 +25,7 @@ const valuesOf = (company: Company): Values => ({
   phone: company.phone,
   licenseNumber: company.licenseNumber,
   brandColor: company.brandColor,
+  frictionBasis: company.frictionBasis,
   quoteTerms: company.quoteTerms,
 });
 
@@ -92,6 +93,23 @@ export function SettingsForm() {
                 ]}
               />
               <Select name="timeZone" label="Time zone" choices={timeZoneChoices(company.timeZone)} />
+            </PanelBody>
+          </Panel>
+          <Panel>
+            <PanelHead title="Air" fact="of every project, from now on" />
+            <PanelBody className="grid gap-2">
+              <Select
+                name="frictionBasis"
+                label="Turbulent friction goes by the"
+                choices={[
+                  { value: "hydraulic-diameter", label: "hydraulic diameter" },
+                  { value: "laminar-equivalent-diameter", label: "laminar-equivalent diameter (Jones)" },
+                ]}
+              />
+              <p className="text-help text-ink-3">
+                Round duct is the same on both; flat rectangles and annuli lose a few percent more on the second. Each
+                duct shows the other figure beside its own. Issued quotes keep what they were computed on.
+              </p>
             </PanelBody>
           </Panel>
         </div>

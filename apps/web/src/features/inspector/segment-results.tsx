@@ -5,11 +5,13 @@ import {
   formatPressure,
   formatPressureChange,
   formatVelocity,
+  frictionRateOnBasis,
   decimal,
   pascals,
   type Shown,
   type SolvedAccessory,
   type SolvedFitting,
+  type SolvedSegment,
 } from "@cleatwork/calc";
 import type { SegmentRecord } from "@cleatwork/contracts";
 import { find } from "@cleatwork/layout";
@@ -46,6 +48,7 @@ export function SegmentResults({ segment }: { segment: SegmentRecord }) {
           aside={`limit ${formatFrictionRate(frictionLimit, units).value}`}
           over={solved.frictionRate_pa_m > frictionLimit}
         />
+        {solved.section.shape !== "round" && <OtherBasis solved={solved} />}
         <Row
           label="Velocity pressure"
           shown={formatPressure(solved.velocityPressure_pa, units)}
@@ -95,6 +98,23 @@ function lookedUp(loss: SolvedFitting | SolvedAccessory): string {
   const reference = "reference" in loss ? `on the velocity pressure of ${referenceNames[loss.reference]}` : "";
   const edge = loss.clamped ? "read at the edge of its table" : "";
   return [loss.source, inputs.join(", "), reference, edge].filter((part) => part !== "").join("; ");
+}
+
+/** What the friction would be on the diameter that the company does not use. */
+function OtherBasis({ solved }: { solved: SolvedSegment }) {
+  const { numbers, units } = useWorkspace();
+  const system = numbers?.systems.find(({ segments }) => segments.some(({ id }) => id === solved.segmentId));
+  if (!system) return null;
+  const isHydraulic = system.frictionBasis === "hydraulic-diameter";
+  const rate = frictionRateOnBasis(system, solved, isHydraulic ? "laminar-equivalent-diameter" : "hydraulic-diameter");
+  const more = 100 * (rate / solved.frictionRate_pa_m - 1);
+  return (
+    <Row
+      label={`on ${isHydraulic ? "laminar-equivalent" : "hydraulic"} diameter`}
+      shown={formatFrictionRate(rate, units)}
+      aside={`${more < 0 ? "−" : "+"}${decimal(Math.abs(more), 1)} %`}
+    />
+  );
 }
 
 function Row({

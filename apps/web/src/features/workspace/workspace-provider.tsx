@@ -28,7 +28,8 @@ export function WorkspaceProvider({
   children: ReactNode;
 }) {
   const session = useSession();
-  const pricedOn = dayIn(session.company.timeZone, new Date());
+  const { timeZone, frictionBasis } = session.company;
+  const pricedOn = dayIn(timeZone, new Date());
   const [project, layoutRead, specs, book, settings, pricing, standards, drawings] = useSuspenseQueries({
     queries: [
       projectQueries.detail(company, projectId),
@@ -71,6 +72,7 @@ export function WorkspaceProvider({
       records: [...layout.records.values()],
       specs: specs.data.items,
       altitude_m: project.data.altitude_m,
+      frictionBasis,
       drawings: drawings.data.items,
       currency: book.data.currency,
       items: book.data.items,
@@ -81,6 +83,7 @@ export function WorkspaceProvider({
     }),
     [
       layout,
+      frictionBasis,
       specs.data,
       project.data.altitude_m,
       drawings.data,
