@@ -14,6 +14,7 @@ import {
   type GaugeChart,
   type GaugeRow,
   type HoursRow,
+  type PracticeCoefficients,
   type Reinforcement,
 } from "@cleatwork/calc";
 import { z } from "zod";
@@ -140,9 +141,35 @@ const companyHoursSchema = z.strictObject({
     .max(60, "60 conditions at most"),
 });
 
+const coefficient = z.number("a coefficient such as 0.25").min(0, "0 to 10").max(10, "0 to 10");
+const blade = z.strictObject({
+  open: coefficient,
+  jet: z.number("a factor such as 1.56").min(1, "1 to 3").max(3, "1 to 3"),
+});
+
+const coefficientsSchema: z.ZodType<PracticeCoefficients, PracticeCoefficients> = z.strictObject({
+  source: z.string().trim().min(1, "where they come from").max(200, "200 characters at most"),
+  goredOverSmooth: z.strictObject({ pieces3: factor, pieces4: factor, pieces5: factor }),
+  vanedElbow: coefficient,
+  easedTapOverStraight: z.strictObject({ shoe: factor, conical: factor }),
+  shapeChange: coefficient,
+  offsetAngle_rad: z
+    .number("an angle")
+    .min(Math.PI / 18, "10° to 90°")
+    .max(Math.PI / 2, "10° to 90°"),
+  bellmouthRadiusRatio: z.number("a ratio such as 0.2").min(0, "0 to 1").max(1, "0 to 1"),
+  screenFreeArea: z.number("a share such as 0.7").min(0.1, "10 % to 100 %").max(1, "10 % to 100 %"),
+  damper: z.strictObject({ rectangular: blade, other: blade }),
+  fireDamper: coefficient,
+  smokeDamper: coefficient,
+  flexibleConnector: coefficient,
+  accessDoor: coefficient,
+});
+
 export const companyStandardsSchema: z.ZodType<CompanyStandards, CompanyStandards> = z.strictObject({
   gauges: gaugeScheduleSchema.nullable(),
   hours: companyHoursSchema.nullable(),
+  coefficients: coefficientsSchema.nullable().optional(),
   ratioTolerance: z.number("a share such as 0.5").min(0.05, "5 % to 500 %").max(5, "5 % to 500 %"),
 });
 

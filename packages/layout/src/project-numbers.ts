@@ -2,6 +2,7 @@
 import {
   createTakeoff,
   price,
+  shippedPractice,
   solve,
   standardsOf,
   takeOff,
@@ -72,7 +73,7 @@ function numbersOf(documents: PricingDocuments, taking: (systemId: string) => ty
   const takeoffs: Takeoff[] = [];
   const problems: SystemProblem[] = [];
   for (const system of systems) {
-    const solved = solve(system);
+    const solved = solve(system, documents.standards.coefficients ?? shippedPractice);
     if (!solved.ok) {
       problems.push(...solved.problems);
       continue;

@@ -2,7 +2,6 @@
 import { RADIUS_ELBOW_SOURCE, SMOOTH_ELBOW_SOURCE, SQUARE_THROAT_SOURCE } from "./elbow.ts";
 import { ENTRY_SOURCE, EXIT_SOURCE } from "./ends.ts";
 import { CONVERGING_SOURCE, DIVERGING_SOURCE } from "./junction.ts";
-import { PRACTICE_SOURCE } from "./practice.table.ts";
 import { SPLITTER_ELBOW_SOURCE } from "./splitter-elbow.ts";
 import { CONTRACTION_SOURCE, EXPANSION_SOURCE } from "./transition.ts";
 
@@ -38,6 +37,8 @@ export type FittingInputName = (typeof FITTING_INPUTS)[number];
 
 export interface FittingLaw {
   readonly source: string;
+  /** A coefficient of practice is in it: who set that is told behind the source. */
+  readonly byPractice?: true;
   readonly reference: ReferenceSection;
   /** At most MOST_INPUTS, beside the angle of the turn, which every fitting tells. */
   readonly inputs: readonly FittingInputName[];
@@ -48,7 +49,8 @@ export const MOST_INPUTS = 3;
 const LAWS = {
   smoothElbow: { source: SMOOTH_ELBOW_SOURCE, reference: "own", inputs: ["radius-ratio", "friction-factor"] },
   goredElbow: {
-    source: `Smooth elbow times a factor by its pieces: ${PRACTICE_SOURCE}`,
+    source: "Smooth elbow times a factor by its pieces",
+    byPractice: true,
     reference: "own",
     inputs: ["radius-ratio", "friction-factor", "piece-count"],
   },
@@ -60,19 +62,22 @@ const LAWS = {
   },
   squareThroat: { source: SQUARE_THROAT_SOURCE, reference: "own", inputs: ["side-ratio"] },
   vanedElbow: {
-    source: `Square throat with vanes, by its angle: ${PRACTICE_SOURCE}`,
+    source: "Square throat with vanes, by its angle",
+    byPractice: true,
     reference: "own",
     inputs: ["practice-factor"],
   },
   offset: {
-    source: `Two of the system's elbows, each as if alone: ${PRACTICE_SOURCE}`,
+    source: "Two of the system's elbows, each as if alone",
+    byPractice: true,
     reference: "own",
     inputs: ["one-elbow"],
   },
   contraction: { source: CONTRACTION_SOURCE, reference: "smaller", inputs: ["area-ratio", "transition-angle"] },
   expansion: { source: EXPANSION_SOURCE, reference: "smaller", inputs: ["area-ratio", "transition-angle"] },
   shapeChange: {
-    source: `Least loss of a change of shape: ${PRACTICE_SOURCE}`,
+    source: "Least loss of a change of shape",
+    byPractice: true,
     reference: "smaller",
     inputs: ["area-ratio", "transition-angle", "practice-factor"],
   },
@@ -82,7 +87,8 @@ const LAWS = {
     inputs: ["area-ratio", "flow-ratio", "velocity-ratio"],
   },
   easedTap: {
-    source: `Idelchik's straight tap times a factor: ${PRACTICE_SOURCE}`,
+    source: "Idelchik's straight tap times a factor",
+    byPractice: true,
     reference: "common",
     inputs: ["area-ratio", "flow-ratio", "practice-factor"],
   },
@@ -103,6 +109,10 @@ export type FittingLawName = keyof typeof LAWS;
 
 /** In the order of their places. */
 export const fittingLaws: readonly FittingLaw[] = Object.values(LAWS);
+
+/** What each law tells as its source, in the same order. */
+export const lawSources = (practiceSource: string): readonly string[] =>
+  fittingLaws.map(({ source, byPractice }) => (byPractice ? `${source}: ${practiceSource}` : source));
 
 /** Place of each law in the list: what columns store. */
 export const lawAt = Object.fromEntries(Object.keys(LAWS).map((name, place) => [name, place])) as Readonly<

@@ -1,5 +1,5 @@
 import type { AccessoryKind, AirSystem, Section } from "../air-system.ts";
-import { PRACTICE_SOURCE, type PracticeCoefficients } from "../fittings/practice.table.ts";
+import type { PracticeCoefficients } from "../fittings/practice.table.ts";
 import { SCREEN_SOURCE, screenCoefficient } from "../fittings/screen.ts";
 import { DAMPER_SOURCE, MOST_DAMPER_ANGLE, damperCoefficient } from "../fittings/throttled-damper.ts";
 import { pascals, radians } from "../quantity.ts";
@@ -57,7 +57,7 @@ function loseAt(
   angle: number,
   practice: PracticeCoefficients,
 ): Pick<SolvedAccessory, "lossCoefficient" | "source" | "inputs"> {
-  const byPractice = (lossCoefficient: number) => ({ lossCoefficient, source: PRACTICE_SOURCE, inputs: NO_INPUTS });
+  const byPractice = (lossCoefficient: number) => ({ lossCoefficient, source: practice.source, inputs: NO_INPUTS });
   switch (kind) {
     case "volume-damper": {
       const blade = practice.damper[section.shape === "rectangular" ? "rectangular" : "other"];

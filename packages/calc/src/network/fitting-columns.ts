@@ -4,6 +4,7 @@ import {
   MOST_INPUTS,
   fittingLaws,
   lawAt,
+  lawSources,
   type FittingInputName,
   type FittingLaw,
   type FittingLawName,
@@ -15,6 +16,8 @@ import type { FittingInput, SolvedFitting } from "./solution.ts";
 import { NONE } from "./tree-shape.ts";
 
 export interface FittingColumns {
+  /** What each law tells as its source. */
+  readonly sources: readonly string[];
   /** Fittings of segment s are those from start[s] up to start[s + 1]. */
   readonly start: Int32Array;
   /** Place in FITTING_TYPES. From here on columns are exchanged for longer ones as they fill: read them after adding. */
@@ -37,9 +40,10 @@ export interface FittingColumns {
 }
 
 /** Room for three fittings on two segments, which few systems outgrow: room that is never used costs as much to clear. */
-export function fittingColumns(segmentCount: number): FittingColumns {
+export function fittingColumns(segmentCount: number, practiceSource: string): FittingColumns {
   const room = segmentCount + (segmentCount >> 1) + 8;
   return {
+    sources: lawSources(practiceSource),
     start: new Int32Array(segmentCount + 1),
     type: new Uint8Array(room),
     isChosen: new Uint8Array(room),
@@ -167,7 +171,7 @@ const FittingRecord = plainRecord(function (
   this.reference = law.reference;
   this.velocityPressure_pa = pascals(columns.velocityPressure[at]!);
   this.loss_pa = pascals(columns.lossCoefficient[at]! * columns.velocityPressure[at]!);
-  this.source = law.source;
+  this.source = columns.sources[columns.law[at]!]!;
   this.inputs = inputsOf(law, columns.input, MOST_INPUTS * at);
   this.clamped = columns.isClamped[at] === 1;
   this.madeHere = columns.madeHere[at] === 1;

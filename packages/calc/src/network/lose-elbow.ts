@@ -47,7 +47,7 @@ export function putOffset(context: FittingContext, s: number, before: number): v
   const { system, sections, friction, fittings, practice, joints } = context;
   const at = openFitting(fittings, s, "offset", true, !system.segments[s]!.flexible, before === NONE ? NONE : s);
   const isDrawn = joints.turnCosine[s]! < SMALLEST_TURN_COSINE;
-  const angle = isDrawn ? drawnTurn(context, s) : practice.offsetAngle_rad;
+  const angle = isDrawn ? drawnTurn(context, s) : radians(practice.offsetAngle_rad);
   const one = elbowLoss(context, at, s, before, elbowType(sections.section[s]!, system.spec), angle);
   writeLaw(fittings, at, "offset", one);
   fittings.angle[at] = angle;

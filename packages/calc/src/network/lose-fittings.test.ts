@@ -181,13 +181,27 @@ describe("accessories", () => {
   });
 
   it("a company's own coefficients take the place of the shipped ones", () => {
-    const own = { ...shippedPractice, fireDamper: 0.3, screenFreeArea: 1 };
+    const own = { ...shippedPractice, source: "our readings", fireDamper: 0.3, screenFreeArea: 1 };
     const answer = solve(oneDuct(round(0.3), 0.3, { accessories: ["fire-damper", "screen"] }), own);
     if (!answer.ok) throw new Error("refused");
     expect(segmentOf(answer.value, "unit-out").accessories.map(({ lossCoefficient }) => lossCoefficient)).toEqual([
       0.3, 0,
     ]);
   });
+});
+
+it("what rests on a company's coefficient tells the company's source, and only that", () => {
+  const own = { ...shippedPractice, source: "our readings of 2025", vanedElbow: 0.15 };
+  const spec = { ...ordinary.spec, elbow: { ...ordinary.spec.elbow, rectangular: "square-throat-vanes" as const } };
+  const answer = solve(bend(rectangular(0.4, 0.3), {}, { spec }), own);
+  if (!answer.ok) throw new Error("refused");
+  const [elbow] = segmentOf(answer.value, "turn-out").fittings;
+  expect(elbow).toMatchObject({ lossCoefficient: 0.15, inputs: [{ name: "practice-factor", value: 0.15 }] });
+  expect(elbow?.source).toBe("Square throat with vanes, by its angle: our readings of 2025");
+
+  const plain = solve(bend(rectangular(0.4, 0.3)), own);
+  if (!plain.ok) throw new Error("refused");
+  expect(segmentOf(plain.value, "turn-out").fittings[0]?.source).not.toContain("our readings");
 });
 
 describe("a branch wider than its main", () => {

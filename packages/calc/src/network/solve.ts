@@ -66,7 +66,7 @@ export function solve(
   const friction = findFriction(system, airflow, sections, traits, { density, viscosity });
 
   const joints = describeJoints(tree, course, airflow);
-  const fittings = fittingColumns(tree.segmentCount);
+  const fittings = fittingColumns(tree.segmentCount, practice.source);
   findFittings({
     system,
     tree,

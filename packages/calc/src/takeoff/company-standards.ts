@@ -1,4 +1,5 @@
 /** What a company says differs from what is shipped, and the standards that a takeoff reads from both. */
+import type { PracticeCoefficients } from "../fittings/practice.table.ts";
 import type { GaugeSchedule } from "./gauge-schedule.ts";
 import type { ProductivityTable } from "./productivity.ts";
 import { shippedStandards } from "./shipped-standards.ts";
@@ -10,6 +11,8 @@ export type CompanyHours = Omit<ProductivityTable, "conditionFactor">;
 export interface CompanyStandards {
   readonly gauges: GaugeSchedule | null;
   readonly hours: CompanyHours | null;
+  /** Loss coefficients of fittings, where the shipped ones are common practice. */
+  readonly coefficients?: PracticeCoefficients | null | undefined;
   /** How far a job's ratios may lie from the company's own history before it is pointed out: 0.5 is half again, or half. */
   readonly ratioTolerance: number;
 }

@@ -2,10 +2,12 @@ import {
   inches,
   inchesOfWater,
   NO_COMPANY_STANDARDS,
+  shippedPractice,
   shippedStandards,
   type CompanyStandards,
   type GaugeRow,
 } from "@cleatwork/calc";
+import type { Numbers } from "@cleatwork/layout";
 import { randomUUID } from "node:crypto";
 import { describe, expect, test } from "vitest";
 import { aProject } from "../../testing/a-project.ts";
@@ -176,7 +178,7 @@ describe("a cell that cannot be", () => {
   });
 });
 
-describe("a project's takeoff", () => {
+describe("a project's numbers", () => {
   async function aDrawnProject(company: TestCompany) {
     const { estimator, server, organizationId } = company;
     const { project, params } = await aProject(estimator);
@@ -187,13 +189,17 @@ describe("a project's takeoff", () => {
     await estimator.ok("saveLayout", { params, body: { batchId: randomUUID(), baseSequence: 1, sets } });
     return async (day: string) => {
       const computed = await computeProject(server.deps.db.tenant(organizationId), project.id, () => day);
-      return (computed?.numbers.takeoffs ?? []).flatMap(({ pieces }) => pieces).filter(({ gauge }) => gauge !== null);
+      if (!computed) throw new Error("the project is there");
+      return computed.numbers;
     };
   }
+  const gaugedPieces = ({ takeoffs }: Numbers) =>
+    takeoffs.flatMap(({ pieces }) => pieces).filter(({ gauge }) => gauge !== null);
 
   test("is made by the company's schedule from its effective date on, and each piece says so", async () => {
     const company = await foundCompany();
-    const piecesOn = await aDrawnProject(company);
+    const numbersOn = await aDrawnProject(company);
+    const piecesOn = async (day: string) => gaugedPieces(await numbersOn(day));
     await save(company, 0, allIn("18 ga"), { effectiveOn: "2026-12-02" });
     const before = await piecesOn(TODAY);
     const after = await piecesOn("2026-12-02");
@@ -206,7 +212,8 @@ describe("a project's takeoff", () => {
 
   test("takes the company's hours", async () => {
     const company = await foundCompany();
-    const piecesOn = await aDrawnProject(company);
+    const numbersOn = await aDrawnProject(company);
+    const piecesOn = async (day: string) => gaugedPieces(await numbersOn(day));
     const { conditionFactor: _factor, ...hours } = shippedStandards.productivity;
     const rows = hours.rows.map((row) => ({ ...row, hours_h: 2 * row.hours_h, standing: "own" as const }));
     const before = await piecesOn(TODAY);
@@ -217,5 +224,31 @@ describe("a project's takeoff", () => {
       expect(piece.fieldHours_h).toBeCloseTo(2 * before[index]!.fieldHours_h, 9);
     }
     expect(after.length).toBeGreaterThan(0);
+  });
+
+  test("take a company's loss coefficient from its effective date on, and the fitting says so", async () => {
+    const company = await foundCompany();
+    const numbersOn = await aDrawnProject(company);
+    const own = { ...shippedPractice, source: "our own readings", easedTapOverStraight: { shoe: 0.4, conical: 0.4 } };
+    await save(company, 0, { ...NO_COMPANY_STANDARDS, coefficients: own }, { effectiveOn: "2026-12-02" });
+    const eased = ({ solutions }: Numbers) =>
+      solutions
+        .flatMap(({ segments }) => segments)
+        .flatMap(({ fittings }) => fittings)
+        .filter(({ inputs }) => inputs.some(({ name }) => name === "practice-factor"));
+    const [before, after] = [eased(await numbersOn(TODAY)), eased(await numbersOn("2026-12-02"))];
+    expect(before.length).toBeGreaterThan(0);
+    expect(before.every(({ source }) => source.includes("common practice"))).toBe(true);
+    expect(after.every(({ source }) => source.includes("our own readings"))).toBe(true);
+    expect(after[0]!.lossCoefficient / before[0]!.lossCoefficient).toBeCloseTo(0.4 / 0.65, 9);
+  });
+
+  test("keep to a coefficient that can be: another is refused with its place", async () => {
+    const { owner } = await foundCompany();
+    const coefficients = { ...shippedPractice, vanedElbow: 40 };
+    const body = { effectiveOn: TODAY, note: "", document: { ...NO_COMPANY_STANDARDS, coefficients } };
+    const { status, errors } = await owner.refused("updateStandards", { version: 0, body });
+    expect(status).toBe(422);
+    expect(errors?.[0]).toMatchObject({ pointer: "/document/coefficients/vanedElbow", value: 40 });
   });
 });

@@ -3,6 +3,7 @@ import {
   inches,
   inchesOfWater,
   NO_COMPANY_STANDARDS,
+  shippedPractice,
   shippedStandards,
   type CompanyStandards,
 } from "@cleatwork/calc";
@@ -36,6 +37,15 @@ describe("what changed in the standards", () => {
         before: "24 ga",
         after: "22 ga",
       },
+    ]);
+  });
+
+  test("names the fitting and both coefficients", () => {
+    const own = { ...shippedPractice, source: "our own readings" };
+    const before = { ...NO_COMPANY_STANDARDS, coefficients: own };
+    const after = { ...NO_COMPANY_STANDARDS, coefficients: { ...own, vanedElbow: 0.15 } };
+    expect(standardsChanges(before, after)).toEqual([
+      { subject: "Square-throat elbow with vanes", field: "coefficient", before: "0.25", after: "0.15" },
     ]);
   });
 

@@ -2,6 +2,7 @@
 import {
   METERS_PER_INCH,
   PASCALS_PER_INCH_OF_WATER,
+  shippedPractice,
   shippedStandards,
   type CompanyHours,
   type CompanyStandards,
@@ -9,6 +10,7 @@ import {
   type GaugeRow,
   type GaugeSchedule,
   type HoursRow,
+  type PracticeCoefficients,
 } from "@cleatwork/calc";
 import { chartKey, type StandardsChange } from "@cleatwork/contracts";
 
@@ -45,6 +47,7 @@ function ownerChanges(before: CompanyStandards, after: CompanyStandards): Standa
   const [old, now] = [kindsIn(before), kindsIn(after)];
   for (const kind of new Set([...old, ...now])) tell(kind, old.has(kind), now.has(kind));
   tell("Hours", before.hours !== null, after.hours !== null);
+  tell("Loss coefficients", Boolean(before.coefficients), Boolean(after.coefficients));
   return changes;
 }
 
@@ -58,14 +61,16 @@ function filledFrom(document: CompanyStandards, other: CompanyStandards): Compan
     ...document,
     gauges: named ? { ...named, rows: [...(document.gauges?.rows ?? []), ...shipped] } : null,
     hours: document.hours ?? (other.hours ? { ...shippedStandards.productivity } : null),
+    coefficients: document.coefficients ?? (other.coefficients ? shippedPractice : null),
   };
 }
 
-const factsOf = ({ gauges, hours, ratioTolerance }: CompanyStandards): Facts =>
+const factsOf = ({ gauges, hours, coefficients, ratioTolerance }: CompanyStandards): Facts =>
   new Map<string, Values>([
     ["Totals check", { "how far from our history": `${Number((100 * ratioTolerance).toFixed(1))} %` }],
     ...(gauges ? gaugeFacts(gauges) : []),
     ...(hours ? hoursFacts(hours) : []),
+    ...(coefficients ? coefficientFacts(coefficients) : []),
   ]);
 
 const gaugeFacts = ({ name, source, standing, rows }: GaugeSchedule): [string, Values][] => [
@@ -130,3 +135,41 @@ const hoursSubject = ({ place, kind, shape, material, upTo_m }: HoursRow): strin
 const lengthWords = (length_m: number): string =>
   `${Number((length_m / METERS_PER_INCH).toFixed(2))} in. (${(1000 * length_m).toFixed(0)} mm)`;
 const hoursWords = (hours_h: number): string => `${Number(hours_h.toFixed(5))} h`;
+
+const coefficientFacts = (own: PracticeCoefficients): [string, Values][] => [
+  ["Loss coefficients", { source: own.source }],
+  [
+    "Gored elbow over a smooth one",
+    {
+      "three pieces": factorWords(own.goredOverSmooth.pieces3),
+      "four pieces": factorWords(own.goredOverSmooth.pieces4),
+      "five pieces or more": factorWords(own.goredOverSmooth.pieces5),
+    },
+  ],
+  [
+    "Tap over a straight one",
+    { shoe: factorWords(own.easedTapOverStraight.shoe), conical: factorWords(own.easedTapOverStraight.conical) },
+  ],
+  ["Square-throat elbow with vanes", { coefficient: String(own.vanedElbow) }],
+  ["Change of shape", { "least coefficient": String(own.shapeChange) }],
+  ["Offset that is not drawn", { "each turn": `${Number(((own.offsetAngle_rad * 180) / Math.PI).toFixed(1))}°` }],
+  ["Bellmouth", { "edge radius over diameter": String(own.bellmouthRadiusRatio) }],
+  ["Screen", { "free area": `${Number((100 * own.screenFreeArea).toFixed(1))} %` }],
+  ["Volume damper, rectangular", bladeValues(own.damper.rectangular)],
+  ["Volume damper, round and flat oval", bladeValues(own.damper.other)],
+  [
+    "Accessories in the air",
+    {
+      "fire damper": String(own.fireDamper),
+      "smoke damper": String(own.smokeDamper),
+      "flexible connector": String(own.flexibleConnector),
+      "access door": String(own.accessDoor),
+    },
+  ],
+];
+
+const bladeValues = ({ open, jet }: PracticeCoefficients["damper"]["other"]): Values => ({
+  open: String(open),
+  "jet term": String(jet),
+});
+const factorWords = (factor: number): string => `× ${factor}`;
