@@ -13,6 +13,7 @@ import { Notice } from "../../ui/notice.tsx";
 import { notify } from "../../ui/toast.tsx";
 import { Toggle } from "../../ui/toggle.tsx";
 import { useSession } from "../session/index.ts";
+import { CoefficientsPanel } from "./coefficients-panel.tsx";
 import { readNumber } from "./cells.ts";
 import { GaugePanel } from "./gauge-panel.tsx";
 import { HistoryPanel } from "./history-panel.tsx";
@@ -20,7 +21,7 @@ import { HoursPanel } from "./hours-panel.tsx";
 import { draftAfter, draftOf, isChanged } from "./standards-draft.ts";
 import { standardsQueries } from "./standards.queries.ts";
 
-type Part = "gauges" | "hours" | "history";
+type Part = "gauges" | "hours" | "coefficients" | "history";
 
 /** The owner's schedules: edited here, saved as a version that counts from its day. */
 export function StandardsScreen() {
@@ -105,6 +106,7 @@ function Editor({ stored, mayWrite }: { stored: Standards; mayWrite: boolean }) 
           choices={[
             { value: "gauges", label: "Gauges" },
             { value: "hours", label: "Hours and conditions" },
+            { value: "coefficients", label: "Loss coefficients" },
             { value: "history", label: "What changed" },
           ]}
         />
@@ -141,6 +143,7 @@ function Editor({ stored, mayWrite }: { stored: Standards; mayWrite: boolean }) 
       <div key={round} className="grid gap-3">
         {part === "gauges" && <GaugePanel {...panel} />}
         {part === "hours" && <HoursPanel {...panel} />}
+        {part === "coefficients" && <CoefficientsPanel {...panel} />}
         {part === "history" && <HistoryPanel />}
       </div>
       {mayWrite && part !== "history" && (
