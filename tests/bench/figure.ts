@@ -5,10 +5,19 @@ export interface Figure {
   readonly unit: string;
   /** The most that is expected; null where a figure only informs. */
   readonly most: number | null;
+  /** The least that is expected, where more is better. */
+  readonly least?: number;
   readonly note?: string;
 }
 
-export const isOver = ({ figure, most }: Figure): boolean => most !== null && !(figure <= most);
+export const isOver = ({ figure, most, least }: Figure): boolean =>
+  (most !== null && !(figure <= most)) || (least !== undefined && !(figure >= least));
+
+/** As the table says it; empty where a figure only informs. */
+function expected({ most, least, unit }: Figure): string {
+  if (most !== null) return `≤ ${most} ${unit}`.trimEnd();
+  return least === undefined ? "" : `≥ ${least} ${unit}`.trimEnd();
+}
 
 /** One line a figure, in columns that a person reads down. */
 export function table(figures: readonly Figure[]): string {
@@ -17,8 +26,8 @@ export function table(figures: readonly Figure[]): string {
     ...figures.map((each) => [
       each.what,
       `${inFigures(each.figure)} ${each.unit}`.trimEnd(),
-      each.most === null ? "" : `≤ ${each.most} ${each.unit}`.trimEnd(),
-      each.most === null ? "" : isOver(each) ? "OVER" : "ok",
+      expected(each),
+      expected(each) === "" ? "" : isOver(each) ? (each.most === null ? "UNDER" : "OVER") : "ok",
       each.note ?? "",
     ]),
   ];

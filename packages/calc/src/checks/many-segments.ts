@@ -56,10 +56,11 @@ export function benchSystem(
     addSegment(from, addNode("outlet", x, y, z, airflow), "runout", section, turn === 0);
   };
 
+  const riserSection = roundOf(riserDiameter_in(segmentCount));
   let riser = addNode("equipment", 0, 0, 0, null);
   for (let floor = 1; segments.length < segmentCount; floor++) {
     const height = 4 * floor;
-    riser = addSegment(riser, addNode("junction", 0, 0, height, null), "main", roundOf(60));
+    riser = addSegment(riser, addNode("junction", 0, 0, height, null), "main", riserSection);
     let main = riser;
     for (let zone = 1; zone <= ZONES_ON_A_FLOOR && segments.length + 2 <= segmentCount; zone++) {
       const x = 6 * zone;
@@ -110,6 +111,9 @@ function closed(nodes: readonly AirNode[], segments: readonly AirSegment[]): Air
       : node,
   );
 }
+
+/** Wide enough that air gets up a taller building too, or what is timed is the writing of a finding for every outlet. */
+const riserDiameter_in = (segmentCount: number): number => 60 * Math.max(1, segmentCount / 5_000) ** 0.6;
 
 const roundOf = (diameter_in: number): Section => ({ shape: "round", diameter_m: inches(diameter_in) });
 const rectangleOf = (width_in: number, height_in: number): Section => ({

@@ -28,8 +28,8 @@ export interface OutletNeeds {
 export function findNeeds(
   system: AirSystem,
   { outlets, into }: Tree,
-  { velocityPressure }: Friction,
-  { frictionTo, dynamicTo }: Losses,
+  { velocityPressure }: Pick<Friction, "velocityPressure">,
+  { frictionTo, dynamicTo }: Pick<Losses, "frictionTo" | "dynamicTo">,
 ): OutletNeeds {
   const openEnd = system.service === "supply" ? OPEN_EXIT_COEFFICIENT : OPEN_ENTRY_COEFFICIENT;
   const outletPressure = new Float64Array(outlets.length);
