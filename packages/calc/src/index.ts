@@ -10,6 +10,7 @@ export { FIX_KINDS, type Fix, type FixKind, type SegmentEdit } from "./findings/
 export { fixesFor } from "./findings/fixes.ts";
 export { FITTING_INPUTS, REFERENCE_SECTIONS, type FittingInputName, type ReferenceSection } from "./fittings/laws.ts";
 export { shippedPractice, type PracticeCoefficients } from "./fittings/practice.table.ts";
+export { sizeOptions, type SizeOption } from "./sizing/size-options.ts";
 export * from "./display/index.ts";
 export { createTakeoff, takeOff } from "./takeoff/take-off.ts";
 export { sumTotals } from "./takeoff/totals.ts";

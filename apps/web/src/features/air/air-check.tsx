@@ -8,6 +8,7 @@ import { FanPanel } from "./fan-panel.tsx";
 import { FindingList } from "./finding-list.tsx";
 import { degrees } from "./fix-words.ts";
 import { GradeLineDock } from "./grade-line-dock.tsx";
+import { SizeOptionsPanel } from "./size-options-panel.tsx";
 
 /** What an engineer would check: findings first, then the grade line, then every path. */
 export function AirCheck({ systemId }: { systemId: string }) {
@@ -22,6 +23,7 @@ export function AirCheck({ systemId }: { systemId: string }) {
           <GradeLineDock systemId={systemId} />
         </Panel>
         {solution && <FanPanel solution={solution} />}
+        <SizeOptionsPanel systemId={systemId} />
         {solution && <Paths paths={solution.paths} governing={solution.governingOutletNodeId} />}
       </div>
       {numbers === null && (
