@@ -2,6 +2,7 @@
 import type { AirSegment, AirSystem, Section } from "../air-system.ts";
 import { slackFactor } from "../friction/flexible.ts";
 import { darcyFrictionFactor } from "../friction/friction-factor.ts";
+import { laminarEquivalentRatio } from "../friction/laminar-equivalent.ts";
 import { roughnessOf } from "../friction/roughness.ts";
 import { velocityPressure } from "../air/velocity-pressure.ts";
 import { hydraulicDiameter, sectionArea, wettedPerimeter } from "../geometry/section.ts";
@@ -17,6 +18,8 @@ import {
   type PascalsPerMeter,
 } from "../quantity.ts";
 import { standardCandidates } from "./candidates.ts";
+
+type SizedSystem = Pick<AirSystem, "sizing" | "spec" | "frictionBasis">;
 
 export interface SizeOption {
   /** As typed into the layout. */
@@ -36,7 +39,7 @@ export interface SizeOption {
  * Range    standard sizes; higher than the rule's greatest height are left out, as are shapes where none carries the air
  */
 export function sizeOptions(
-  system: Pick<AirSystem, "sizing" | "spec">,
+  system: SizedSystem,
   segment: AirSegment,
   airflow: CubicMetersPerSecond,
   air: { density_kg_m3: KilogramsPerCubicMeter; viscosity_pa_s: PascalSeconds },
@@ -50,7 +53,7 @@ export function sizeOptions(
     for (const { section, height_m } of standardCandidates[shape]) {
       const height = shape === "round" ? 0 : height_m;
       if (leastOf.has(height) || (highest !== null && height_m > highest + 1e-6)) continue;
-      const option = optionOf(system.spec, segment, section, airflow, air);
+      const option = optionOf(system, segment, section, airflow, air);
       if (option && option.frictionRate_pa_m <= rate * (1 + 1e-9)) leastOf.set(height, option);
     }
     options.push(...leastOf.values());
@@ -60,7 +63,7 @@ export function sizeOptions(
 
 /** Null where the liner leaves nothing open. */
 function optionOf(
-  spec: AirSystem["spec"],
+  { spec, frictionBasis }: SizedSystem,
   segment: AirSegment,
   section: Section,
   airflow: CubicMetersPerSecond,
@@ -72,7 +75,8 @@ function optionOf(
   const diameter = hydraulicDiameter(area, perimeter);
   const velocity = metersPerSecond(airflow / area);
   const reynoldsNumber = (density * velocity * diameter) / viscosity;
-  const factor = darcyFrictionFactor(clear, reynoldsNumber, roughnessOf(segment, spec) / diameter);
+  const scale = frictionBasis === "hydraulic-diameter" ? 1 : laminarEquivalentRatio(clear);
+  const factor = darcyFrictionFactor(clear, reynoldsNumber, roughnessOf(segment, spec) / diameter, scale);
   const slack = segment.flexible ? slackFactor({ slack: spec.flexibleSlack, diameter }) : 1;
   return {
     section,

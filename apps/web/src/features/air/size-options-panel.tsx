@@ -13,7 +13,7 @@ import {
   type SizeOption,
 } from "@cleatwork/calc";
 import type { ChangeSet } from "@cleatwork/contracts";
-import { setSegments, type TrialOutcome } from "@cleatwork/layout";
+import { find, setSegments, type TrialOutcome } from "@cleatwork/layout";
 import { useMemo } from "react";
 import { Button } from "../../ui/button.tsx";
 import { EmptyState } from "../../ui/empty-state.tsx";
@@ -84,7 +84,8 @@ function Options({
     const known = change(row);
     return known && (known.systems[0]?.requiredPressure_pa ?? 0);
   };
-  const now = solvedOf(segmentId)?.section;
+  // The size in the layout: what the air sees may be smaller by the liner.
+  const now = find(layout, "segment", segmentId)?.section ?? solvedOf(segmentId)?.section;
   const isNow = ({ set, option }: Row) =>
     set === null || (now !== undefined && formatSize(now, units).text === formatSize(option.section, units).text);
 
