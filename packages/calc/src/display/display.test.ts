@@ -16,6 +16,7 @@ import {
 import type { Result } from "../result.ts";
 import {
   formatAirflow,
+  formatCounted,
   formatFrictionRate,
   formatLength,
   formatMoney,
@@ -188,5 +189,17 @@ describe("figures", () => {
     expect(formatMoneyChange(11_530, "USD").text).toBe("+$115.30");
     expect(formatUnitPrice(1_062_500, "USD").text).toBe("$1.0625");
     expect(formatUnitPrice(1_120_000, "USD").text).toBe("$1.12");
+  });
+});
+
+describe("a counted thing", () => {
+  it("is a bare number where it is counted in pieces", () => {
+    expect(formatCounted(41, "ea", "inch-pound").text).toBe("41");
+  });
+  it("is measured in the person's units", () => {
+    expect(formatCounted(3.048, "m", "inch-pound")).toMatchObject({ value: "10", unit: "ft" });
+    expect(formatCounted(3.048, "m", "si")).toMatchObject({ value: "3.0", unit: "m" });
+    expect(formatCounted(3.785411784, "L", "inch-pound")).toMatchObject({ value: "1.0", unit: "gal" });
+    expect(formatCounted(45.359237, "kg", "inch-pound")).toMatchObject({ value: "100.0", unit: "lb" });
   });
 });

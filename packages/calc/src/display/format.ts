@@ -6,6 +6,7 @@ import {
   METERS_PER_INCH,
   METERS_PER_SECOND_PER_FPM,
   PASCALS_PER_INCH_OF_WATER,
+  kilograms,
   type CubicMetersPerSecond,
   type Hours,
   type Kelvins,
@@ -16,6 +17,7 @@ import {
   type PascalsPerMeter,
   type SquareMeters,
 } from "../quantity.ts";
+import type { CountedItem } from "../takeoff/takeoff.ts";
 import { decimal, shown, signed, type Shown, type UnitSystem } from "./unit-system.ts";
 
 export const formatAirflow = (value: CubicMetersPerSecond, units: UnitSystem): Shown =>
@@ -48,6 +50,24 @@ export const formatWeightChange = (value: Kilograms, units: UnitSystem): Shown =
 
 export const formatArea = (value: SquareMeters, units: UnitSystem): Shown =>
   units === "si" ? shown(decimal(value, 2), "m\u00b2") : shown(decimal(value / METERS_PER_FOOT ** 2, 1), "ft\u00b2");
+
+/** US liquid gallon; exact by definition. */
+const LITERS_PER_GALLON = 3.785411784;
+
+/** A counted thing: pieces are only a number, what is measured comes in a person's units. */
+export function formatCounted(quantity: number, unit: CountedItem["unit"], units: UnitSystem): Shown {
+  const isSi = units === "si";
+  switch (unit) {
+    case "ea":
+      return shown(Number.isInteger(quantity) ? decimal(quantity, 0) : decimal(quantity, 1), "");
+    case "L":
+      return isSi ? shown(decimal(quantity, 1), "L") : shown(decimal(quantity / LITERS_PER_GALLON, 1), "gal");
+    case "m":
+      return isSi ? shown(decimal(quantity, 1), "m") : shown(decimal(quantity / METERS_PER_FOOT, 0), "ft");
+    case "kg":
+      return formatWeight(kilograms(quantity), units);
+  }
+}
 
 export const formatHours = (value: Hours, _units: UnitSystem): Shown => shown(decimal(value, 1), "h");
 

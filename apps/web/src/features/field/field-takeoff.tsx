@@ -1,4 +1,4 @@
-import { formatWeight } from "@cleatwork/calc/display/index";
+import { formatCounted, formatWeight } from "@cleatwork/calc/display/index";
 import type { Kilograms } from "@cleatwork/calc";
 import type { CompanySlug, FieldPiece, FieldTakeoff, ProjectId } from "@cleatwork/contracts";
 import { useSuspenseQuery } from "@tanstack/react-query";
@@ -132,7 +132,10 @@ function FieldItems({
   const items = takeoff.items.filter(
     (item) => (levelId === null || item.levelId === levelId) && (systemId === null || item.systemId === systemId),
   );
-  const sums = new Map<string, { description: string; quantity: number; unit: string }>();
+  const sums = new Map<
+    string,
+    { description: string; quantity: number; unit: FieldTakeoff["items"][number]["unit"] }
+  >();
   for (const item of items) {
     const known = sums.get(item.description);
     if (known) known.quantity += item.quantity;
@@ -151,9 +154,7 @@ function FieldItems({
             className="flex justify-between border-b border-line bg-sheet-hi px-4 py-3 text-lg text-ink"
           >
             {description}
-            <b>
-              {Number(quantity.toFixed(1))} {unit === "ea" ? "" : unit}
-            </b>
+            <b>{formatCounted(quantity, unit, takeoff.unitSystem).text}</b>
           </li>
         ))}
       </ul>

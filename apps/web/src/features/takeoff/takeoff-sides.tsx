@@ -1,4 +1,4 @@
-import { decimal, formatWeight, kilograms } from "@cleatwork/calc";
+import { formatCounted, formatWeight, kilograms, type CountedItem } from "@cleatwork/calc";
 import { Panel, PanelBody, PanelHead } from "../../ui/panel.tsx";
 import { useWorkspace } from "../workspace/index.ts";
 
@@ -39,8 +39,8 @@ export function MetalByGauge() {
 
 /** What is counted and not cut from sheet. */
 export function Counted() {
-  const { numbers } = useWorkspace();
-  const sums = new Map<string, { quantity: number; unit: string; basis: string }>();
+  const { numbers, units } = useWorkspace();
+  const sums = new Map<string, { quantity: number; unit: CountedItem["unit"]; basis: string }>();
   for (const { items } of numbers?.takeoffs ?? [])
     for (const { description, quantity, unit, basis } of items) {
       const known = sums.get(description);
@@ -58,9 +58,7 @@ export function Counted() {
             {[...sums].map(([description, { quantity, unit, basis }]) => (
               <tr key={description} title={basis}>
                 <td>{description}</td>
-                <td className="num">
-                  {Number.isInteger(quantity) ? quantity : decimal(quantity, 1)} {unit}
-                </td>
+                <td className="num">{formatCounted(quantity, unit, units).text}</td>
               </tr>
             ))}
           </tbody>
