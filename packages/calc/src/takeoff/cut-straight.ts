@@ -5,7 +5,8 @@ import { meters, type Meters } from "../quantity.ts";
 const NOTHING = 1e-4;
 
 /**
- * Lengths of the pieces of a straight, the short one last. They sum to the straight.
+ * Lengths of the pieces of a straight, the short one last. They sum to the straight, within a
+ * tenth of a millimeter.
  *
  * @example cutStraight(feet(37), inches(56.5)) // seven whole sections and one of 48.5 in.
  */

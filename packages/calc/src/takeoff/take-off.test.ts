@@ -68,9 +68,10 @@ describe("a straight run", () => {
               { to: "end", after: "middle", at: [length, 0], section, outlet: {} },
             ]),
           );
-          expect(cut.totals.netArea_m2).toBeCloseTo(whole.netArea_m2, 9);
-          expect(cut.totals.netWeight_kg).toBeCloseTo(whole.netWeight_kg, 9);
-          expect(cut.totals.shopHours_h).toBeCloseTo(whole.shopHours_h, 9);
+          // A straight that lacks less than a tenth of a millimeter of whole sections is made of whole ones: three straights here.
+          const ofTheRun = (3 * 1e-4) / feet(length);
+          for (const total of ["netArea_m2", "netWeight_kg", "shopHours_h"] as const)
+            expect(Math.abs(cut.totals[total] / whole[total] - 1)).toBeLessThan(ofTheRun + 1e-9);
           expect(cut.totals.jointCount).toBeGreaterThanOrEqual(whole.jointCount);
           expect(count(cut, "hanger")).toBe(count(takeoffOf(aRun(section, length)), "hanger"));
         },
