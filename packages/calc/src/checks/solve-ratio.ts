@@ -104,7 +104,8 @@ function solveOnce(system: AirSystem): number {
 function solveAndWrite(system: AirSystem): number {
   const answer = solve(system);
   if (!answer.ok) throw new Error("The timed system stopped being solvable");
-  return answer.value.segments.length + answer.value.paths.length;
+  const { segments, paths, findings, fan } = answer.value;
+  return segments.length + paths.length + findings.length + fan.airflow_m3s;
 }
 
 const quantile = (values: readonly number[], share: number): number =>

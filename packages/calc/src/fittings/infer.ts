@@ -1,5 +1,13 @@
 /** Which fitting the geometry calls for. The estimator's own choice comes before, see network/solve-fittings.ts. */
-import { MOUTH_TYPES, type ConstructionSpec, type FittingType, type MouthType, type Section } from "../air-system.ts";
+import {
+  MOUTH_TYPES,
+  type ConstructionSpec,
+  type FittingType,
+  type MouthType,
+  type RectangularElbow,
+  type RoundElbow,
+  type Section,
+} from "../air-system.ts";
 
 /** Under this a bend is how it was drawn, not an elbow. */
 export const SMALLEST_TURN_COSINE = Math.cos((10 * Math.PI) / 180);
@@ -7,7 +15,20 @@ export const SMALLEST_TURN_COSINE = Math.cos((10 * Math.PI) / 180);
 const WYE_OVER_COSINE = Math.cos((67.5 * Math.PI) / 180);
 
 export const elbowType = (section: Section, { elbow }: ConstructionSpec): FittingType =>
-  section.shape === "rectangular" ? `elbow-${elbow.rectangular}` : `elbow-${elbow.round}`;
+  section.shape === "rectangular" ? RECTANGULAR_ELBOW_TYPES[elbow.rectangular] : ROUND_ELBOW_TYPES[elbow.round];
+
+// Written out, because a name put together anew for every elbow costs more than its coefficient.
+const RECTANGULAR_ELBOW_TYPES = {
+  radius: "elbow-radius",
+  "radius-splitters": "elbow-radius-splitters",
+  "square-throat": "elbow-square-throat",
+  "square-throat-vanes": "elbow-square-throat-vanes",
+} as const satisfies Record<RectangularElbow, FittingType>;
+const ROUND_ELBOW_TYPES = {
+  smooth: "elbow-smooth",
+  gored: "elbow-gored",
+  mitered: "elbow-mitered",
+} as const satisfies Record<RoundElbow, FittingType>;
 
 export const tapType = (section: Section, { branch }: ConstructionSpec): FittingType =>
   TAPS[section.shape === "rectangular" ? branch.rectangular : branch.round];

@@ -5,11 +5,14 @@
 export interface IdIndex {
   readonly records: readonly { readonly id: string }[];
   /** Index + 1 of a record, 0 where empty; open addressing, at most half full. */
-  readonly slots: Int32Array;
+  readonly slots: Slots;
   readonly hasDuplicates: boolean;
   /** Used instead of the slots when they would be slow. */
   readonly map: Map<string, number> | null;
 }
+
+/** Small numbers where they suffice: half the memory to clear. */
+type Slots = Uint16Array | Int32Array;
 
 export const NOT_FOUND = -1;
 
@@ -19,7 +22,7 @@ const MOST_STEPS = 16;
 export function indexIds(records: readonly { readonly id: string }[]): IdIndex {
   let size = 16;
   while (size < 2 * records.length) size *= 2;
-  const slots = new Int32Array(size);
+  const slots = records.length < 0xffff ? new Uint16Array(size) : new Int32Array(size);
   const stepsLeft = MOST_STEPS * records.length;
   const answer = fill(records, slots, stepsLeft);
   return answer === CROWDED ? indexByMap(records) : { records, slots, hasDuplicates: answer > 0, map: null };
@@ -28,7 +31,7 @@ export function indexIds(records: readonly { readonly id: string }[]): IdIndex {
 const CROWDED = -1;
 
 /** Number of ids that were there already, or CROWDED. */
-function fill(records: readonly { readonly id: string }[], slots: Int32Array, steps: number): number {
+function fill(records: readonly { readonly id: string }[], slots: Slots, steps: number): number {
   const mask = slots.length - 1;
   let duplicates = 0;
   let stepsLeft = steps;

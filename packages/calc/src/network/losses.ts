@@ -15,7 +15,6 @@ export interface Losses {
   readonly frictionLoss: Float64Array;
   readonly dynamicLoss: Float64Array;
   /** Sums from the equipment to the far end of each segment. */
-  readonly lengthTo: Float64Array;
   readonly frictionTo: Float64Array;
   readonly dynamicTo: Float64Array;
   /** Total pressure left of the available at either end. */
@@ -34,7 +33,6 @@ export function sumLosses(
   const losses: Losses = {
     frictionLoss: new Float64Array(segmentCount),
     dynamicLoss: new Float64Array(segmentCount),
-    lengthTo: new Float64Array(segmentCount),
     frictionTo: new Float64Array(segmentCount),
     dynamicTo: new Float64Array(segmentCount),
     entering: new Float64Array(segmentCount),
@@ -44,7 +42,7 @@ export function sumLosses(
     losses.frictionLoss[s] = frictionRate[s]! * length[s]!;
     losses.dynamicLoss[s] = dynamicLossOf(fittings, s) + accessoryLossOf(accessories[s]!);
   }
-  addUp(losses, length, order, before, design.availablePressure_pa);
+  addUp(losses, order, before, design.availablePressure_pa);
   return losses;
 }
 
@@ -60,13 +58,12 @@ function accessoryLossOf(accessories: readonly SolvedAccessory[]): number {
   return sum;
 }
 
-function addUp(losses: Losses, length: Float64Array, order: Int32Array, before: Int32Array, available: number): void {
-  const { frictionLoss, dynamicLoss, lengthTo, frictionTo, dynamicTo, entering, leaving } = losses;
+function addUp(losses: Losses, order: Int32Array, before: Int32Array, available: number): void {
+  const { frictionLoss, dynamicLoss, frictionTo, dynamicTo, entering, leaving } = losses;
   for (let at = 0; at < order.length; at++) {
     const s = order[at]!;
     const parent = before[s]!;
     const isFirst = parent === NONE;
-    lengthTo[s] = (isFirst ? 0 : lengthTo[parent]!) + length[s]!;
     frictionTo[s] = (isFirst ? 0 : frictionTo[parent]!) + frictionLoss[s]!;
     dynamicTo[s] = (isFirst ? 0 : dynamicTo[parent]!) + dynamicLoss[s]!;
     entering[s] = isFirst ? available : leaving[parent]!;
@@ -83,17 +80,26 @@ function addUp(losses: Losses, length: Float64Array, order: Int32Array, before: 
 export const staticLessTotal = (isUnderPressure: boolean, velocityPressure: number): number =>
   isUnderPressure ? -velocityPressure : velocityPressure;
 
+interface LeakingColumns {
+  readonly system: AirSystem;
+  readonly sections: Sections;
+  readonly traits: Traits;
+  readonly course: Course;
+  readonly friction: Friction;
+  readonly losses: Losses;
+}
+
 /** Air through the walls of each segment, at its mean static pressure. */
-export function findLeakage(
-  { service }: AirSystem,
-  { section, perimeter }: Sections,
-  traits: Traits,
-  { length }: Course,
-  { velocityPressure }: Friction,
-  { entering, leaving }: Losses,
-): Float64Array {
+export function findLeakage({
+  system,
+  sections: { section, perimeter },
+  traits,
+  course: { length },
+  friction: { velocityPressure },
+  losses: { entering, leaving },
+}: LeakingColumns): Float64Array {
   const leaks = new Float64Array(length.length);
-  const isUnderPressure = service === "supply";
+  const isUnderPressure = system.service === "supply";
   for (let s = 0; s < leaks.length; s++) {
     const meanTotal = (entering[s]! + leaving[s]!) / 2;
     const staticPressure = meanTotal + staticLessTotal(isUnderPressure, velocityPressure[s]!);

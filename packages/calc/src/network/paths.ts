@@ -52,7 +52,7 @@ function indexOfMost(values: Float64Array): number {
 
 /** Paths in the order of the outlets. Walks the tree once with the way so far at hand, and copies it at each outlet. */
 export function writePaths(
-  { system, sections, friction, accessories, losses }: SolvedColumns,
+  { system, course, sections, friction, accessories, losses }: SolvedColumns,
   { outlets, into, order, depth }: Tree,
   needs: OutletNeeds,
   practice: PracticeCoefficients,
@@ -64,9 +64,11 @@ export function writePaths(
   for (let o = 0; o < outlets.length; o++) outletAfter[into[outlets[o]!]!] = o;
 
   const way: string[] = [];
+  const lengthTo = new Float64Array(order.length);
   for (let at = 0; at < order.length; at++) {
     const s = order[at]!;
     way[depth[s]!] = segments[s]!.id;
+    lengthTo[depth[s]!] = (depth[s] === 0 ? 0 : lengthTo[depth[s]! - 1]!) + course.length[s]!;
     const o = outletAfter[s]!;
     if (o === NONE) continue;
     const segmentIds = way.slice(0, depth[s]! + 1);
@@ -80,6 +82,7 @@ export function writePaths(
     paths[o] = new PathRecord(
       nodes[outlets[o]!]!.id,
       segmentIds,
+      lengthTo[depth[s]!]!,
       losses,
       s,
       needs,
@@ -96,7 +99,8 @@ const PathRecord = plainRecord(function (
   this: Draft<SolvedPath>,
   outletNodeId: string,
   segmentIds: readonly string[],
-  { lengthTo, frictionTo, dynamicTo }: Losses,
+  length: number,
+  { frictionTo, dynamicTo }: Losses,
   last: number,
   { outletPressure, required }: OutletNeeds,
   outlet: number,
@@ -106,7 +110,7 @@ const PathRecord = plainRecord(function (
 ) {
   this.outletNodeId = outletNodeId;
   this.segmentIds = segmentIds;
-  this.length_m = meters(lengthTo[last]!);
+  this.length_m = meters(length);
   this.frictionLoss_pa = pascals(frictionTo[last]!);
   this.dynamicLoss_pa = pascals(dynamicTo[last]!);
   this.outletPressure_pa = pascals(outletPressure[outlet]!);

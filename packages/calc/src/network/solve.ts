@@ -6,7 +6,13 @@ import { describeJoints } from "../fittings/joints.ts";
 import { sumJunctions } from "../fittings/junction-sums.ts";
 import { shippedPractice, type PracticeCoefficients } from "../fittings/practice.table.ts";
 import { transitionForm } from "../fittings/transition.ts";
-import { cubicMetersPerSecond, pascals, radians } from "../quantity.ts";
+import {
+  cubicMetersPerSecond,
+  pascals,
+  radians,
+  type KilogramsPerCubicMeter,
+  type PascalSeconds,
+} from "../quantity.ts";
 import { review } from "../findings/review.ts";
 import { ok, type Result } from "../result.ts";
 import { sizingTables } from "../sizing/size-rule.ts";
@@ -21,12 +27,12 @@ import { fittingColumns } from "./fitting-columns.ts";
 import { addUpFlows } from "./flows.ts";
 import { findFriction } from "./friction.ts";
 import { findLeakage, sumLosses } from "./losses.ts";
-import { findNeeds, reportShort, writePaths } from "./paths.ts";
+import { findNeeds, reportShort, writePaths, type OutletNeeds } from "./paths.ts";
 import { chooseSections } from "./sections.ts";
-import type { Finding, Solution, SolvedPath, SolvedSegment, SystemProblem } from "./solution.ts";
+import type { Solution, SystemProblem } from "./solution.ts";
 import { readTraits } from "./traits.ts";
-import { buildTree } from "./tree.ts";
-import { writeSegments } from "./write-segments.ts";
+import { buildTree, type Tree } from "./tree.ts";
+import { writeSegments, type SolvedColumns } from "./write-segments.ts";
 
 /**
  * Flows, sizes, pressure losses, paths and findings of a system, or every reason why it has none.
@@ -34,7 +40,7 @@ import { writeSegments } from "./write-segments.ts";
  * Segments carry the air of the outlets beyond them. Leakage is told beside it and added to what the equipment moves; it
  * does not change the flow in a segment. Total pressure is accounted throughout, friction on the hydraulic diameter.
  *
- * The answer is plain data, also for JSON and structured clones; `segments`, `paths` and `findings` are made on first reading.
+ * The answer is plain data, also for JSON and structured clones, though most of it is made on first reading.
  *
  * Range    one pass each way over the segments: cost is linear in them
  * Problem  every code of `SystemProblem`, all at once
@@ -85,45 +91,71 @@ export function solve(
   const accessories = findAccessories(system, sections, friction, practice, findings);
 
   const losses = sumLosses(system, tree, course, friction, fittings, accessories);
-  const leakage = findLeakage(system, sections, traits, course, friction, losses);
-  const columns = { system, course, flows, sections, traits, friction, fittings, accessories, losses, leakage };
-  checkDesign(columns, findings);
   const needs = findNeeds(system, tree, friction, losses);
-  reportShort(system, tree, needs, findings);
+  const columns = { system, course, flows, sections, traits, friction, fittings, accessories, losses };
+  return ok(solutionOf({ columns, tree, needs, findings, practice, air: { density, viscosity } }));
+}
 
+interface Solved {
+  readonly columns: SolvedColumns;
+  readonly tree: Tree;
+  readonly needs: OutletNeeds;
+  /** What was marked on the way; the review adds to it. */
+  readonly findings: FindingList;
+  readonly practice: PracticeCoefficients;
+  readonly air: { readonly density: KilogramsPerCubicMeter; readonly viscosity: PascalSeconds };
+}
+
+/**
+ * The answer. What follows from the solved columns and changes nothing else (records, leakage, the fan's duty, findings) is
+ * computed when it is first read, and kept: together it costs more than the rest, and most readers want little of it.
+ */
+function solutionOf({ columns, tree, needs, findings, practice, air }: Solved): Solution {
+  const { system, friction } = columns;
+  const { design } = system;
   const requiredPressure = needs.required[needs.governing]!;
   const outletAirflow = totalAirflow(system, tree.outlets);
-  const totalLeakage = totalOf(leakage);
-  const sums = { requiredPressure, outletAirflow, leakage: totalLeakage };
-  const fan = fanDuty(design, sums, tree, friction.velocityPressure);
-
-  // Records cost as much as the physics, and most readers want few of them: written when they are first asked for.
-  let segments: readonly SolvedSegment[] | null = null;
-  let paths: readonly SolvedPath[] | null = null;
-  let found: readonly Finding[] | null = null;
-  return ok({
+  const leakage = once(() => findLeakage(columns));
+  const fan = once(() => {
+    const sums = { requiredPressure, outletAirflow, leakage: totalOf(leakage()) };
+    return fanDuty(design, sums, tree, friction.velocityPressure);
+  });
+  const segments = once(() => writeSegments(columns, leakage(), requiredPressure));
+  const paths = once(() => writePaths(columns, tree, needs, practice));
+  const found = once(() => {
+    checkDesign(columns, findings);
+    reportShort(system, tree, needs, findings);
+    review({ columns, tree, needs, fan: fan(), findings });
+    return inOrder(findings);
+  });
+  return {
     systemId: system.id,
-    air: { density_kg_m3: density, viscosity_pa_s: viscosity },
+    air: { density_kg_m3: air.density, viscosity_pa_s: air.viscosity },
     get segments() {
-      return (segments ??= writeSegments(columns, requiredPressure));
+      return segments();
     },
     get paths() {
-      return (paths ??= writePaths(columns, tree, needs, practice));
+      return paths();
     },
     governingOutletNodeId: system.nodes[tree.outlets[needs.governing]!]!.id,
     requiredPressure_pa: pascals(requiredPressure),
     availablePressure_pa: design.availablePressure_pa,
     outletAirflow_m3s: cubicMetersPerSecond(outletAirflow),
-    leakage_m3s: cubicMetersPerSecond(totalLeakage),
-    fan,
-    get findings() {
-      if (found === null) {
-        review({ columns, tree, needs, fan, findings });
-        found = inOrder(findings);
-      }
-      return found;
+    get leakage_m3s() {
+      return cubicMetersPerSecond(totalOf(leakage()));
     },
-  });
+    get fan() {
+      return fan();
+    },
+    get findings() {
+      return found();
+    },
+  };
+}
+
+function once<T>(make: () => T): () => T {
+  let made: { readonly value: T } | null = null;
+  return () => (made ??= { value: make() }).value;
 }
 
 function totalAirflow({ nodes }: AirSystem, outlets: readonly number[]): number {

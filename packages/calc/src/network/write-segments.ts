@@ -24,21 +24,29 @@ export interface SolvedColumns {
   readonly fittings: FittingColumns;
   readonly accessories: readonly (readonly SolvedAccessory[])[];
   readonly losses: Losses;
-  readonly leakage: Float64Array;
 }
 
-export function writeSegments(columns: SolvedColumns, requiredPressure: number): readonly SolvedSegment[] {
-  const segments = new Array<SolvedSegment>(columns.leakage.length);
-  write(columns, requiredPressure, segments);
+export function writeSegments(
+  columns: SolvedColumns,
+  leakage: Float64Array,
+  requiredPressure: number,
+): readonly SolvedSegment[] {
+  const segments = new Array<SolvedSegment>(leakage.length);
+  write(columns, leakage, requiredPressure, segments);
   return segments;
 }
 
 // A function of its own that answers nothing: the engine keeps such a loop compiled.
-function write(columns: SolvedColumns, requiredPressure: number, segments: SolvedSegment[]): void {
+function write(
+  columns: SolvedColumns,
+  leakage: Float64Array,
+  requiredPressure: number,
+  segments: SolvedSegment[],
+): void {
   const scratch: SolvedFitting[] = [];
   for (let s = 0; s < segments.length; s++) {
     const fittings = fittingsOf(columns.system, columns.sections, columns.fittings, s, scratch);
-    segments[s] = new SegmentRecord(columns, s, fittings, requiredPressure);
+    segments[s] = new SegmentRecord(columns, s, fittings, leakage[s]!, requiredPressure);
   }
 }
 
@@ -47,6 +55,7 @@ const SegmentRecord = plainRecord(function (
   columns: SolvedColumns,
   s: number,
   fittings: readonly SolvedFitting[],
+  leakage: number,
   requiredPressure: number,
 ) {
   const { sections, friction, losses } = columns;
@@ -71,7 +80,7 @@ const SegmentRecord = plainRecord(function (
   this.accessories = columns.accessories[s]!;
   this.dynamicLoss_pa = pascals(losses.dynamicLoss[s]!);
   this.totalPressureLoss_pa = pascals(losses.frictionLoss[s]! + losses.dynamicLoss[s]!);
-  this.leakage_m3s = cubicMetersPerSecond(columns.leakage[s]!);
+  this.leakage_m3s = cubicMetersPerSecond(leakage);
   this.outletCount = columns.flows.outletCount[s]!;
   this.pressureLeftEntering_pa = pascals(losses.entering[s]!);
   this.pressureLeftLeaving_pa = pascals(losses.leaving[s]!);
