@@ -10,7 +10,7 @@ const WHAT: Readonly<Record<SolveKind, string>> = {
 };
 
 export function solveFigures(): readonly Figure[] {
-  const ratio = measureSolveRatio({ segmentCount: 5000, warmUp: 20, rounds: 61, now: () => performance.now() });
+  const ratio = measureSolveRatio({ segmentCount: 5000, warmUp: 60, rounds: 61, now: () => performance.now() });
   return (Object.keys(WHAT) as SolveKind[]).map((kind) => ({
     what: WHAT[kind],
     figure: ratio.overColebrook[kind],
